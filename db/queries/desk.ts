@@ -1,0 +1,71 @@
+import 'server-only';
+import { and, asc, eq, sql } from 'drizzle-orm';
+import { db } from '../client';
+import { journals } from '../schema/journals';
+import { muslins } from '../schema/muslins';
+import { patternVersions } from '../schema/pattern-versions';
+import { patterns } from '../schema/patterns';
+import { rounds } from '../schema/rounds';
+import { wearers } from '../schema/wearers';
+import { roundFacts } from './round-facts';
+import type { Viewer } from './viewer';
+import { roundVisibleTo } from './visible-to';
+
+/** The newest value of each measure that sizes a body, mm: `{ hip: 1020, … }`. */
+const latestBody = sql<Partial<Record<'waist' | 'hip' | 'thigh' | 'knee' | 'calf', number>>>`(
+  select coalesce(json_object_agg(latest.measure, latest.value_mm), '{}') from (
+    select distinct on (m.measure) m.measure, m.value_mm
+    from measurements m join measurement_sets s on s.id = m.set_id
+    where s.wearer_id = wearers.id and s.deleted_at is null and m.measure in ('waist', 'hip', 'thigh', 'knee', 'calf')
+    order by m.measure, s.measured_on desc, s.id desc, m.take
+  ) latest)`;
+
+/**
+ * Everything the reading of a journal stands on: who it is for, and every round that the viewer may see with what was found in
+ * it, oldest first. Null when there is none to see.
+ */
+export async function findDesk(viewer: Viewer, journalId: string) {
+  const rows = await db()
+    .select({
+      journalId: journals.id,
+      journalName: journals.name,
+      isOwner: sql<boolean>`${journals.ownerId} = ${viewer.userId}`,
+      isSettled: sql<boolean>`${journals.settledAt} is not null`,
+      wearerName: wearers.name,
+      fittedFor: wearers.fittedFor,
+      shape: wearers.shape,
+      body: latestBody,
+      patternName: patterns.name,
+      garment: patterns.garment,
+      round: {
+        id: rounds.id,
+        number: rounds.number,
+        begun: rounds.begun,
+        wornOn: rounds.wornOn,
+        note: rounds.note,
+        hangsCleanAt: rounds.hangsCleanAt,
+        version: rounds.version,
+        cut: muslins.cut,
+        cloth: muslins.cloth,
+        clothKind: muslins.clothKind,
+        stretchPercent: muslins.stretchPercent,
+        isOnGrain: muslins.isOnGrain,
+        size: muslins.size,
+        ...roundFacts(viewer.userId),
+      },
+    })
+    .from(rounds)
+    .innerJoin(muslins, eq(muslins.id, rounds.muslinId))
+    .innerJoin(journals, eq(journals.id, rounds.journalId))
+    .innerJoin(wearers, eq(wearers.id, journals.wearerId))
+    .innerJoin(patternVersions, eq(patternVersions.id, journals.patternVersionId))
+    .innerJoin(patterns, eq(patterns.id, patternVersions.patternId))
+    .where(and(eq(rounds.journalId, journalId), roundVisibleTo(viewer)))
+    .orderBy(asc(rounds.number));
+  const [first] = rows;
+  if (!first) return null;
+  const { round: _round, ...head } = first;
+  return { ...head, rounds: rows.map((row) => row.round) };
+}
+export type DeskDto = NonNullable<Awaited<ReturnType<typeof findDesk>>>;
+export type DeskRoundDto = DeskDto['rounds'][number];
