@@ -19,9 +19,9 @@ const ROUND: Record<Rounding, (x: number) => number> = {
 
 const divisor = (a: number, b: number): number => (b === 0 ? a : divisor(b, a % b));
 
-/** The marks on the tape: a sixteenth of an inch below 1/4 in, an eighth above; a millimetre. */
+/** The marks on the tape: a sixteenth of an inch below 2 in, an eighth above; a millimetre. */
 export const tickMm = (unit: LengthUnit, mm: number): number =>
-  unit === 'cm' ? 1 : MM_PER_INCH / (Math.abs(mm) < MM_PER_INCH / 4 ? 16 : 8);
+  unit === 'cm' ? 1 : MM_PER_INCH / (Math.abs(mm) < MM_PER_INCH * 2 ? 16 : 8);
 
 /**
  * @param mm a finite length in millimetres
