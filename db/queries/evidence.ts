@@ -37,8 +37,8 @@ export interface SavedFact {
 }
 export interface EvidenceAnswer {
   saved: SavedFact[];
-  /** What was sent against a state that had changed since: both are given back, nothing was overwritten. */
-  conflicts: { kind: SavedFact['kind']; id: string; side: Side; mine: unknown; theirs: unknown }[];
+  /** What was sent against a state that had changed since: what stands there is given back, nothing was overwritten. */
+  conflicts: { kind: SavedFact['kind']; id: string; side: Side; theirs: { version: number; says: string } }[];
 }
 
 /** The three tables of states are written alike: by key and author, guarded by the version seen. */
@@ -54,7 +54,12 @@ interface State {
   key: SQL | undefined;
   /** The values to write, or null to take the row away. */
   write: { insert: (tx: Executor) => Promise<unknown>; set: Record<string, unknown> } | null;
-  mine: unknown;
+}
+
+/** What a row says, as the bare value: a severity, an outcome, yes or no. */
+function saidIn(row: StateTable['table']['$inferSelect']): string {
+  if ('severity' in row) return String(row.severity);
+  return 'outcome' in row ? row.outcome : String(row.isPresent);
 }
 
 async function saveState(
@@ -66,7 +71,7 @@ async function saveState(
   const { id, side, key, seen, write } = state;
   const [now] = await tx.select().from(table).where(key).for('update');
   if (now && now.version !== seen) {
-    answer.conflicts.push({ kind, id, side, mine: state.mine, theirs: now });
+    answer.conflicts.push({ kind, id, side, theirs: { version: now.version, says: saidIn(now) } });
     return;
   }
   if (!write) {
@@ -90,7 +95,6 @@ function signState(roundId: string, authorId: string, input: EvidenceInput['sign
     id: input.sign,
     side: input.side,
     seen,
-    mine: input,
     key: and(
       eq(roundSigns.roundId, roundId),
       eq(roundSigns.authorId, authorId),
@@ -110,7 +114,6 @@ function checkState(roundId: string, authorId: string, input: EvidenceInput['che
     id: check,
     side,
     seen,
-    mine: input,
     key: and(
       eq(roundChecks.roundId, roundId),
       eq(roundChecks.authorId, authorId),
@@ -134,7 +137,6 @@ function causeState(roundId: string, authorId: string, input: EvidenceInput['cau
     id: cause,
     side: 'both',
     seen,
-    mine: input,
     key: and(
       eq(roundCauses.roundId, roundId),
       eq(roundCauses.authorId, authorId),

@@ -1,0 +1,37 @@
+import { deleteDB, type IDBPDatabase, openDB } from 'idb';
+
+const nameOf = (userId: string) => `ruckle-drafts-${userId}`;
+const STORE = 'drafts';
+const open = new Map<string, Promise<IDBPDatabase>>();
+
+function database(userId: string): Promise<IDBPDatabase> {
+  const had = open.get(userId);
+  if (had) return had;
+  const made = openDB(nameOf(userId), 1, { upgrade: (db) => void db.createObjectStore(STORE) });
+  open.set(userId, made);
+  return made;
+}
+
+/** What a person wrote and the server has not acknowledged, kept on this device for that person only. */
+export async function readDraft<T>(userId: string, key: string): Promise<T | null> {
+  return ((await (await database(userId)).get(STORE, key)) as T | undefined) ?? null;
+}
+
+/** Null takes the draft away. */
+export async function writeDraft(userId: string, key: string, draft: unknown): Promise<void> {
+  const db = await database(userId);
+  if (draft === null) await db.delete(STORE, key);
+  else await db.put(STORE, draft, key);
+}
+
+export async function countDrafts(userId: string): Promise<number> {
+  return (await database(userId)).count(STORE);
+}
+
+/** At sign-out, after a warning that counts them. */
+export async function wipeDrafts(userId: string): Promise<void> {
+  const db = await open.get(userId);
+  db?.close();
+  open.delete(userId);
+  await deleteDB(nameOf(userId));
+}
