@@ -178,7 +178,15 @@ export const correctionSchema = z.strictObject({
   aliases: z.array(id).optional(),
 });
 
-const leans = z.array(z.strictObject({ to: id, direction, logOdds: z.number().min(0).max(0.7) }));
+/** Log-odds toward a direction of a need, 0 … 0.7 (a factor of 2 at the most); with `side`, of that leg alone. */
+const leans = z.array(
+  z.strictObject({
+    to: id,
+    direction,
+    logOdds: z.number().min(0).max(0.7),
+    side: z.enum(['left', 'right']).optional(),
+  }),
+);
 
 export const shapeSchema = z.strictObject({
   id,
@@ -186,7 +194,6 @@ export const shapeSchema = z.strictObject({
   description: words,
   /** Old trade words: for search only. */
   synonyms: z.array(words),
-  /** Log-odds toward that direction of the need, 0 … 0.7 (a factor of 2 at the most). */
   leans,
   /** The note applies by itself when the garment is fitted for this. */
   fittedFor: z.enum(['both', 'seated']).optional(),
