@@ -9,6 +9,7 @@ import { z } from 'zod';
 export const GRADES = ['defining', 'strong', 'usual', 'sometimes', 'rare'] as const;
 export const BASES = ['round', 'piece', 'edge', 'pinch'] as const;
 export const VIEWS = ['front', 'back', 'left', 'right', 'seated', 'close-up'] as const;
+export const CLOTHS = ['woven', 'stretch-woven', 'knit'] as const;
 export const SIZE_LEVELS = ['waist', 'hip', 'thigh', 'knee', 'calf', 'length'] as const;
 
 const id = z.string().regex(/^[a-z][a-z0-9]*(-[a-z0-9]+)*$/);
@@ -177,17 +178,31 @@ export const correctionSchema = z.strictObject({
   aliases: z.array(id).optional(),
 });
 
+/** Log-odds toward a direction of a need, 0 … 0.7 (a factor of 2 at the most); with `side`, of that leg alone. */
+const leans = z.array(
+  z.strictObject({
+    to: id,
+    direction,
+    logOdds: z.number().min(0).max(0.7),
+    side: z.enum(['left', 'right']).optional(),
+  }),
+);
+
 export const shapeSchema = z.strictObject({
   id,
   name: words,
   description: words,
   /** Old trade words: for search only. */
   synonyms: z.array(words),
-  /** Log-odds toward that direction of the need, 0 … 0.7 (a factor of 2 at the most). */
-  leans: z.array(z.strictObject({ to: id, direction, logOdds: z.number().min(0).max(0.7) })),
+  leans,
+  /** The note applies by itself when the garment is fitted for this. */
+  fittedFor: z.enum(['both', 'seated']).optional(),
   sources,
   aliases: z.array(id).optional(),
 });
+
+/** A cloth that makes some needs a little more common, and only a little. */
+export const clothSchema = z.strictObject({ kind: z.enum(CLOTHS), leans, sources });
 
 /** A body measure that speaks about a weighted sum of needs. */
 export const sumSchema = z.strictObject({
@@ -210,6 +225,7 @@ export const knowledgeSchema = z.strictObject({
   corrections: z.array(correctionSchema),
   shape: z.array(shapeSchema),
   sums: z.array(sumSchema),
+  cloth: z.array(clothSchema).optional(),
 });
 
 export type Grade = (typeof GRADES)[number];

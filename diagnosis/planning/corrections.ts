@@ -1,0 +1,227 @@
+import type { Side } from '../case-schema';
+import type { Correction } from '../garments/schema';
+import { variablesFor } from '../inference/layout';
+import { ownAmount } from '../inference/replay';
+import type { CorrectionRow, Range } from '../reading';
+import { amountText } from './amount-text';
+import { expectedMisfit } from './misfit';
+import { tailAt } from './outlook';
+import type { Outlook, Tail } from './outlook';
+import { LIKELY_FROM, wordOf } from './words';
+
+/** Amounts tried for the best admissible one, as parts of the cap. */
+const AMOUNTS_TRIED = 12;
+/** A first change takes two thirds of what is estimated. */
+const FIRST_SHARE = 2 / 3;
+/** Cost, in tolerances, of a change that was not needed, beside the misfit it makes: for any change, and per unit of risk. */
+const NEEDLESS_COST = 0.06;
+const RISK_COST = 0.3;
+/** How much of a need is expected to go where the change is not a length. */
+const REMEDY_SHARE = 0.7;
+/** Left and right are one below this difference, mm (1/4 in). */
+const SIDES_APART_MM = 6;
+/** An estimate is firm when its likely range is no wider than this share of it. */
+const FIRM_SHARE = 0.8;
+
+/** A correction that was scored, with what planning needs beside the row. */
+export interface Scored {
+  correction: Correction;
+  side: Side;
+  score: number;
+  /** P(the need that it serves most). */
+  probability: number;
+  serves: Tail[];
+  row: CorrectionRow;
+}
+
+/** Scores every correction on each side it makes sense on; one whose total cap is used up has no amount left and is left out. */
+export function scoreCorrections(outlook: Outlook): { scored: Scored[]; spent: Correction[] } {
+  const scored: Scored[] = [];
+  const spent: Correction[] = [];
+  for (const correction of outlook.layout.index.knowledge.corrections) {
+    for (const side of sidesOf(outlook, correction)) {
+      const one = scoreOne(outlook, correction, side);
+      if (one) scored.push(one);
+      else spent.push(correction);
+    }
+  }
+  scored.sort(byScore);
+  return { scored, spent };
+}
+
+function byScore(a: Scored, b: Scored): number {
+  if (Math.abs(a.score - b.score) > 1e-9) return b.score - a.score;
+  const pieces = a.correction.pieces.length - b.correction.pieces.length;
+  if (pieces !== 0) return pieces;
+  return a.correction.id < b.correction.id
+    ? -1
+    : a.correction.id > b.correction.id
+      ? 1
+      : a.side < b.side
+        ? -1
+        : 1;
+}
+
+/** One row for both legs while their needs are one or nearly so, else one for each. */
+function sidesOf(outlook: Outlook, correction: Correction): Side[] {
+  const split = servedBy(outlook, correction, 'both').filter(({ side }) => side !== 'both');
+  if (!correction.sided || split.length === 0) return ['both'];
+  const left = split.filter(({ side }) => side === 'left');
+  const apart = left.some((own) => {
+    const other = split.find(({ side, dimension }) => side === 'right' && dimension === own.dimension)!;
+    return Math.abs(own.probability * own.meanMm - other.probability * other.meanMm) >= SIDES_APART_MM / 2;
+  });
+  return apart ? ['left', 'right'] : ['both'];
+}
+
+/** The needs that a correction is made for, in the direction in which it meets them. */
+function servedBy({ layout, marginals }: Outlook, { vector }: Correction, side: Side): Tail[] {
+  return vector
+    .filter(({ coupling }) => !coupling)
+    .flatMap(({ dimension, perMm }) =>
+      variablesFor(layout, layout.index.dimensions.get(dimension)!, side).map((variable) =>
+        tailAt(layout, marginals, variable, perMm > 0 ? 'more' : 'less'),
+      ),
+    );
+}
+
+function scoreOne(outlook: Outlook, correction: Correction, side: Side): Scored | null {
+  const serves = servedBy(outlook, correction, side);
+  const most = serves.reduce<Tail | null>(
+    (best, tail) => (best && best.probability >= tail.probability ? best : tail),
+    null,
+  );
+  const probability = most?.probability ?? 0;
+  const limits = limitsOf(outlook, correction, side);
+  if (limits && limits.leftMm <= 0) return null;
+  const gain = limits ? bestGain(outlook, correction, side, limits.capMm) : remedyGain(outlook, serves);
+  const score = gain - (NEEDLESS_COST + RISK_COST * correction.risk) * (1 - probability);
+  const row: CorrectionRow = {
+    correction: correction.id,
+    name: correction.name,
+    side,
+    word: wordOf(probability, outlook.marksAlone),
+    score,
+    ...(limits ? amountsOf(outlook, correction, serves, limits) : NO_AMOUNTS),
+    because: [],
+    against: [],
+    cautions: correction.cautions,
+  };
+  return { correction, side, score, probability, serves, row };
+}
+
+const NO_AMOUNTS = {
+  amountMm: null,
+  amountText: null,
+  estimateMm: null,
+  basis: null,
+  firstMm: null,
+  capRoundMm: null,
+  capTotalMm: null,
+  beyond: null,
+};
+
+interface Limits {
+  firstMm: number;
+  capRoundMm: number;
+  capTotalMm: number;
+  /** What is left of the total cap after the rounds before. */
+  leftMm: number;
+  /** What this round may take at the most. */
+  capMm: number;
+}
+
+function limitsOf({ layout, fitting }: Outlook, { id, amounts }: Correction, side: Side): Limits | null {
+  if (!amounts) return null;
+  const factor = layout.factors[amounts.sizeLevel];
+  const [firstMm, capRoundMm, capTotalMm] = [amounts.firstMm, amounts.capRoundMm, amounts.capTotalMm].map(
+    (mm) => mm * factor,
+  ) as [number, number, number];
+  const madeMm = fitting.history
+    .flatMap(({ changes }) => changes)
+    .filter(
+      (change) =>
+        change.correction === id && (side === 'both' || change.side === 'both' || change.side === side),
+    )
+    .reduce((sum, change) => sum + ownAmount(layout, change), 0);
+  const leftMm = capTotalMm - madeMm;
+  // Rests below a hundredth of a millimetre come from adding, not from cutting.
+  return {
+    firstMm,
+    capRoundMm,
+    capTotalMm,
+    leftMm: leftMm > 0.01 ? leftMm : 0,
+    capMm: Math.min(capRoundMm, leftMm),
+  };
+}
+
+/** Expected misfit removed at the best amount up to a cap, couplings included. */
+function bestGain({ layout, marginals }: Outlook, { vector }: Correction, side: Side, capMm: number): number {
+  const moves = vector.flatMap(({ dimension, perMm }) => {
+    const at = layout.index.dimensions.get(dimension)!;
+    return variablesFor(layout, at, side).map((variable) => ({ at, belief: marginals[variable]!, perMm }));
+  });
+  const misfit = (amountMm: number) =>
+    moves.reduce(
+      (sum, { at, belief, perMm }) =>
+        sum + expectedMisfit(layout, at, belief, (-perMm * amountMm) / layout.scaleMm[at]!),
+      0,
+    );
+  const before = misfit(0);
+  let best = -Infinity;
+  for (let part = 1; part <= AMOUNTS_TRIED; part++)
+    best = Math.max(best, before - misfit((capMm * part) / AMOUNTS_TRIED));
+  return best;
+}
+
+function remedyGain({ layout }: Outlook, serves: readonly Tail[]): number {
+  return serves.reduce((sum, { dimension, direction, probability, meanMm }) => {
+    const toleranceMm = layout.toleranceMm[dimension]!;
+    const { loss } = layout.index.knowledge.dimensions[dimension]!;
+    return sum + (REMEDY_SHARE * probability * loss[direction] * (meanMm - toleranceMm)) / toleranceMm;
+  }, 0);
+}
+
+function amountsOf(outlook: Outlook, correction: Correction, serves: readonly Tail[], limits: Limits) {
+  const amounts = correction.amounts!;
+  const estimate = estimateOf(outlook, correction, serves);
+  const [lowMm, highMm] = estimate.rangeMm;
+  const firm =
+    !outlook.marksAlone &&
+    estimate.probability >= LIKELY_FROM &&
+    highMm - lowMm <= FIRM_SHARE * estimate.meanMm;
+  const wantedMm = firm ? estimate.meanMm : Math.min(limits.firstMm, FIRST_SHARE * estimate.meanMm);
+  const amountMm = Math.min(wantedMm, limits.capMm);
+  const tooFar = estimate.meanMm > limits.leftMm;
+  return {
+    amountMm,
+    amountText: amountText(amountMm, correction, outlook.fitting.unit),
+    estimateMm: estimate.rangeMm,
+    basis: amounts.basis,
+    firstMm: limits.firstMm,
+    capRoundMm: limits.capRoundMm,
+    capTotalMm: limits.capTotalMm,
+    beyond: tooFar ? beyondOf(correction) : null,
+  };
+}
+
+function beyondOf({ amounts }: Correction): 'another-size' | 'another-draft' {
+  return amounts!.sizeLevel === 'length' ? 'another-draft' : 'another-size';
+}
+
+/** What the served needs ask of this correction, in its own basis: the mean of their means, weighed by probability. */
+function estimateOf(outlook: Outlook, { vector }: Correction, serves: readonly Tail[]) {
+  const { index } = outlook.layout;
+  let weight = 0;
+  let meanMm = 0;
+  const rangeMm: Range = [0, 0];
+  for (const tail of serves) {
+    const { perMm } = vector.find(({ dimension }) => index.dimensions.get(dimension) === tail.dimension)!;
+    const share = Math.max(tail.probability, 1e-9);
+    weight += share;
+    meanMm += (share * tail.meanMm) / Math.abs(perMm);
+    for (const end of [0, 1] as const) rangeMm[end] += (share * tail.rangeMm[end]) / Math.abs(perMm);
+  }
+  const probability = serves.reduce((most, tail) => Math.max(most, tail.probability), 0);
+  return { probability, meanMm: meanMm / weight, rangeMm: rangeMm.map((end) => end / weight) as Range };
+}

@@ -1,0 +1,25 @@
+import { tailsOf } from '../inference/beliefs';
+import type { Layout } from '../inference/layout';
+
+/** Shannon entropy of a distribution, bits; 0 · log 0 is 0. */
+export function entropyBits(distribution: Iterable<number>): number {
+  let bits = 0;
+  for (const p of distribution) if (p > 0) bits -= p * Math.log2(p);
+  return bits;
+}
+
+/** A need as what has to be decided about it: too little, fits, too much; a cause as absent, present. */
+export function decisionOf(layout: Layout, variable: number, belief: Float64Array): number[] {
+  const own = layout.variables[variable]!;
+  if (own.kind === 'cause') return [belief[0]!, belief[1]!];
+  const { more, less } = tailsOf(layout, own.dimension, belief);
+  return [less, Math.max(0, 1 - more - less), more];
+}
+
+/** Entropy of every decision together, bits, as if they were independent. */
+export function decisionBits(layout: Layout, marginals: readonly Float64Array[]): number {
+  return marginals.reduce(
+    (sum, belief, variable) => sum + entropyBits(decisionOf(layout, variable, belief)),
+    0,
+  );
+}
