@@ -1,0 +1,16 @@
+import { Server } from 'node:http';
+
+/*
+ * Loaded before the web server. Handlers see requests without their socket; this notes the socket's address in a header of our
+ * own. Whatever a client sent under that name is overwritten, so it cannot be forged.
+ */
+const HEADER = 'x-ruckle-client';
+const emit = Server.prototype.emit;
+
+Server.prototype.emit = function (event, ...args) {
+  if (event === 'request') {
+    const [request] = args;
+    request.headers[HEADER] = request.socket.remoteAddress ?? '';
+  }
+  return emit.call(this, event, ...args);
+};
