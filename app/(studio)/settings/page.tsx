@@ -4,6 +4,7 @@ import { PreferencesEditor } from '@/components/settings/PreferencesEditor';
 import { PageHead } from '@/components/ui/PageHead';
 import { Section } from '@/components/ui/Section';
 import { requireViewer } from '@/lib/auth/viewer';
+import { signOut } from './actions';
 
 export const metadata: Metadata = { title: 'Settings' };
 
@@ -19,7 +20,7 @@ export default async function SettingsPage() {
         />
         <Section title="Signed in">
           <p>as {viewer.email}</p>
-          <SignOut userId={viewer.userId} />
+          <SignOut userId={viewer.userId} action={signOut} />
         </Section>
       </div>
     </>

@@ -1,0 +1,35 @@
+'use client';
+import { useEffect, useState } from 'react';
+import type { FormState } from '@/lib/request/action';
+import { countDrafts, wipeDrafts } from '@/components/offline/drafts';
+import { Button } from '@/components/ui/Button';
+
+interface Props {
+  userId: string;
+  action: (before: FormState, form: FormData) => Promise<FormState>;
+}
+
+/** Signing out takes what waits on this device with it, after saying how much that is. */
+export function SignOut({ userId, action }: Props) {
+  const [waiting, setWaiting] = useState(0);
+  useEffect(() => {
+    void countDrafts(userId).then(setWaiting);
+  }, [userId]);
+  const leave = async (form: FormData) => {
+    await wipeDrafts(userId);
+    await action({}, form);
+  };
+  return (
+    <form action={leave} className="grid gap-2">
+      {waiting > 0 ? (
+        <p className="border-l-4 border-basting pl-3">
+          {waiting === 1 ? 'One thing waits' : `${waiting} things wait`} on this device and would be lost.
+          Open its round with a connection first, and it is sent.
+        </p>
+      ) : null}
+      <div>
+        <Button type="submit">Sign out</Button>
+      </div>
+    </form>
+  );
+}

@@ -1,0 +1,66 @@
+import 'server-only';
+
+export interface MailBody {
+  subject: string;
+  textBody: string;
+  htmlBody: string;
+}
+
+const escape = (text: string) =>
+  text.replace(
+    /[&<>"']/g,
+    (c) => ({ '&': '&amp;', '<': '&lt;', '>': '&gt;', '"': '&quot;', "'": '&#39;' })[c] ?? c,
+  );
+
+/** A letter of a few sentences and at most one link. Subjects say that something waits, never what of a body it is about. */
+function letter(subject: string, paragraphs: string[], link?: { words: string; href: string }): MailBody {
+  const close = 'If this was not you, nothing has happened and you can leave it.';
+  const lines = [...paragraphs, ...(link ? [`${link.words}:\n${link.href}`] : []), close];
+  const html = [
+    ...paragraphs.map((text) => `<p>${escape(text)}</p>`),
+    ...(link ? [`<p><a href="${escape(link.href)}">${escape(link.words)}</a></p>`] : []),
+    `<p>${escape(close)}</p>`,
+  ].join('\n');
+  return {
+    subject,
+    textBody: lines.join('\n\n'),
+    htmlBody: `<!doctype html><html lang="en"><body>${html}</body></html>`,
+  };
+}
+
+export const verifyLetter = (origin: string, token: string): MailBody =>
+  letter(
+    'Confirm your address for Ruckle',
+    ['Open this page and press the button to confirm your address. The link holds for 24 hours.'],
+    {
+      words: 'Confirm my address',
+      href: `${origin}/verify?token=${token}`,
+    },
+  );
+
+export const resetLetter = (origin: string, token: string): MailBody =>
+  letter(
+    'Choose a new password for Ruckle',
+    ['Open this page to choose a new password. The link holds for 30 minutes.'],
+    {
+      words: 'Choose a new password',
+      href: `${origin}/reset?token=${token}`,
+    },
+  );
+
+export const alreadyLetter = (origin: string): MailBody =>
+  letter(
+    'You already have a Ruckle account',
+    [
+      'Somebody, perhaps you, tried to sign up with this address. It has an account already: sign in, or choose a new password there.',
+    ],
+    {
+      words: 'Sign in',
+      href: `${origin}/sign-in`,
+    },
+  );
+
+export const passwordChangedLetter = (): MailBody =>
+  letter('Your Ruckle password was changed', [
+    'Your password was changed just now, and every other session was ended.',
+  ]);
