@@ -2,6 +2,7 @@
 import { useEffect, useState } from 'react';
 import type { FormState } from '@/lib/request/action';
 import { countDrafts, wipeDrafts } from '@/components/offline/drafts';
+import { countUploads, wipeUploads } from '@/components/photos/upload-store';
 import { Button } from '@/components/ui/Button';
 
 interface Props {
@@ -13,10 +14,12 @@ interface Props {
 export function SignOut({ userId, action }: Props) {
   const [waiting, setWaiting] = useState(0);
   useEffect(() => {
-    void countDrafts(userId).then(setWaiting);
+    void Promise.all([countDrafts(userId), countUploads(userId)]).then(([drafts, uploads]) =>
+      setWaiting(drafts + uploads),
+    );
   }, [userId]);
   const leave = async (form: FormData) => {
-    await wipeDrafts(userId);
+    await Promise.all([wipeDrafts(userId), wipeUploads(userId)]);
     await action({}, form);
   };
   return (

@@ -1,0 +1,75 @@
+'use client';
+import { Camera, ImagePlus } from 'lucide-react';
+import { type ChangeEvent, useState } from 'react';
+import { Choice } from '@/components/ui/Choice';
+import { Disclosure } from '@/components/ui/Disclosure';
+import { buttonClass } from '@/components/ui/styles';
+import type { PhotoDto } from '@/db/queries/photos';
+import type { View } from '@/diagnosis/garments/schema';
+import { UploadLines } from './UploadLines';
+import { useUploads } from './useUploads';
+import { VIEW_OPTIONS } from './view-words';
+
+interface Props {
+  userId: string;
+  roundId: string;
+  /** The view that is on the table, taken as what comes next. */
+  view: View;
+  onAdded: (photo: PhotoDto) => void;
+}
+
+const TAKEN = [
+  { value: 'camera', label: 'By a camera' },
+  { value: 'mirror', label: 'In a mirror' },
+] as const;
+
+/** Photos into a round, one or several: what they show and whether a mirror was between is asked, the rest goes by itself. */
+export function PhotoUploader({ userId, roundId, view, onAdded }: Props) {
+  const [chosenView, setChosenView] = useState<View | null>(null);
+  const [taken, setTaken] = useState<'camera' | 'mirror'>('camera');
+  const { lines, add, cancel } = useUploads({ userId, roundId, onAdded });
+  const shown = chosenView ?? view;
+  const take = (event: ChangeEvent<HTMLInputElement>) => {
+    const files = [...(event.target.files ?? [])];
+    event.target.value = '';
+    if (files.length > 0) void add(files, shown, taken === 'mirror');
+  };
+  const pick = (label: string, Icon: typeof Camera, isCamera: boolean) => (
+    <label
+      className={buttonClass(
+        'plain',
+        'relative has-focus-visible:outline-3 has-focus-visible:outline-offset-3 has-focus-visible:outline-chalk',
+      )}
+    >
+      <Icon aria-hidden size={20} />
+      {label}
+      <input
+        type="file"
+        accept="image/jpeg,image/png,image/webp,image/heic,image/heif"
+        multiple={!isCamera}
+        capture={isCamera ? 'environment' : undefined}
+        onChange={take}
+        className="absolute inset-0 opacity-0"
+      />
+    </label>
+  );
+  return (
+    <div className="grid gap-4">
+      <Choice legend="What it shows" options={VIEW_OPTIONS} value={shown} onChange={setChosenView} />
+      <Choice legend="Taken" options={TAKEN} value={taken} onChange={setTaken} />
+      <div className="flex flex-wrap gap-3">
+        {pick('Take a photo', Camera, true)}
+        {pick('Add photos', ImagePlus, false)}
+      </div>
+      <UploadLines lines={lines} onCancel={(key) => void cancel(key)} />
+      <Disclosure summary="How to take one that can be read">
+        <ul className="list-disc pl-5">
+          <li>Phone at hip height, at least two and a half metres away, level.</li>
+          <li>Lamp from the side, no flash. Plain wall, plain mid-tone cloth.</li>
+          <li>Usual heel, eyes ahead, feet a hand apart, arms a little away. One photo after five steps.</li>
+          <li>The phone’s own camera keeps its picture in the gallery, and perhaps in its cloud.</li>
+        </ul>
+      </Disclosure>
+    </div>
+  );
+}
