@@ -2,6 +2,9 @@ import { deleteDB, type IDBPDatabase, openDB } from 'idb';
 
 const nameOf = (userId: string) => `ruckle-drafts-${userId}`;
 const STORE = 'drafts';
+
+/** Keys that begin so hold nothing that waits: only the way back. */
+export const KEPT_FOR_UNDO = 'undo ';
 const open = new Map<string, Promise<IDBPDatabase>>();
 
 function database(userId: string): Promise<IDBPDatabase> {
@@ -25,7 +28,8 @@ export async function writeDraft(userId: string, key: string, draft: unknown): P
 }
 
 export async function countDrafts(userId: string): Promise<number> {
-  return (await database(userId)).count(STORE);
+  const keys = await (await database(userId)).getAllKeys(STORE);
+  return keys.filter((key) => !String(key).startsWith(KEPT_FOR_UNDO)).length;
 }
 
 /** At sign-out, after a warning that counts them. */

@@ -1,0 +1,41 @@
+'use client';
+import { Dialog } from 'radix-ui';
+import { Button } from '@/components/ui/Button';
+
+const KEYS = [
+  ['1 to 6', 'tight line, slack fold, gap, pooling, tilt, pin'],
+  ['0', 'look and choose'],
+  ['Arrows', 'move the cross, or the chosen mark'],
+  ['Shift and arrows', 'the same in small steps'],
+  ['Enter', 'set an end; a second time makes the line'],
+  ['Escape', 'let go'],
+  ['Delete', 'delete the chosen mark'],
+  ['Ctrl Z, Ctrl Shift Z', 'undo, redo'],
+] as const;
+
+export function KeyHelp({ isOpen, onClose }: { isOpen: boolean; onClose: () => void }) {
+  return (
+    <Dialog.Root open={isOpen} onOpenChange={(open) => !open && onClose()}>
+      <Dialog.Portal>
+        <Dialog.Overlay className="fixed inset-0 z-40 bg-black/50" />
+        <Dialog.Content
+          aria-describedby={undefined}
+          className="fixed inset-x-4 top-10 z-50 mx-auto grid max-w-lg gap-4 bg-paper p-6 shadow-lifted"
+        >
+          <Dialog.Title className="text-lg font-bold">Keys on the photo</Dialog.Title>
+          <dl className="grid grid-cols-[auto_1fr] gap-x-6 gap-y-2">
+            {KEYS.map(([key, what]) => (
+              <div key={key} className="contents">
+                <dt className="font-bold">{key}</dt>
+                <dd>{what}</dd>
+              </div>
+            ))}
+          </dl>
+          <div>
+            <Button onClick={onClose}>Close</Button>
+          </div>
+        </Dialog.Content>
+      </Dialog.Portal>
+    </Dialog.Root>
+  );
+}

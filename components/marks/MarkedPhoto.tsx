@@ -1,0 +1,62 @@
+'use client';
+import { useState } from 'react';
+import { v7 } from 'uuid';
+import { photoSrcSet, photoUrl } from '@/components/photos/PhotoImage';
+import { VIEW_WORDS } from '@/components/photos/view-words';
+import { SaveLine } from '@/components/round/SaveLine';
+import type { PhotoDto } from '@/db/queries/photos';
+import { ContestedMarks } from './ContestedMarks';
+import { MarkCanvas } from './MarkCanvas';
+import { MarkList } from './MarkList';
+import { addMark, editMark, removeMark } from './model/history';
+import { newMark } from './useDrawing';
+import { useMarks } from './useMarks';
+
+interface Props {
+  userId: string;
+  photo: PhotoDto;
+}
+
+/** One photo with its marks: drawn on it, and listed beside it. */
+export function MarkedPhoto({ userId, photo }: Props) {
+  const { id, revision, widthPx, heightPx, view, isMirrored } = photo;
+  const { marks, history, saveState, conflicts, act, settle } = useMarks(userId, photo);
+  const [selected, setSelected] = useState<string | null>(null);
+  const alt = `${VIEW_WORDS[view]}${isMirrored ? ', in a mirror' : ''}`;
+  const src = {
+    src: photoUrl(id, revision, '1600'),
+    srcSet: photoSrcSet(id, revision),
+    widthPx,
+    heightPx,
+    alt,
+  };
+  return (
+    <div className="grid gap-3">
+      <MarkCanvas
+        photo={src}
+        history={history ?? { marks: [], past: [], future: [] }}
+        act={act}
+        selected={selected}
+        onSelect={setSelected}
+        isReadOnly={history === null}
+      />
+      <SaveLine state={saveState} />
+      <ContestedMarks marks={marks} conflicts={conflicts} onSettle={settle} />
+      <MarkList
+        marks={marks}
+        selected={selected}
+        onSelect={setSelected}
+        onAdd={(kind, points) => {
+          const mark = newMark(v7(), kind, 2, points);
+          act((now) => addMark(now, mark));
+          setSelected(mark.id);
+        }}
+        onEdit={(markId, edit) => act((now) => editMark(now, markId, edit))}
+        onDelete={(markId) => {
+          act((now) => removeMark(now, markId));
+          setSelected(null);
+        }}
+      />
+    </div>
+  );
+}
