@@ -67,9 +67,10 @@ function sidesOf(outlook: Outlook, correction: Correction): Side[] {
   const split = servedBy(outlook, correction, 'both').filter(({ side }) => side !== 'both');
   if (!correction.sided || split.length === 0) return ['both'];
   const left = split.filter(({ side }) => side === 'left');
+  const leastApartMm = (SIDES_APART_MM / 2) * outlook.layout.factors.length + 1e-9;
   const apart = left.some((own) => {
     const other = split.find(({ side, dimension }) => side === 'right' && dimension === own.dimension)!;
-    return Math.abs(own.probability * own.meanMm - other.probability * other.meanMm) >= SIDES_APART_MM / 2;
+    return Math.abs(own.probability * own.meanMm - other.probability * other.meanMm) >= leastApartMm;
   });
   return apart ? ['left', 'right'] : ['both'];
 }
