@@ -10,7 +10,7 @@ import { priorBeliefs, sidesPrior } from './prior';
 import { advance } from './replay';
 import { addSign, notesOf } from './signs';
 import type { AbsenceWeight } from './signs';
-import { solve } from './solve';
+import { WIDTH_MAX, solve } from './solve';
 import type { Solution } from './solve';
 import { tablesOf } from './sources';
 import type { Tables } from './sources';
@@ -73,7 +73,13 @@ function marginOf(table: Float64Array, ofRows: boolean): Float64Array {
  * Beliefs after a round's evidence. Absent signs that something may hide are weighed twice: first by the beliefs before
  * the round, then by those of the first pass.
  */
-export function solveRound(layout: Layout, tables: Tables, start: Beliefs, round: RoundEvidence): Solution {
+export function solveRound(
+  layout: Layout,
+  tables: Tables,
+  start: Beliefs,
+  round: RoundEvidence,
+  widthMax = WIDTH_MAX,
+): Solution {
   const notes = notesOf(layout, round.signs, round.absent);
   const gather = (weigh: AbsenceWeight) => {
     const draft = new Draft(start);
@@ -81,7 +87,7 @@ export function solveRound(layout: Layout, tables: Tables, start: Beliefs, round
     for (const test of sortedBy(round.tests, ({ check, side }) => `${check} ${side}`))
       addTest(draft, layout, tables, test);
     for (const measured of sortedBy(round.measured, termsKey)) addMeasured(draft, layout, measured);
-    return solve(draft);
+    return solve(draft, widthMax);
   };
   const first = gather((sign, side) => absenceWeight(layout, start.marginals, sign, side));
   const masked = notes.some(

@@ -28,13 +28,13 @@ interface Loose {
 }
 
 /**
- * Beliefs given a round's evidence. Exact where at most `WIDTH_MAX` findings are open at once and every sum joins two
+ * Beliefs given a round's evidence. Exact where at most `widthMax` findings are open at once and every sum joins two
  * needs; otherwise the weakest findings and the long sums are approximated by messages to single needs, passed in sweeps
  * (assumed-density filtering, Boyen & Koller 1998, taken back and renewed in each sweep instead of absorbed for good).
  */
-export function solve(draft: Draft): Solution {
+export function solve(draft: Draft, widthMax = WIDTH_MAX): Solution {
   const whole = assemble(draft);
-  const { order, kept, absorbed } = narrow(draft, whole.network);
+  const { order, kept, absorbed } = narrow(draft, whole.network, widthMax);
   const first = { ...whole, network: { ...whole.network, ...layFindings(kept, whole.network.unary.length) } };
   const loose = [...whole.sums.map(looseSum), ...absorbed.map(looseFinding)];
   for (const factor of loose)
@@ -59,11 +59,12 @@ export function solve(draft: Draft): Solution {
 function narrow(
   draft: Draft,
   network: Network,
+  widthMax: number,
 ): { order: Order; kept: OpenFinding[]; absorbed: OpenFinding[] } {
   let kept = draft.findings;
   let order = orderOf(network);
   const absorbed: OpenFinding[] = [];
-  while (order.widest.length > WIDTH_MAX) {
+  while (order.widest.length > widthMax) {
     const laid = layFindings(kept, network.unary.length);
     const open = new Set(order.widest);
     const [weakest] = kept

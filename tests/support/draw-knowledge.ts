@@ -1,6 +1,6 @@
 import type { Knowledge } from '@/diagnosis/garments/schema';
 import { GRADES } from '@/diagnosis/garments/schema';
-import type { Random } from './random';
+import type { Random } from '@/diagnosis/evaluation/random';
 import { check, correction, dimension, link, sign } from './small-knowledge';
 
 export interface KnowledgeSize {
@@ -13,7 +13,11 @@ export interface KnowledgeSize {
 /** A random garment: signs with two to five links each, checks with two outcomes, a correction each way for every need. */
 export function drawKnowledge(random: Random, size: KnowledgeSize): Knowledge {
   const dimensions = Array.from({ length: size.dimensions }, (_, i) =>
-    dimension(`need-${i}`, { scaleMm: 6 + random.below(12), toleranceMm: 3 + random.below(3), sided: i % 4 === 3 }),
+    dimension(`need-${i}`, {
+      scaleMm: 6 + random.below(12),
+      toleranceMm: 3 + random.below(3),
+      sided: i % 4 === 3,
+    }),
   );
   const causes = Array.from({ length: size.causes }, (_, i) => ({
     id: `cause-${i}`,
@@ -50,7 +54,9 @@ export function drawKnowledge(random: Random, size: KnowledgeSize): Knowledge {
     ),
     corrections: dimensions.flatMap(({ id, sided }) =>
       ([1, -1] as const).map((perMm) =>
-        correction(`${perMm > 0 ? 'add' : 'take'}-${id}`, [{ dimension: id, perMm, coupling: false }], { sided }),
+        correction(`${perMm > 0 ? 'add' : 'take'}-${id}`, [{ dimension: id, perMm, coupling: false }], {
+          sided,
+        }),
       ),
     ),
     shape: [],

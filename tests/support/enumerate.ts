@@ -1,5 +1,5 @@
 import type { Network } from '@/diagnosis/inference/network';
-import type { Random } from './random';
+import type { Random } from '@/diagnosis/evaluation/random';
 
 /** Beliefs of a network by walking every joint state and every pattern of firings: slow, and written apart from the engine. */
 export function enumerate({ unary, slots, pairs, findings }: Network): {
