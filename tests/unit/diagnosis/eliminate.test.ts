@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { eliminate } from '@/diagnosis/inference/eliminate';
 import type { Network } from '@/diagnosis/inference/network';
 import { enumerate, randomNetwork } from '@/tests/support/enumerate';
-import { exactnessOf } from '@/tests/support/exactness';
+import { absorptionErrorOf, exactnessOf, longSumErrorOf } from '@/tests/support/exactness';
 import { Random } from '@/diagnosis/evaluation/random';
 
 /** Greatest difference between the elimination and the enumeration, over marginals and the weight of the evidence. */
@@ -53,5 +53,17 @@ describe('elimination', () => {
     expect(width).toBeLessThanOrEqual(14);
     for (const marginal of marginals)
       expect(Math.abs(marginal.reduce((a, b) => a + b, 0) - 1)).toBeLessThan(1e-12);
+  });
+
+  it('comes within 0.03 of enumeration where three needs are known by their sum', () => {
+    const random = new Random(14);
+    for (let model = 0; model < 20; model++) expect(longSumErrorOf(random)).toBeLessThan(0.03);
+  });
+
+  it('stays near the exact beliefs where the weakest of too many findings are absorbed, and says that it did', () => {
+    const random = new Random(15);
+    const errors = Array.from({ length: 10 }, () => absorptionErrorOf(random));
+    expect(errors.some(({ absorbed }) => absorbed)).toBe(true);
+    for (const { error, absorbed } of errors) expect(error).toBeLessThan(absorbed ? 0.05 : 1e-12);
   });
 });
