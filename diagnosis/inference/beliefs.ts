@@ -10,7 +10,7 @@ import { priorBeliefs, sidesPrior } from './prior';
 import { advance } from './replay';
 import { addSign, notesOf } from './signs';
 import type { AbsenceWeight } from './signs';
-import { WIDTH_MAX, solve } from './solve';
+import { CURRENT_ROUND, PAST_ROUND, solve } from './solve';
 import type { Solution } from './solve';
 import { tablesOf } from './sources';
 import type { Tables } from './sources';
@@ -41,7 +41,7 @@ export function prepare(knowledge: Knowledge, fitting: Case, strengths: Strength
   let start = prior;
   let exactBefore = true;
   for (const round of fitting.history) {
-    const solution = solveRound(layout, tables, start, round);
+    const solution = solveRound(layout, tables, start, round, PAST_ROUND);
     exactBefore &&= solution.exact;
     start = advance(layout, solution.beliefs, prior, round);
   }
@@ -78,7 +78,7 @@ export function solveRound(
   tables: Tables,
   start: Beliefs,
   round: RoundEvidence,
-  widthMax = WIDTH_MAX,
+  care = CURRENT_ROUND,
 ): Solution {
   const notes = notesOf(layout, round.signs, round.absent);
   const gather = (weigh: AbsenceWeight) => {
@@ -87,7 +87,7 @@ export function solveRound(
     for (const test of sortedBy(round.tests, ({ check, side }) => `${check} ${side}`))
       addTest(draft, layout, tables, test);
     for (const measured of sortedBy(round.measured, termsKey)) addMeasured(draft, layout, measured);
-    return solve(draft, widthMax);
+    return solve(draft, care);
   };
   const first = gather((sign, side) => absenceWeight(layout, start.marginals, sign, side));
   const masked = notes.some(

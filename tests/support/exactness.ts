@@ -2,7 +2,7 @@ import type { CaseInput } from '@/diagnosis/case-schema';
 import type { Random } from '@/diagnosis/evaluation/random';
 import type { Knowledge } from '@/diagnosis/garments/schema';
 import { prepare, solveRound } from '@/diagnosis/inference/beliefs';
-import type { Solution } from '@/diagnosis/inference/solve';
+import { CURRENT_ROUND } from '@/diagnosis/inference/solve';
 import { STRENGTHS } from '@/diagnosis/inference/strengths';
 import { byTheBook } from './by-the-book';
 import { drawKnowledge } from './draw-knowledge';
@@ -48,13 +48,17 @@ function sumOf(random: Random, { dimensions }: Knowledge) {
 /** Greatest error of all beliefs when findings beyond a width of 14 are absorbed, against keeping all of them. */
 export function absorptionErrorOf(random: Random): { error: number; absorbed: boolean } {
   const knowledge = drawSmall(random, 8, 3, 24);
-  const signs = random.sample(knowledge.signs, 18).map(({ id }) => ({ sign: id, severity: 1 + random.below(3) }));
+  const signs = random
+    .sample(knowledge.signs, 18)
+    .map(({ id }) => ({ sign: id, severity: 1 + random.below(3) }));
   const fitting = parsed(knowledge, { signs });
   const { layout, tables, start } = prepare(knowledge, fitting, STRENGTHS);
-  const near: Solution = solveRound(layout, tables, start, fitting, 12);
-  const whole = solveRound(layout, tables, start, fitting, 18);
+  const near = solveRound(layout, tables, start, fitting, { ...CURRENT_ROUND, widthMax: 12 });
+  const whole = solveRound(layout, tables, start, fitting, { ...CURRENT_ROUND, widthMax: 18 });
   const error = Math.max(
-    ...whole.marginals.flatMap((row, v) => [...row].map((p, state) => Math.abs(p - near.marginals[v]![state]!))),
+    ...whole.marginals.flatMap((row, v) =>
+      [...row].map((p, state) => Math.abs(p - near.marginals[v]![state]!)),
+    ),
   );
   return { error, absorbed: !near.exact };
 }
