@@ -14,7 +14,7 @@ const AMOUNTS_TRIED = 12;
 /** A first change takes two thirds of what is estimated. */
 const FIRST_SHARE = 2 / 3;
 /** Cost, in tolerances, of a change that was not needed, beside the misfit it makes: for any change, and per unit of risk. */
-const NEEDLESS_COST = 0.06;
+const NEEDLESS_COST = 0.1;
 const RISK_COST = 0.3;
 /** How much of a need is expected to go where the change is not a length. */
 const REMEDY_SHARE = 0.7;

@@ -173,6 +173,24 @@ describe('laws of a reading', () => {
     expect(tail({ garment: 'smock', history } as CaseInput, 'knee', 'more')).toBeLessThan(0.99);
   });
 
+  it('answers contradictory and extreme evidence with finite numbers', () => {
+    const both = [{ dimension: 'depth' }, { dimension: 'rise' }];
+    const three = [...both, { dimension: 'point', weight: -100 }];
+    const reading = readCase(small, {
+      measured: [
+        { terms: [{ dimension: 'depth' }], needMm: 90_000, sdMm: 1e-9 },
+        { terms: [{ dimension: 'rise' }], needMm: 90_000, sdMm: 1e-9 },
+        { terms: both, needMm: -90_000, sdMm: 1e-9 },
+        { terms: three, needMm: 1e-300, sdMm: 1e-9 },
+      ],
+      signs: small.signs.map(({ id }) => ({ sign: id, severity: 3, reliability: 0 })),
+      tests: [{ check: 'pinch-seat', outcome: 'clears', amountMm: 1e-300 }],
+    });
+    const numbers = [...numbersOf(reading).values(), ...reading.needs.flatMap(({ rangeMm }) => rangeMm)];
+    expect(numbers.every(Number.isFinite)).toBe(true);
+    expect(reading.exact).toBe(false);
+  });
+
   it('leaves the split between two needs open when only their sum is measured', () => {
     const terms = [{ dimension: 'depth' }, { dimension: 'rise' }];
     const input = { garment: 'smock', measured: [{ terms, needMm: 24, sdMm: 4 }] };
