@@ -9,8 +9,11 @@ import { BASES, CLOTHS } from './garments/schema';
 export const SIDES = ['both', 'left', 'right'] as const;
 export const HISTORY_MAX = 24;
 
-const length = z.number();
-const above = z.number().positive();
+/** Nothing on a body is longer than this, mm; a slip of the keys is refused instead of read. */
+const LENGTH_MAX_MM = 100_000;
+const WEIGHT_MAX = 100;
+const length = z.number().min(-LENGTH_MAX_MM).max(LENGTH_MAX_MM);
+const above = z.number().positive().max(LENGTH_MAX_MM);
 const side = z.enum(SIDES).default('both');
 
 export const signEntry = z.strictObject({
@@ -20,7 +23,11 @@ export const signEntry = z.strictObject({
   reliability: z.number().min(0).max(1).default(1),
 });
 const absentEntry = z.union([z.string(), z.strictObject({ sign: z.string(), side })]);
-const term = z.strictObject({ dimension: z.string(), weight: length.default(1), side });
+const term = z.strictObject({
+  dimension: z.string(),
+  weight: z.number().min(-WEIGHT_MAX).max(WEIGHT_MAX).default(1),
+  side,
+});
 const measuredEntry = z.strictObject({ terms: z.array(term).min(1), needMm: length, sdMm: above });
 const testEntry = z.strictObject({
   check: z.string(),

@@ -10,7 +10,7 @@ import { priorBeliefs, sidesPrior } from './prior';
 import { advance } from './replay';
 import { addSign, notesOf } from './signs';
 import type { AbsenceWeight } from './signs';
-import { solve } from './solve';
+import { CURRENT_ROUND, PAST_ROUND, solve } from './solve';
 import type { Solution } from './solve';
 import { tablesOf } from './sources';
 import type { Tables } from './sources';
@@ -41,7 +41,7 @@ export function prepare(knowledge: Knowledge, fitting: Case, strengths: Strength
   let start = prior;
   let exactBefore = true;
   for (const round of fitting.history) {
-    const solution = solveRound(layout, tables, start, round);
+    const solution = solveRound(layout, tables, start, round, PAST_ROUND);
     exactBefore &&= solution.exact;
     start = advance(layout, solution.beliefs, prior, round);
   }
@@ -73,7 +73,13 @@ function marginOf(table: Float64Array, ofRows: boolean): Float64Array {
  * Beliefs after a round's evidence. Absent signs that something may hide are weighed twice: first by the beliefs before
  * the round, then by those of the first pass.
  */
-export function solveRound(layout: Layout, tables: Tables, start: Beliefs, round: RoundEvidence): Solution {
+export function solveRound(
+  layout: Layout,
+  tables: Tables,
+  start: Beliefs,
+  round: RoundEvidence,
+  care = CURRENT_ROUND,
+): Solution {
   const notes = notesOf(layout, round.signs, round.absent);
   const gather = (weigh: AbsenceWeight) => {
     const draft = new Draft(start);
@@ -81,7 +87,7 @@ export function solveRound(layout: Layout, tables: Tables, start: Beliefs, round
     for (const test of sortedBy(round.tests, ({ check, side }) => `${check} ${side}`))
       addTest(draft, layout, tables, test);
     for (const measured of sortedBy(round.measured, termsKey)) addMeasured(draft, layout, measured);
-    return solve(draft);
+    return solve(draft, care);
   };
   const first = gather((sign, side) => absenceWeight(layout, start.marginals, sign, side));
   const masked = notes.some(

@@ -1,7 +1,7 @@
 import type { TestResult } from '../case-schema';
 import type { Check, Link } from '../garments/schema';
 import type { Draft } from './draft';
-import { GRID_REACH, zAt } from './grid';
+import { GRID_REACH, SD_MIN_Z, zAt } from './grid';
 import { variablesFor } from './layout';
 import type { Layout } from './layout';
 import { reaching, sourcesOf } from './sources';
@@ -14,8 +14,6 @@ const REMAINDER_LEAK = 0.4;
 /** Standard deviation of a pinned or gaping amount: at least this, mm, and this share of it. */
 const AMOUNT_SD_MM = { pinch: 3, gap: 4 } as const;
 const AMOUNT_SD_SHARE = 0.1;
-/** A Gaussian narrower than this, z, would fall between the bins. */
-const SD_MIN_Z = 0.15;
 
 /** Adds what a check showed: outcomes are tried in order, so the earlier ones did not happen; then its amount. */
 export function addTest(draft: Draft, layout: Layout, tables: Tables, test: TestResult): void {

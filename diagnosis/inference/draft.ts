@@ -1,4 +1,4 @@
-import { GRID_REACH, GRID_SIZE, zAt } from './grid';
+import { GRID_REACH, GRID_SIZE, SD_MIN_Z, zAt } from './grid';
 import type { Finding, Network, Pair, Slot } from './network';
 
 /** A Gaussian on a weighted sum of needs, in millimetres. */
@@ -53,22 +53,31 @@ export interface Assembled {
  * the other sums are left for messages.
  */
 export function assemble(draft: Draft): Assembled {
-  const pairs = draft.beliefs.pairs.map((pair) => ({ ...pair, table: pair.table.slice() }));
-  const inPair = new Set(pairs.flatMap(({ first, second }) => [first, second]));
-  const sums: SumFactor[] = [];
-  for (const sum of draft.sums) if (!joinAsPair(sum, pairs, inPair)) sums.push(sum);
+  const joints: Joint[] = draft.beliefs.pairs.map((pair) => ({ ...pair, logs: null }));
+  const sums = draft.sums.filter((sum) => !joinAsPair(sum, joints));
   const owned = new Set(draft.beliefs.pairs.flatMap(({ first, second }) => [first, second]));
   let logShift = 0;
   const unary = draft.beliefs.marginals.map((belief, variable) => {
-    const logs = draft.logs[variable]!;
-    const shift = logs.reduce((most, log) => Math.max(most, log), -Infinity);
+    const { weights, shift } = weightsOf(draft.logs[variable]!);
     logShift += shift;
-    return logs.map((log, state) => {
-      const prior = owned.has(variable) ? 1 : belief[state]!;
-      return Math.exp(log - shift) * prior;
-    });
+    return owned.has(variable) ? weights : weights.map((weight, state) => weight * belief[state]!);
+  });
+  const pairs = joints.map(({ first, second, table, logs }): Pair => {
+    if (!logs) return { first, second, table };
+    const { weights, shift } = weightsOf(logs);
+    logShift += shift;
+    return { first, second, table: weights.map((weight, i) => weight * table[i]!) };
   });
   return { network: { unary, pairs, ...layFindings(draft.findings, unary.length) }, logShift, sums };
+}
+
+/** Evidence of one kind never speaks more strongly than this, so that contradictory evidence leaves some belief (e^−200). */
+const LOG_MIN = -200;
+
+/** Weights with their greatest at 1, and the logarithm taken out. */
+function weightsOf(logs: Float64Array): { weights: Float64Array; shift: number } {
+  const shift = logs.reduce((most, log) => Math.max(most, log), -Infinity);
+  return { weights: logs.map((log) => Math.exp(Math.max(LOG_MIN, log - shift))), shift };
 }
 
 /** Numbers the bits of findings, in their order, and hands their slots to the variables. */
@@ -89,25 +98,31 @@ export function layFindings(
   return { slots, findings: laid };
 }
 
-function joinAsPair({ terms, meanMm, sdMm }: SumFactor, pairs: Pair[], inPair: Set<number>): boolean {
+/** A joint being gathered: what it was before, and the logarithms of the sums that it takes in. */
+interface Joint extends Pair {
+  logs: Float64Array | null;
+}
+
+function joinAsPair({ terms, meanMm, sdMm }: SumFactor, joints: Joint[]): boolean {
   if (terms.length !== 2) return false;
   const [a, b] = terms as [SumFactor['terms'][number], SumFactor['terms'][number]];
-  const shared = pairs.find(
-    ({ first, second }) =>
-      (first === a.variable && second === b.variable) || (first === b.variable && second === a.variable),
-  );
-  if (!shared && (inPair.has(a.variable) || inPair.has(b.variable))) return false;
-  const [first, second] = shared?.first === b.variable ? [b, a] : [a, b];
-  const table = shared?.table ?? new Float64Array(GRID_SIZE * GRID_SIZE).fill(1);
-  multiplyBySum(table, first.perZ, second.perZ, meanMm, sdMm);
-  if (!shared) pairs.push({ first: first.variable, second: second.variable, table });
-  inPair.add(first.variable).add(second.variable);
+  const holds = ({ first, second }: Joint, variable: number) => first === variable || second === variable;
+  let joint = joints.find((one) => holds(one, a.variable) && holds(one, b.variable));
+  if (!joint) {
+    if (joints.some((one) => holds(one, a.variable) || holds(one, b.variable))) return false;
+    const table = new Float64Array(GRID_SIZE * GRID_SIZE).fill(1);
+    joint = { first: a.variable, second: b.variable, table, logs: null };
+    joints.push(joint);
+  }
+  const [rows, columns] = joint.first === a.variable ? [a, b] : [b, a];
+  joint.logs ??= new Float64Array(GRID_SIZE * GRID_SIZE);
+  addSumLogs(joint.logs, rows.perZ, columns.perZ, meanMm, sdMm);
   return true;
 }
 
-/** Multiplies a joint by the Gaussian of its sum, scaled so that its greatest factor is 1. */
-function multiplyBySum(
-  table: Float64Array,
+/** Adds the logarithm of a Gaussian on a sum; a mean out of reach lies at the end of what the grid reaches. */
+function addSumLogs(
+  logs: Float64Array,
   perRow: number,
   perColumn: number,
   meanMm: number,
@@ -115,9 +130,10 @@ function multiplyBySum(
 ): void {
   const reachMm = (Math.abs(perRow) + Math.abs(perColumn)) * GRID_REACH;
   const mean = Math.min(reachMm, Math.max(-reachMm, meanMm));
+  const sd = Math.max(sdMm, SD_MIN_Z * Math.max(Math.abs(perRow), Math.abs(perColumn)));
   for (let row = 0; row < GRID_SIZE; row++)
     for (let column = 0; column < GRID_SIZE; column++) {
-      const off = (perRow * zAt(row) + perColumn * zAt(column) - mean) / sdMm;
-      table[row * GRID_SIZE + column]! *= Math.exp(-0.5 * off * off);
+      const off = (perRow * zAt(row) + perColumn * zAt(column) - mean) / sd;
+      logs[row * GRID_SIZE + column]! -= 0.5 * off * off;
     }
 }

@@ -32,7 +32,13 @@ export function eliminate(network: Network, order = orderOf(network)): Posterior
   const groups = groupsOf(network);
   const { walked, logWeight } = walkForward(network, order);
   const weights = walkBackward(walked);
-  const result: Posterior = { logWeight, marginals: [], joints: [], width: order.widest.length };
+  const alone = leaksAlone(network);
+  const result: Posterior = {
+    logWeight: logWeight + alone,
+    marginals: [],
+    joints: [],
+    width: order.widest.length,
+  };
   const unlinked = Float64Array.of(1);
   for (const group of groups) {
     const at = walked.findIndex(({ step }) => step.group.variables[0] === group.variables[0]);
@@ -40,6 +46,14 @@ export function eliminate(network: Network, order = orderOf(network)): Posterior
     else result.logWeight += collect(network, group, [], unlinked, result, true);
   }
   return result;
+}
+
+/** Findings that no variable touches are reached by their leaks or not at all; logarithm of that. */
+function leaksAlone({ slots, findings }: Network): number {
+  const touched = new Set(slots.flatMap((own) => own.flatMap(({ bits }) => bits)));
+  return findings
+    .filter(({ bits }) => !bits.some((bit) => touched.has(bit)))
+    .reduce((sum, { leak }) => sum + Math.log(leak.at(-1)!), 0);
 }
 
 /** The order of elimination of a network, and the most findings open at once. */

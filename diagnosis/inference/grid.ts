@@ -4,6 +4,9 @@ export const GRID_REACH = 5;
 export const GRID_SIZE = 41;
 export const GRID_FIT = 20;
 
+/** A Gaussian narrower than this, z, would fall between the bins. */
+export const SD_MIN_Z = 0.15;
+
 /** z at a bin of the grid, −5 … 5. */
 export function zAt(bin: number): number {
   return (bin - GRID_FIT) * GRID_STEP;

@@ -1,9 +1,11 @@
 import type { SumFactor } from './draft';
 import { GRID_REACH, zAt } from './grid';
 
-/** Bins of a sum's distribution, each a twelfth of its standard deviation or a little more. */
+/** Bins of a sum's distribution in one of its standard deviations. */
 const BINS_PER_SD = 6;
 const BINS_MAX = 2048;
+/** A sum is not known better than this share of its reach, so that no weight vanishes altogether. */
+const REACH_SDS_MAX = 18;
 
 /**
  * Messages of a Gaussian on a sum to each of its needs, given what the rest of the evidence says of the others (beliefs
@@ -11,7 +13,8 @@ const BINS_MAX = 2048;
  */
 export function sumMessages(sum: SumFactor, beliefs: readonly Float64Array[]): Float64Array[] {
   const reachMm = sum.terms.reduce((total, { perZ }) => total + Math.abs(perZ) * GRID_REACH, 0);
-  const stepMm = Math.max(sum.sdMm / BINS_PER_SD, (2 * reachMm) / BINS_MAX);
+  const sdMm = Math.max(sum.sdMm, reachMm / REACH_SDS_MAX);
+  const stepMm = Math.max(sdMm / BINS_PER_SD, (2 * reachMm) / BINS_MAX);
   const half = Math.ceil(reachMm / stepMm) + 1;
   const meanMm = Math.min(reachMm, Math.max(-reachMm, sum.meanMm));
   const size = 2 * half + 1;
@@ -19,7 +22,7 @@ export function sumMessages(sum: SumFactor, beliefs: readonly Float64Array[]): F
   for (let i = 0; i < sum.terms.length - 1; i++)
     before.push(convolve(before[i]!, beliefs[i]!, sum.terms[i]!.perZ / stepMm));
   let after: Float64Array = Float64Array.from({ length: size }, (_, bin) => {
-    const off = ((bin - half) * stepMm - meanMm) / sum.sdMm;
+    const off = ((bin - half) * stepMm - meanMm) / sdMm;
     return Math.exp(-0.5 * off * off);
   });
   const messages: Float64Array[] = [];

@@ -16,78 +16,80 @@ export interface Order {
   widest: readonly number[];
 }
 
+/** A group that waits for its turn; `shares[i]` is what opening its bit i costs. */
+interface Waiting {
+  group: Group;
+  shares: readonly number[];
+}
+
 /**
- * Orders the groups greedily so that few findings stay open at once: next comes the group that leaves the fewest open
- * while it is combined, then after it; ties by place. Bits open at their finding's first group and close after their last.
+ * Orders the groups greedily so that few findings stay open at once: next comes the group that opens the fewest, then the
+ * one that closes the most; ties by place. Bits open at their finding's first group and close after their last.
  */
 export function orderGroups(groups: readonly Group[], findings: readonly Finding[]): Order {
-  const partners = new Map<number, readonly number[]>();
-  for (const finding of findings) for (const bit of finding.bits) partners.set(bit, finding.bits);
-  const pending = new Map<number, number>();
-  for (const group of groups) for (const bit of group.bits) pending.set(bit, (pending.get(bit) ?? 0) + 1);
+  const partners: (readonly number[])[] = [];
+  for (const { bits } of findings) for (const bit of bits) partners[bit] = bits;
+  const pending = new Int32Array(partners.length);
+  for (const { bits } of groups) for (const bit of bits) pending[bit]! += 1;
 
-  const remaining = groups.filter((group) => group.bits.length > 0);
+  const waiting = groups.filter(({ bits }) => bits.length > 0).map((group) => waitingFor(group, partners));
+  const isOpen = new Uint8Array(partners.length);
   let open: number[] = [];
   const steps: Step[] = [];
   let widest: readonly number[] = [];
-  while (remaining.length > 0) {
-    const isOpen = new Set(open);
-    let best = 0;
-    let bestCost = Infinity;
-    for (let i = 0; i < remaining.length; i++) {
-      const cost = costOf(remaining[i]!, isOpen, pending, partners);
-      if (cost < bestCost) [best, bestCost] = [i, cost];
-    }
-    const [group] = remaining.splice(best, 1) as [Group];
+  while (waiting.length > 0) {
+    const [{ group }] = waiting.splice(cheapest(waiting, isOpen, pending), 1) as [Waiting];
     const step = stepOf(group, open, isOpen, pending, partners);
     const during = [...step.rest, ...step.held, ...step.opened];
     if (during.length > widest.length) widest = during;
     open = during.filter((bit) => !step.closed.has(bit));
+    isOpen.fill(0);
+    for (const bit of open) isOpen[bit] = 1;
     steps.push(step);
   }
   return { steps, widest };
 }
 
-function costOf(
-  group: Group,
-  isOpen: ReadonlySet<number>,
-  pending: ReadonlyMap<number, number>,
-  partners: ReadonlyMap<number, readonly number[]>,
-): number {
-  let opened = 0;
-  let closed = 0;
-  for (const bit of group.bits) {
-    // The two sides of one finding open together; half a bit each keeps the count when both are touched.
-    if (!isOpen.has(bit)) opened += partners.get(bit)!.length / partnersTouched(group, bit, partners);
-    if (pending.get(bit) === 1) closed++;
-  }
-  return opened * 1000 - closed;
+/** The two sides of one finding open together: each costs one bit where both are touched, both where only one is. */
+function waitingFor(group: Group, partners: readonly (readonly number[])[]): Waiting {
+  const shares = group.bits.map((bit) => {
+    const together = partners[bit]!;
+    return together.length / together.filter((other) => group.bits.includes(other)).length;
+  });
+  return { group, shares };
 }
 
-function partnersTouched(
-  group: Group,
-  bit: number,
-  partners: ReadonlyMap<number, readonly number[]>,
-): number {
-  return partners.get(bit)!.filter((other) => group.bits.includes(other)).length;
+function cheapest(waiting: readonly Waiting[], isOpen: Uint8Array, pending: Int32Array): number {
+  let best = 0;
+  let bestCost = Infinity;
+  for (let i = 0; i < waiting.length; i++) {
+    const { group, shares } = waiting[i]!;
+    let cost = 0;
+    for (let place = 0; place < shares.length; place++) {
+      const bit = group.bits[place]!;
+      if (isOpen[bit] === 0) cost += shares[place]! * 1000;
+      if (pending[bit] === 1) cost -= 1;
+    }
+    if (cost < bestCost) [best, bestCost] = [i, cost];
+  }
+  return best;
 }
 
 function stepOf(
   group: Group,
   open: readonly number[],
-  isOpen: ReadonlySet<number>,
-  pending: Map<number, number>,
-  partners: ReadonlyMap<number, readonly number[]>,
+  isOpen: Uint8Array,
+  pending: Int32Array,
+  partners: readonly (readonly number[])[],
 ): Step {
-  const touched = new Set(group.bits);
   const opened: number[] = [];
   for (const bit of group.bits) {
-    if (isOpen.has(bit) || opened.includes(bit)) continue;
-    opened.push(...partners.get(bit)!);
+    pending[bit]! -= 1;
+    if (isOpen[bit] === 0 && !opened.includes(bit)) opened.push(...partners[bit]!);
   }
-  for (const bit of group.bits) pending.set(bit, pending.get(bit)! - 1);
+  const touched = new Set(group.bits);
   // A side of a finding that no variable touches can only be reached by its leak: it closes as it opens.
-  const closed = new Set([...touched, ...opened].filter((bit) => (pending.get(bit) ?? 0) === 0));
+  const closed = new Set([...touched, ...opened].filter((bit) => pending[bit] === 0));
   return {
     group,
     rest: open.filter((bit) => !touched.has(bit)),

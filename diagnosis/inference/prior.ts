@@ -9,7 +9,7 @@ const LEAN_MAX = Math.log(2);
 /** z where a tail is most likely, roughly where a fault becomes clearly visible. */
 const TAIL_PEAK = 1;
 /** Share of the prior of a split need in which left and right know nothing of each other. */
-const APART = 0.15;
+const APART = 0.3;
 const NEAR_DECAY = 0.5;
 const NEAR_SHARE = 0.6;
 /** A cause that somebody ticked or crossed off is as good as known. */

@@ -4,7 +4,7 @@ import { GRID_SIZE, GRID_STEP, normalise } from './grid';
 import { variablesFor } from './layout';
 import type { Layout } from './layout';
 
-/** Cutting error of one change, mm, one standard deviation. */
+/** Cutting error of one change at the reference size, mm, one standard deviation. */
 const CUTTING_SD_MM = 3;
 /** Of the amount, in addition, where the cloth was changed. */
 const NEW_CLOTH_SD_SHARE = 0.3;
@@ -48,7 +48,10 @@ function shiftsOf(layout: Layout, round: PastRound): Map<number, Shift> {
       layout.index.knowledge.corrections[layout.index.corrections.get(change.correction)!]!;
     if (!amounts) continue;
     const amountMm = ownAmount(layout, change);
-    const sdMm = Math.hypot(CUTTING_SD_MM, round.next === 'new-cloth' ? NEW_CLOTH_SD_SHARE * amountMm : 0);
+    const sdMm = Math.hypot(
+      CUTTING_SD_MM * layout.factors.length,
+      round.next === 'new-cloth' ? NEW_CLOTH_SD_SHARE * amountMm : 0,
+    );
     for (const { dimension, perMm } of vector) {
       const at = layout.index.dimensions.get(dimension)!;
       for (const variable of variablesFor(layout, at, change.side)) {

@@ -6,9 +6,20 @@ import { sumMessages } from './messages';
 import type { Network, Posterior } from './network';
 import type { Order } from './order';
 
-/** Findings open at once up to which the elimination is exact. */
-export const WIDTH_MAX = 14;
-const SWEEPS = 6;
+/** How much work a round may be. */
+export interface Care {
+  /** Findings open at once up to which the elimination is exact. */
+  widthMax: number;
+  /** How many are left open once some have to be absorbed anyway. */
+  narrowTo: number;
+  /** How often messages are renewed. */
+  sweeps: number;
+}
+
+export const CURRENT_ROUND: Care = { widthMax: 14, narrowTo: 12, sweeps: 6 };
+/** A crowded round long past, of which only the margins are kept, is worth less. */
+export const PAST_ROUND: Care = { widthMax: 12, narrowTo: 8, sweeps: 2 };
+
 /** Messages are kept above this share of their greatest, so that a belief can always be taken back out. */
 const MESSAGE_MIN = 1e-12;
 
@@ -28,13 +39,13 @@ interface Loose {
 }
 
 /**
- * Beliefs given a round's evidence. Exact where at most `WIDTH_MAX` findings are open at once and every sum joins two
+ * Beliefs given a round's evidence. Exact where at most `care.widthMax` findings are open at once and every sum joins two
  * needs; otherwise the weakest findings and the long sums are approximated by messages to single needs, passed in sweeps
  * (assumed-density filtering, Boyen & Koller 1998, taken back and renewed in each sweep instead of absorbed for good).
  */
-export function solve(draft: Draft): Solution {
+export function solve(draft: Draft, care = CURRENT_ROUND): Solution {
   const whole = assemble(draft);
-  const { order, kept, absorbed } = narrow(draft, whole.network);
+  const { order, kept, absorbed } = narrow(draft, whole.network, care);
   const first = { ...whole, network: { ...whole.network, ...layFindings(kept, whole.network.unary.length) } };
   const loose = [...whole.sums.map(looseSum), ...absorbed.map(looseFinding)];
   for (const factor of loose)
@@ -42,7 +53,7 @@ export function solve(draft: Draft): Solution {
       new Float64Array(draft.logs[variable]!.length).fill(1),
     );
   let posterior = eliminate(first.network, order);
-  for (let sweep = 0; sweep < SWEEPS && loose.length > 0; sweep++) {
+  for (let sweep = 0; sweep < care.sweeps && loose.length > 0; sweep++) {
     for (const factor of loose) renew(factor, posterior.marginals);
     posterior = eliminate(withMessages(first.network, loose), order);
   }
@@ -55,22 +66,21 @@ export function solve(draft: Draft): Solution {
   };
 }
 
-/** Absorbs the weakest of the findings at the widest step until few enough are open at once. */
-function narrow(
-  draft: Draft,
-  network: Network,
-): { order: Order; kept: OpenFinding[]; absorbed: OpenFinding[] } {
-  let kept = draft.findings;
+/** Absorbs the weakest of the findings at the widest step, half of what is too many at a time, until few are open at once. */
+function narrow(draft: Draft, network: Network, { widthMax, narrowTo }: Care) {
+  let kept: readonly OpenFinding[] = draft.findings;
   let order = orderOf(network);
   const absorbed: OpenFinding[] = [];
-  while (order.widest.length > WIDTH_MAX) {
+  const crowded = order.widest.length > widthMax;
+  while (crowded && order.widest.length > narrowTo) {
     const laid = layFindings(kept, network.unary.length);
     const open = new Set(order.widest);
-    const [weakest] = kept
+    const weakest = kept
       .filter((_, i) => laid.findings[i]!.bits.some((bit) => open.has(bit)))
-      .sort((a, b) => a.weight - b.weight || (a.key < b.key ? -1 : 1)) as [OpenFinding];
-    absorbed.push(weakest);
-    kept = kept.filter((finding) => finding !== weakest);
+      .sort((a, b) => a.weight - b.weight || (a.key < b.key ? -1 : 1))
+      .slice(0, Math.ceil((order.widest.length - narrowTo) / 2));
+    absorbed.push(...weakest);
+    kept = kept.filter((finding) => !weakest.includes(finding));
     order = orderOf({ ...network, ...layFindings(kept, network.unary.length) });
   }
   return { order, kept, absorbed };
@@ -84,24 +94,19 @@ function looseSum(sum: SumFactor): Loose {
   };
 }
 
-/** One finding alone against single beliefs is a small network of its own. */
-function looseFinding({ slots, leak }: OpenFinding): Loose {
-  const variables = [...new Set(slots.map(({ variable }) => variable))];
-  const bits = leak.length === 4 ? [0, 1] : [0];
+/** One finding alone against single beliefs is a small network of its own, always of the same shape. */
+function looseFinding(finding: OpenFinding): Loose {
+  const variables = [...new Set(finding.slots.map(({ variable }) => variable))];
+  const renumbered = finding.slots.map((slot) => ({ ...slot, variable: variables.indexOf(slot.variable) }));
+  const shape = { pairs: [], ...layFindings([{ ...finding, slots: renumbered }], variables.length) };
+  let order: Order | undefined;
   return {
     variables,
     messages: [],
     update: (beliefs) => {
-      const { marginals } = eliminate({
-        unary: beliefs,
-        pairs: [],
-        findings: [{ bits, leak }],
-        slots: variables.map((own) =>
-          slots
-            .filter(({ variable }) => variable === own)
-            .map(({ miss, hit, parts }) => ({ miss, hit, bits: parts.map((part) => bits[part]!) })),
-        ),
-      });
+      const network = { ...shape, unary: beliefs };
+      order ??= orderOf(network);
+      const { marginals } = eliminate(network, order);
       return marginals.map((belief, i) => belief.map((weight, state) => ratio(weight, beliefs[i]![state]!)));
     },
   };

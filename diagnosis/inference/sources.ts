@@ -77,15 +77,15 @@ function cumulativeOf(
   reliability: number,
   share: number,
 ): Cumulative {
-  const key = `${kind} ${grade} ${reliability} ${share}`;
-  const cached = tables.single.get(key);
+  const key = `${kind} ${grade} ${share}`;
+  const cached = reliability === 1 ? tables.single.get(key) : undefined;
   if (cached) return cached;
   const risen: RiseTable = tables.rise[kind];
   const q = tables.strengths.grade[grade] * reliability;
   const rows = Array.from({ length: LEVELS + 1 }, (_, k) =>
     k === LEVELS ? new Float64Array(risen[0]!.length).fill(1) : risen[k]!.map((g) => (1 - q * g) ** share),
   );
-  tables.single.set(key, rows);
+  if (reliability === 1) tables.single.set(key, rows);
   return rows;
 }
 

@@ -18,13 +18,17 @@ export interface Strengths {
   tail: number;
 }
 
-export const STRENGTHS: Strengths = {
+/** Set by judgement before anything was fitted; where fitting starts from. */
+export const STRENGTHS_BEFORE: Strengths = {
   grade: { defining: 0.92, strong: 0.78, usual: 0.58, sometimes: 0.34, rare: 0.14 },
   thresholds: [0.55, 1.05, 2.2],
   width: 0.28,
   leak: { low: [0.02, 0.008, 0.002], usual: [0.05, 0.02, 0.004], high: [0.12, 0.05, 0.01] },
   tail: 0.06,
 };
+
+/** In use. */
+export const STRENGTHS: Strengths = STRENGTHS_BEFORE;
 
 /** A cause that is present acts like a need this many scales out. */
 const CAUSE_Z = 1.6;

@@ -3,7 +3,7 @@ import { OUTCOME_LEAK } from '../inference/checks';
 import type { Layout } from '../inference/layout';
 import { sourcesOf } from '../inference/sources';
 import type { Tables } from '../inference/sources';
-import { decisionOf, entropyBits } from './entropy';
+import { decisionOf, entropyBits, mutualInformationBits } from './entropy';
 
 /**
  * Expected information of a check about what it names, bits: mutual information between its outcome and each decision,
@@ -45,7 +45,7 @@ export function gainOnMarginals(
       );
       given.forEach((chance, outcome) => (joint[outcome]![state] = chance * belief[state]!));
     }
-    return sum + mutualBits(layout, variable, belief, joint);
+    return sum + mutualBits(layout, variable, joint);
   }, 0);
   return Math.min(bits, informed);
 }
@@ -68,18 +68,13 @@ function mean(belief: Float64Array, weights: Float64Array | undefined): number {
   return weights ? belief.reduce((sum, p, i) => sum + p * weights[i]!, 0) : 1;
 }
 
-function mutualBits(
-  layout: Layout,
-  variable: number,
-  belief: Float64Array,
-  joint: readonly Float64Array[],
-): number {
-  const before = entropyBits(decisionOf(layout, variable, belief));
-  const after = joint.reduce((sum, row) => {
+/** Information of the outcome about one decision; `joint` holds the weight of each outcome with each state. */
+function mutualBits(layout: Layout, variable: number, joint: readonly Float64Array[]): number {
+  const rows = joint.map((row) => {
     const chance = row.reduce((a, b) => a + b, 0);
-    if (chance <= 0) return sum;
+    if (chance <= 0) return decisionOf(layout, variable, row).map(() => 0);
     const given = row.map((weight) => weight / chance);
-    return sum + chance * entropyBits(decisionOf(layout, variable, given));
-  }, 0);
-  return Math.max(0, before - after);
+    return decisionOf(layout, variable, given).map((share) => share * chance);
+  });
+  return Math.max(0, mutualInformationBits(rows));
 }

@@ -14,7 +14,7 @@ const AMOUNTS_TRIED = 12;
 /** A first change takes two thirds of what is estimated. */
 const FIRST_SHARE = 2 / 3;
 /** Cost, in tolerances, of a change that was not needed, beside the misfit it makes: for any change, and per unit of risk. */
-const NEEDLESS_COST = 0.06;
+const NEEDLESS_COST = 0.1;
 const RISK_COST = 0.3;
 /** How much of a need is expected to go where the change is not a length. */
 const REMEDY_SHARE = 0.7;
@@ -67,9 +67,10 @@ function sidesOf(outlook: Outlook, correction: Correction): Side[] {
   const split = servedBy(outlook, correction, 'both').filter(({ side }) => side !== 'both');
   if (!correction.sided || split.length === 0) return ['both'];
   const left = split.filter(({ side }) => side === 'left');
+  const leastApartMm = (SIDES_APART_MM / 2) * outlook.layout.factors.length + 1e-9;
   const apart = left.some((own) => {
     const other = split.find(({ side, dimension }) => side === 'right' && dimension === own.dimension)!;
-    return Math.abs(own.probability * own.meanMm - other.probability * other.meanMm) >= SIDES_APART_MM / 2;
+    return Math.abs(own.probability * own.meanMm - other.probability * other.meanMm) >= leastApartMm;
   });
   return apart ? ['left', 'right'] : ['both'];
 }

@@ -8,6 +8,18 @@ export function entropyBits(distribution: Iterable<number>): number {
   return bits;
 }
 
+/** Mutual information of the rows and columns of a joint distribution (or of counts), bits. */
+export function mutualInformationBits(joint: readonly (readonly number[])[]): number {
+  const total = joint.flat().reduce((a, b) => a + b, 0);
+  const columns = (joint[0] ?? []).map(
+    (_, column) => joint.reduce((sum, row) => sum + row[column]!, 0) / total,
+  );
+  return joint.reduce((bits, row) => {
+    const chance = row.reduce((a, b) => a + b, 0);
+    return chance > 0 ? bits - (chance / total) * entropyBits(row.map((weight) => weight / chance)) : bits;
+  }, entropyBits(columns));
+}
+
 /** A need as what has to be decided about it: too little, fits, too much; a cause as absent, present. */
 export function decisionOf(layout: Layout, variable: number, belief: Float64Array): number[] {
   const own = layout.variables[variable]!;
