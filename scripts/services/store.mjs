@@ -6,7 +6,7 @@ import { dirname, join } from 'node:path';
 import { faultOf } from './signature.mjs';
 
 const BODY_BYTES_MAX = 64 * 1024 * 1024;
-const KEY = /^\/([a-z0-9-]{3,63})(?:\/([A-Za-z0-9][A-Za-z0-9/._-]*))?$/;
+const KEY = /^\/([a-z0-9-]{3,63})(?:\/([A-Za-z0-9][A-Za-z0-9/._-]*)?)?$/;
 
 const xml = (body) => `<?xml version="1.0" encoding="UTF-8"?>${body}`;
 
