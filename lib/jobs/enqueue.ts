@@ -3,12 +3,19 @@ import { sql } from 'drizzle-orm';
 import PgBoss from 'pg-boss';
 import type { Executor } from '@/db/client';
 
+/** As text that the database casts itself: a missing value is null, an object JSON, a moment its ISO form. */
+function bound(value: unknown): unknown {
+  if (value === undefined || value === null) return null;
+  if (value instanceof Date) return value.toISOString();
+  return typeof value === 'object' ? JSON.stringify(value) : value;
+}
+
 /** pg-boss writes `$1, $2 …`; the transaction takes them as bound values. */
 const inTransaction = (tx: Executor) => ({
   executeSql: async (text: string, values: unknown[] = []) => {
     const pieces = text.split(/\$(\d+)/);
     const chunks = pieces.map((piece, i) =>
-      i % 2 === 0 ? sql.raw(piece) : sql`${values[Number(piece) - 1]}`,
+      i % 2 === 0 ? sql.raw(piece) : sql`${bound(values[Number(piece) - 1])}`,
     );
     return { rows: [...(await tx.execute(sql.join(chunks)))] };
   },
