@@ -4,7 +4,12 @@ import { ROOT } from './folders.mjs';
 import { run } from './run.mjs';
 
 const bin = (name) => join(ROOT, 'node_modules', '.bin', name);
-const ENV = { ...process.env, NEXT_TELEMETRY_DISABLED: '1', CI: process.env.CI ?? '1' };
+const ENV = {
+  ...process.env,
+  NEXT_TELEMETRY_DISABLED: '1',
+  AWS_SDK_JS_NODE_VERSION_SUPPORT_WARNING_DISABLED: 'true',
+  CI: process.env.CI ?? '1',
+};
 
 /** A check that passes or does not: counts as one. */
 export const check = (name, commands) => ({
