@@ -138,6 +138,7 @@ export const watchCluster = (supervisor, folders, runState, { isThrowaway = fals
     name: 'postgres',
     log: serverLog(folders),
     isAlive: () => findPostmaster(folders) !== null,
+    isReady: () => findPostmaster(folders)?.isReady ?? false,
     restart: () => startServer(folders, runState.ports.postgres, isThrowaway),
   });
 

@@ -1,5 +1,5 @@
 import { spawn } from 'node:child_process';
-import { closeSync, openSync } from 'node:fs';
+import { appendFileSync, closeSync, openSync } from 'node:fs';
 import { join } from 'node:path';
 import { setTimeout as sleep } from 'node:timers/promises';
 import { describe, signalGroup } from './identity.mjs';
@@ -18,7 +18,7 @@ export class Supervisor {
   #isStopping = false;
   #failed;
   #fail;
-  #watches = [];
+  #watched = [];
 
   /** @param onChange told the processes that now run, each time one is started */
   constructor(folders, onChange) {
@@ -63,12 +63,15 @@ export class Supervisor {
     if (this.#isStopping) return;
     const pauseMs = restarts.next(Date.now());
     if (pauseMs === null) return this.#fail(diedTooOften(spec.name, log));
+    this.#note(`${spec.name} ended (${child.exitCode ?? child.signalCode}): started again`);
     await sleep(pauseMs);
+    // What it stands on comes first, else it would use up its restarts in the dark.
+    while (!this.#isStopping && !this.#watched.every(({ isReady }) => isReady())) await sleep(LOOK_MS);
     if (!this.#isStopping) this.start(spec, restarts);
   }
 
-  /** Watches over what is not our child, as a server that outlives a killed start. */
-  watch({ name, log, isAlive, restart }) {
+  /** Watches over what is not our child, as a server that outlives a killed start; the children stand on it. */
+  watch({ name, log, isAlive, isReady, restart }) {
     const restarts = new Restarts();
     const look = async () => {
       while (!this.#isStopping) {
@@ -76,11 +79,17 @@ export class Supervisor {
         if (this.#isStopping || isAlive()) continue;
         const pauseMs = restarts.next(Date.now());
         if (pauseMs === null) return this.#fail(diedTooOften(name, log));
+        this.#note(`${name} is gone: started again`);
         await sleep(pauseMs);
-        if (!this.#isStopping) await restart().catch((thrown) => process.stderr.write(`${thrown.message}\n`));
+        if (!this.#isStopping) await restart().catch((thrown) => this.#note(thrown.message));
       }
     };
-    this.#watches.push(look());
+    this.#watched.push({ isReady, done: look() });
+  }
+
+  // In a log of its own: the terminal's last line stays the address.
+  #note(text) {
+    appendFileSync(join(this.folders.logs, 'supervisor.log'), `${new Date().toISOString()} ${text}\n`);
   }
 
   processes() {
@@ -95,7 +104,7 @@ export class Supervisor {
       const timer = setTimeout(() => signalGroup(child.pid, 'SIGKILL'), GRACE_MS);
       return gone.then(() => clearTimeout(timer));
     });
-    await Promise.all([...ending, ...this.#watches]);
+    await Promise.all([...ending, ...this.#watched.map(({ done }) => done)]);
   }
 }
 
