@@ -3,12 +3,16 @@ import { sql } from 'drizzle-orm';
 import PgBoss from 'pg-boss';
 import type { Executor } from '@/db/client';
 
+/** What is left out is null to PostgreSQL; an object goes as JSON text, for Drizzle's driver does not write it out. */
+const bound = (value: unknown) =>
+  value !== null && typeof value === 'object' ? JSON.stringify(value) : (value ?? null);
+
 /** pg-boss writes `$1, $2 …`; the transaction takes them as bound values. */
 const inTransaction = (tx: Executor) => ({
   executeSql: async (text: string, values: unknown[] = []) => {
     const pieces = text.split(/\$(\d+)/);
     const chunks = pieces.map((piece, i) =>
-      i % 2 === 0 ? sql.raw(piece) : sql`${values[Number(piece) - 1]}`,
+      i % 2 === 0 ? sql.raw(piece) : sql`${bound(values[Number(piece) - 1])}`,
     );
     return { rows: [...(await tx.execute(sql.join(chunks)))] };
   },
