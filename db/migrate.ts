@@ -18,7 +18,10 @@ export async function migrateDatabase(ownerUrl: string): Promise<void> {
     });
     const boss = new PgBoss({ connectionString: ownerUrl, max: 1, supervise: false, schedule: false });
     await boss.start();
-    for (const queue of QUEUES) await boss.createQueue(queue.name, queue);
+    for (const queue of QUEUES) {
+      await boss.createQueue(queue.name, queue);
+      await boss.updateQueue(queue.name, queue); // making one that is there already changes nothing
+    }
     await boss.stop({ graceful: false, wait: true });
     await client.unsafe(ROLE_GRANTS);
   } finally {

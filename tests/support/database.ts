@@ -75,7 +75,7 @@ const ENVIRONMENT = {
  * afterwards. The application's modules reach it under the role that serves people.
  * @param environment what the file wants set differently; the rest leads to closed ports
  */
-export function useDatabase(environment: Record<string, string> = {}): TestDatabase {
+export function databaseOfFile(environment: Record<string, string> = {}): TestDatabase {
   const name = `ruckle_test_${randomBytes(6).toString('hex')}`;
   const made = {} as TestDatabase;
   beforeAll(async () => {
