@@ -1,7 +1,3 @@
-import { once } from 'node:events';
-import type { AddressInfo } from 'node:net';
-import { type ParsedMail, simpleParser } from 'mailparser';
-import { SMTPServer } from 'smtp-server';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { db } from '@/db/client';
 import { resendVerification, signUp, verifyEmail } from '@/db/queries/accounts';
@@ -9,45 +5,15 @@ import { verifyLetter } from '@/lib/mail/compose';
 import { enqueueMail } from '@/lib/mail/enqueue-mail';
 import { sendMail } from '@/lib/mail/send-mail';
 import { databaseOfFile } from '../support/database';
+import { SmtpHost } from '../support/smtp-host';
 
 const database = databaseOfFile();
-const caught: { parsed: ParsedMail; raw: string; recipients: string[] }[] = [];
-/** What the host says to the next letters; `null` takes them. */
-let refusal: { responseCode: number } | null = null;
-let port = 0;
-
-const host = () =>
-  new SMTPServer({
-    disabledCommands: ['AUTH', 'STARTTLS'],
-    logger: false,
-    onData(stream, session, done) {
-      const chunks: Buffer[] = [];
-      stream.on('data', (chunk: Buffer) => chunks.push(chunk));
-      stream.on('end', () => {
-        const raw = Buffer.concat(chunks).toString('utf8');
-        const recipients = session.envelope.rcptTo.map(({ address }) => address);
-        const answer = refusal ? Object.assign(new Error('not now'), refusal) : null;
-        if (answer) return done(answer);
-        void simpleParser(raw).then((parsed) => {
-          caught.push({ parsed, raw, recipients });
-          done();
-        });
-      });
-    },
-  });
-
-let server: SMTPServer;
-const up = async () => {
-  server = host();
-  const listener = server.listen(port, '127.0.0.1');
-  await once(listener, 'listening');
-  port = (listener.address() as AddressInfo).port;
-  process.env.SMTP_URL = `smtp://127.0.0.1:${port}`;
-};
-const down = () => new Promise<void>((resolve) => server.close(() => resolve()));
-
-beforeAll(up);
-afterAll(down);
+const host = new SmtpHost();
+beforeAll(async () => {
+  await host.up();
+  process.env.SMTP_URL = `smtp://127.0.0.1:${host.port}`;
+});
+afterAll(() => host.down());
 
 const mailsTo = (email: string) =>
   database.owner<
@@ -91,16 +57,16 @@ describe('a letter', () => {
 
   it('has one Message-ID however often it is tried, and goes out once', async () => {
     const id = await letterTo('two@example.org');
-    await down();
+    await host.down();
     for (let i = 0; i < 3; i += 1) await expect(sendMail(id)).rejects.toThrow();
-    await up();
-    refusal = { responseCode: 451 };
+    await host.up();
+    host.refusal = { responseCode: 451 };
     await expect(sendMail(id)).rejects.toThrow();
-    refusal = null;
+    host.refusal = null;
     await sendMail(id);
     await sendMail(id);
     const [mail] = await mailsTo('two@example.org');
-    const sent = caught.filter(({ recipients }) => recipients.includes('two@example.org'));
+    const sent = host.caught.filter(({ recipients }) => recipients.includes('two@example.org'));
     expect(sent.map(({ parsed }) => parsed.messageId)).toEqual([mail?.messageId]);
     expect(mail?.sentAt).not.toBeNull();
     expect(mail?.textBody).toBe('');
@@ -111,7 +77,7 @@ describe('a letter', () => {
     await sendMail(id);
     await database.owner`update mails set sent_at = null, text_body = ${verifyLetter('http://127.0.0.1:4321').textBody} where id = ${id}`;
     await sendMail(id);
-    const copies = caught.filter(({ recipients }) => recipients.includes('three@example.org'));
+    const copies = host.caught.filter(({ recipients }) => recipients.includes('three@example.org'));
     expect(new Set(copies.map(({ parsed }) => parsed.messageId)).size).toBe(1);
     const secrets = copies.map(({ parsed }) => /token=([\w-]{43})/.exec(parsed.text ?? '')?.[1] ?? '');
     expect(await verifyEmail(secrets[1] ?? '')).not.toBeNull();
@@ -122,20 +88,20 @@ describe('a letter', () => {
     const id = await letterTo('four@example.org');
     const [job] = await jobsOf(id);
     expect(Number(job?.retry_limit) * Number(job?.retry_delay)).toBeGreaterThan(7 * 86_400);
-    refusal = { responseCode: 550 };
+    host.refusal = { responseCode: 550 };
     await sendMail(id);
-    refusal = null;
+    host.refusal = null;
     await sendMail(id);
     const [mail] = await mailsTo('four@example.org');
     expect(mail).toMatchObject({ sentAt: null, failedAt: expect.any(Date), textBody: '' });
-    expect(caught.filter(({ recipients }) => recipients.includes('four@example.org'))).toEqual([]);
+    expect(host.caught.filter(({ recipients }) => recipients.includes('four@example.org'))).toEqual([]);
   });
 
   it('holds no usable link until it goes out, and its link afterwards stands nowhere in the database', async () => {
     const id = await letterTo('five@example.org');
     expect(await database.owner`select 1 from tokens where email = 'five@example.org'`).toHaveLength(0);
     await sendMail(id);
-    const letter = caught.find(({ recipients }) => recipients.includes('five@example.org'));
+    const letter = host.caught.find(({ recipients }) => recipients.includes('five@example.org'));
     const secret = /token=([\w-]{43})/.exec(letter?.parsed.text ?? '')?.[1] ?? 'none';
     const dump = await database.owner`
       select (select json_agg(t) from tokens t) as tokens, (select json_agg(m) from mails m) as mails,
@@ -150,7 +116,7 @@ describe('a letter', () => {
     const [user] = await database.owner<{ userId: string; email: string }[]>`
       select id as "userId", email from users where email = 'six@example.org'`;
     if (user) await resendVerification(user);
-    const secret = /token=([\w-]{43})/.exec(caught.at(-1)?.parsed.text ?? '')?.[1] ?? '';
+    const secret = /token=([\w-]{43})/.exec(host.caught.at(-1)?.parsed.text ?? '')?.[1] ?? '';
     expect(await verifyEmail(secret)).toBeNull();
   });
 
@@ -160,9 +126,11 @@ describe('a letter', () => {
     for (const [i, hostile] of HOSTILE.entries()) {
       const id = await letterTo(`seven${i}@example.org`);
       await database.owner`update mails set to_email = ${hostile} where id = ${id}`;
-      const before = caught.length;
+      const before = host.caught.length;
       await sendMail(id).catch(() => undefined);
-      expect(caught.slice(before).flatMap(({ recipients }) => recipients)).not.toContain('b@example.org');
+      expect(host.caught.slice(before).flatMap(({ recipients }) => recipients)).not.toContain(
+        'b@example.org',
+      );
     }
   });
 
@@ -171,7 +139,7 @@ describe('a letter', () => {
       const id = await letterTo(`eight${i}@example.org`);
       await database.owner`update mails set subject = ${hostile} where id = ${id}`;
       await sendMail(id);
-      const { parsed, recipients } = caught.at(-1) ?? {};
+      const { parsed, recipients } = host.caught.at(-1) ?? {};
       expect(recipients).toEqual([`eight${i}@example.org`]);
       expect([...(parsed?.headers.keys() ?? [])].sort()).toEqual(['content-type', 'date', 'from', 'message-id', 'mime-version', 'subject', 'to']); // prettier-ignore
     }

@@ -6,7 +6,7 @@ import { afterAll, beforeAll } from 'vitest';
 import { migrateDatabase } from '@/db/migrate';
 
 const LOCK = 6_114_902; // any constant: two runs do not make the same template at once
-const SOURCES = ['db/migrations', 'db/grants.ts', 'lib/jobs/queues.ts'];
+const SOURCES = ['db/migrations', 'db/migrate.ts', 'db/grants.ts', 'lib/jobs/queues.ts'];
 
 interface TestDatabase {
   /** Speaks to the file's database as its owner: to look behind the application's back. */
