@@ -118,7 +118,12 @@ const PHOTOS = [
   }),
 ]; // prettier-ignore
 
+const NOWHERE = (['GET', 'POST', 'PUT', 'PATCH', 'DELETE'] as const).map((method) =>
+  handler(method, '[...rest]', { path: () => '/api/no/such/address', access: only('signed-out') }),
+);
+
 export const HANDLER_ROWS: HandlerRow[] = [
+  ...NOWHERE,
   handler('GET', 'health', { path: () => '/api/health', access: everyone }),
   handler('PATCH', 'me', { path: () => '/api/me', access: own, body: () => preferences }),
   ...WEARERS,

@@ -47,6 +47,7 @@ async function addThings(tx: TransactionSql, ownerId: string, ids: Ids): Promise
     values (${ids.journalId}, ${ownerId}, ${ids.wearerId}, ${ids.draftId}, 'Wool trousers')`;
   await tx`insert into muslins (id, journal_id, ordinal) values (${muslinId}, ${ids.journalId}, 1)`;
   await tx`insert into rounds (id, journal_id, muslin_id, number) values (${ids.roundId}, ${ids.journalId}, ${muslinId}, 1)`;
+  await tx`insert into rounds (id, journal_id, muslin_id, number, begun) values (${v7()}, ${ids.journalId}, ${muslinId}, 2, 're-baste')`;
   await tx`insert into changes (id, round_id, author_id, correction, side)
     values (${ids.changeId}, ${ids.roundId}, ${ownerId}, 'any', 'both')`;
   await tx`insert into photos (id, round_id, upload_key, view, width_px, height_px, master_sha256, master_bytes)
