@@ -10,7 +10,14 @@ const open = new Map<string, Promise<IDBPDatabase>>();
 function database(userId: string): Promise<IDBPDatabase> {
   const had = open.get(userId);
   if (had) return had;
-  const made = openDB(nameOf(userId), 1, { upgrade: (db) => void db.createObjectStore(STORE) });
+  const made = openDB(nameOf(userId), 1, {
+    upgrade: (db) => void db.createObjectStore(STORE),
+    // Signing out in another tab erases these drafts; a connection held here would keep them.
+    blocking: (_now, _wanted, event) => {
+      (event.target as IDBDatabase).close();
+      open.delete(userId);
+    },
+  });
   open.set(userId, made);
   return made;
 }

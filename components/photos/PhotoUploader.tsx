@@ -45,7 +45,8 @@ export function PhotoUploader({ userId, roundId, view, onAdded }: Props) {
       {label}
       <input
         type="file"
-        accept="image/jpeg,image/png,image/webp,image/heic,image/heif"
+        // Without HEIC in this list a phone that takes it hands over a JPEG.
+        accept="image/jpeg,image/png,image/webp"
         multiple={!isCamera}
         capture={isCamera ? 'environment' : undefined}
         onChange={take}

@@ -1,5 +1,5 @@
 import { X } from 'lucide-react';
-import type { UploadLine } from './useUploads';
+import type { UploadLine } from './upload-sender';
 
 const STATE_WORDS = { preparing: 'being made smaller', waiting: 'waiting on this phone', sending: 'being sent', refused: 'not taken' } as const; // prettier-ignore
 

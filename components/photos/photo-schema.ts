@@ -8,7 +8,7 @@ export const uploadQuerySchema = z.object({
 });
 
 export const photoEditSchema = z.strictObject({
-  version: z.int().positive(),
+  version: z.int32().positive(),
   view: z.enum(VIEWS).optional(),
   isMirrored: z.boolean().optional(),
 });

@@ -3,14 +3,17 @@ import { v7 } from 'uuid';
 const SIDE_PX_MAX = 2400;
 const MEGABYTES_MAX = 4;
 
+/** A file that waited on the device comes back as a bare Blob in some browsers; the compressor wants a File. */
+const asFile = (file: Blob) => (file instanceof File ? file : new File([file], 'photo', { type: file.type }));
+
 /**
  * Makes a photo small enough for poor wifi, upright, before it is sent. A file that this browser cannot open goes as it is: the
  * server says in a sentence what it is.
  */
-export async function preparePhoto(file: File): Promise<Blob> {
+export async function preparePhoto(file: Blob): Promise<Blob> {
   const { default: compress } = await import('browser-image-compression');
   try {
-    return await compress(file, {
+    return await compress(asFile(file), {
       maxSizeMB: MEGABYTES_MAX,
       maxWidthOrHeight: SIDE_PX_MAX,
       initialQuality: 0.92,

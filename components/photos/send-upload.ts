@@ -4,7 +4,8 @@ import type { WaitingUpload } from './upload-store';
 
 export type UploadEnd =
   | { kind: 'added'; photo: PhotoDto }
-  | { kind: 'again'; afterMs: number; message: string }
+  /** `isForAll`: the others would fare the same just now. */
+  | { kind: 'again'; afterMs: number; isForAll: boolean; message: string }
   | { kind: 'refused'; message: string }
   | { kind: 'cancelled' };
 
@@ -23,10 +24,10 @@ function endOf(request: XMLHttpRequest): UploadEnd {
     return { kind: 'added', photo: JSON.parse(request.responseText) as PhotoDto };
   }
   const { message } = problemOf(request);
-  const isLater = [401, 408, 429].includes(request.status) || request.status >= 500;
-  if (!isLater) return { kind: 'refused', message };
-  const retryAfterS = Number(request.getResponseHeader('retry-after') ?? 5);
-  return { kind: 'again', afterMs: Math.max(2, retryAfterS) * 1000, message };
+  const isForAll = [401, 429].includes(request.status);
+  if (!isForAll && request.status !== 408 && request.status < 500) return { kind: 'refused', message };
+  const afterMs = Number(request.getResponseHeader('retry-after') ?? 0) * 1000;
+  return { kind: 'again', afterMs, isForAll, message };
 }
 
 /** Sends one photo; fetch does not tell how far it is, so this is an XMLHttpRequest. Aborting the signal ends it. */
@@ -42,7 +43,7 @@ export function sendUpload(
     request.setRequestHeader('content-type', 'application/octet-stream');
     request.upload.onprogress = ({ loaded, total }) => onProgress(total > 0 ? loaded / total : 0);
     request.onload = () => resolve(endOf(request));
-    request.onerror = () => resolve({ kind: 'again', afterMs: 4000, message: OFFLINE });
+    request.onerror = () => resolve({ kind: 'again', afterMs: 0, isForAll: true, message: OFFLINE });
     request.onabort = () => resolve({ kind: 'cancelled' });
     signal.addEventListener('abort', () => request.abort());
     request.send(file);

@@ -14,6 +14,17 @@ export async function findKeptRevisions(ids: string[]): Promise<Set<string>> {
   return new Set(rows.map(({ id, revision }) => `${id} ${revision}`));
 }
 
+/** Of these files, the ones that have a day of their own to be erased: no sooner. */
+export async function findDoomed(keys: string[]): Promise<Set<string>> {
+  if (keys.length === 0) return new Set();
+  const rows = await db()
+    .select({ key: doomedObjects.key })
+    .from(doomedObjects)
+    .where(inArray(doomedObjects.key, keys));
+  return new Set(rows.map(({ key }) => key));
+}
+
+/** A page of what is due; the next one comes once these are forgotten. */
 export async function listDoomed(now: Date): Promise<string[]> {
   const rows = await db()
     .select({ key: doomedObjects.key })

@@ -43,8 +43,17 @@ export async function findPhotos(viewer: Viewer, roundId: string): Promise<Photo
   return seen.length > 0 ? listPhotos(viewer, roundId) : null;
 }
 
-/** Whether these very pictures may be served: the photo is in sight and the revision is the one that stands. */
-export async function mayServePhoto(viewer: Viewer, id: string, revision: number): Promise<boolean> {
+/**
+ * Whether these very pictures may be served: the photo is in sight and the revision is the one that stands.
+ * @param audience the master, which is the photo to keep, goes to its owner; the smaller pictures to whoever may look
+ */
+export async function mayServePhoto(
+  viewer: Viewer,
+  id: string,
+  revision: number,
+  audience: 'owner' | 'readers',
+): Promise<boolean> {
+  const inSight = audience === 'owner' ? roundOwnedBy(viewer) : roundVisibleTo(viewer);
   const [row] = await db()
     .select({ id: photos.id })
     .from(photos)
@@ -53,15 +62,10 @@ export async function mayServePhoto(viewer: Viewer, id: string, revision: number
         eq(photos.id, id),
         eq(photos.revision, revision),
         photoIsKept,
-        inArray(photos.roundId, roundIds(roundVisibleTo(viewer))),
+        inArray(photos.roundId, roundIds(inSight)),
       ),
     );
   return row !== undefined;
-}
-
-export async function mayAddPhoto(viewer: Viewer, roundId: string): Promise<boolean> {
-  const rows = await roundIds(and(roundOwnedBy(viewer), eq(rounds.id, roundId)));
-  return rows.length > 0;
 }
 
 async function findByUploadKey(tx: Executor, roundId: string, uploadKey: string): Promise<PhotoDto | null> {
@@ -72,13 +76,14 @@ async function findByUploadKey(tx: Executor, roundId: string, uploadKey: string)
   return row ?? null;
 }
 
-/** The photo that this upload has made already, if it has. */
-export async function findUploaded(
+/** Whether photos may be added to this round, and the one that this upload has made already. Null: not the viewer's. */
+export async function findRoundForUpload(
   viewer: Viewer,
   roundId: string,
   uploadKey: string,
-): Promise<PhotoDto | null> {
-  return (await mayAddPhoto(viewer, roundId)) ? findByUploadKey(db(), roundId, uploadKey) : null;
+): Promise<{ had: PhotoDto | null } | null> {
+  const [owned] = await roundIds(and(roundOwnedBy(viewer), eq(rounds.id, roundId)));
+  return owned ? { had: await findByUploadKey(db(), roundId, uploadKey) } : null;
 }
 
 export interface NewPhoto {

@@ -26,7 +26,7 @@ sharp.block({ operation: ['VipsForeignLoad'] });
 sharp.unblock({ operation: ['VipsForeignLoadJpeg', 'VipsForeignLoadPng', 'VipsForeignLoadWebp'] });
 sharp.cache(false);
 
-const turns = new Turns(2, 24);
+const turns = new Turns(2, 12);
 
 const open = (bytes: Buffer) =>
   sharp(bytes, { limitInputPixels: PIXELS_MAX, failOn: 'error', sequentialRead: true }).timeout({

@@ -1,31 +1,35 @@
 import 'server-only';
-import { findKeptRevisions, forgetDoomed, listDoomed } from '@/db/queries/photo-leftovers';
+import { findDoomed, findKeptRevisions, forgetDoomed, listDoomed } from '@/db/queries/photo-leftovers';
 import { deleteObject, listObjects } from '@/lib/photo-store';
 import { photoOfKey } from './keys';
 
 const YOUNG_MS = 3_600_000;
 
-/** Files that belong to no row, once they are old enough not to be an upload under way. */
+/** Files that belong to no row and have no day of their own, once they are too old to be an upload under way. */
 async function eraseOrphans(now: Date): Promise<void> {
   let after: string | undefined;
   for (;;) {
     const page = await listObjects('photos/', after);
-    const old = page.filter(({ modifiedAt }) => now.getTime() - modifiedAt.getTime() > YOUNG_MS);
-    const owners = old.flatMap(({ key }) => photoOfKey(key) ?? []);
-    const kept = await findKeptRevisions([...new Set(owners.map(({ photoId }) => photoId))]);
-    for (const { key } of old) {
-      const owner = photoOfKey(key);
-      if (owner && !kept.has(`${owner.photoId} ${owner.revision}`)) await deleteObject(key);
-    }
     if (page.length === 0) return;
+    const old = page.filter(({ modifiedAt }) => now.getTime() - modifiedAt.getTime() > YOUNG_MS);
+    const owned = old.flatMap(({ key }) => {
+      const owner = photoOfKey(key);
+      return owner ? [{ key, ...owner }] : [];
+    });
+    const kept = await findKeptRevisions([...new Set(owned.map(({ photoId }) => photoId))]);
+    const loose = owned.filter(({ photoId, revision }) => !kept.has(`${photoId} ${revision}`));
+    const doomed = await findDoomed(loose.map(({ key }) => key));
+    for (const { key } of loose) if (!doomed.has(key)) await deleteObject(key);
     after = page.at(-1)?.key;
   }
 }
 
 async function eraseDoomed(now: Date): Promise<void> {
-  for (const key of await listDoomed(now)) {
-    await deleteObject(key);
-    await forgetDoomed(key);
+  for (let keys = await listDoomed(now); keys.length > 0; keys = await listDoomed(now)) {
+    for (const key of keys) {
+      await deleteObject(key);
+      await forgetDoomed(key);
+    }
   }
 }
 

@@ -11,7 +11,8 @@ export const PHOTO_FAULTS = {
   },
   heic: {
     status: 415,
-    message: 'This is a HEIC picture, which this browser cannot open. Save or share it as JPEG, then add it.',
+    message:
+      'This is a HEIC or AVIF picture, which cannot be opened here. Save or share it as JPEG, then add it.',
   },
   'not-a-photo': { status: 415, message: 'This is not a JPEG, PNG or WebP picture.' },
   animated: { status: 415, message: 'This picture moves. Add a still one.' },
@@ -22,6 +23,10 @@ export const PHOTO_FAULTS = {
   slow: {
     status: 422,
     message: 'This picture takes too long to open. Save it again as a JPEG, then add it.',
+  },
+  cut: {
+    status: 503,
+    message: 'Only a part of this picture arrived. Nothing was kept of it; it is sent again in a moment.',
   },
   busy: { status: 503, message: 'Many pictures are arriving just now. This one is tried again in a moment.' },
 } as const;

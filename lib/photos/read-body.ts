@@ -1,19 +1,52 @@
 import 'server-only';
+import type { PhotoFault } from './faults';
 
-/** The whole body, or null as soon as it is longer than may be: nothing beyond is read into memory. */
-export async function readBody(request: Request, bytesMax: number): Promise<Buffer | null> {
-  if (Number(request.headers.get('content-length') ?? 0) > bytesMax) return null;
-  if (!request.body) return Buffer.alloc(0);
+/** Bytes of uploads that one process holds at once, at the most; beyond it an upload is asked to come again. */
+const HELD_BYTES_MAX = 256 * 1024 * 1024;
+let heldBytes = 0;
+
+type Read = { bytes: Buffer } | { fault: PhotoFault };
+
+async function readAll(request: Request, bytesMax: number, hold: (bytes: number) => boolean): Promise<Read> {
+  const announced = request.headers.get('content-length');
+  if (Number(announced ?? 0) > bytesMax) return { fault: 'too-large' };
   const chunks: Uint8Array[] = [];
   let bytes = 0;
-  const reader = request.body.getReader();
-  for (let read = await reader.read(); !read.done; read = await reader.read()) {
+  const reader = request.body?.getReader();
+  for (let read = await reader?.read(); read && !read.done; read = await reader?.read()) {
     bytes += read.value.length;
-    if (bytes > bytesMax) {
-      await reader.cancel();
-      return null;
+    const fault = bytes > bytesMax ? 'too-large' : hold(read.value.length) ? null : 'busy';
+    if (fault) {
+      await reader?.cancel();
+      return { fault };
     }
     chunks.push(read.value);
   }
-  return Buffer.concat(chunks);
+  if (announced !== null && bytes !== Number(announced)) return { fault: 'cut' };
+  return { bytes: Buffer.concat(chunks) };
+}
+
+/**
+ * Works on the whole body of an upload, which is held in memory that long. Nothing beyond the limit is read, and a body that is
+ * shorter than was announced is a fault, never a short file.
+ * @param bytesMax the longest body that may be
+ */
+export async function withBody<T>(
+  request: Request,
+  bytesMax: number,
+  work: (bytes: Buffer) => Promise<T>,
+): Promise<T | { fault: PhotoFault }> {
+  let mine = 0;
+  const hold = (bytes: number) => {
+    if (heldBytes + bytes > HELD_BYTES_MAX) return false;
+    heldBytes += bytes;
+    mine += bytes;
+    return true;
+  };
+  try {
+    const read = await readAll(request, bytesMax, hold).catch((): Read => ({ fault: 'cut' }));
+    return 'fault' in read ? read : await work(read.bytes);
+  } finally {
+    heldBytes -= mine;
+  }
 }

@@ -4,7 +4,8 @@ export type PhotoKind = 'jpeg' | 'png' | 'webp';
 
 const ascii = (bytes: Uint8Array, from: number, to: number) =>
   String.fromCharCode(...bytes.subarray(from, to));
-const HEIF_BRANDS = new Set(['heic', 'heix', 'hevc', 'heim', 'heis', 'mif1', 'msf1', 'avif']);
+/** ISO/IEC 23008-12 (HEIF) and the AV1 image format: the major brands that phones and cameras write. */
+const HEIF_BRANDS = new Set('heic heix heim heis hevc hevx hevm hevs mif1 mif2 msf1 avif avis'.split(' '));
 
 /** What a file is by its first bytes, whatever it is called and whatever was claimed. */
 export function sniff(bytes: Uint8Array): { kind: PhotoKind } | { fault: PhotoFault } {

@@ -10,10 +10,11 @@ export const GET = route(
   {
     access: 'anyone',
     params: z.object({ photoId: z.uuid(), variant: z.enum(VARIANTS) }),
-    query: z.object({ r: z.coerce.number().int().positive().catch(0) }),
+    query: z.object({ r: z.coerce.number().pipe(z.int32().positive()).catch(0) }),
   },
   async ({ viewer, params: { photoId, variant }, query }) => {
-    if (!viewer || !(await mayServePhoto(viewer, photoId, query.r))) throw notFound();
+    const audience = variant === 'master' ? 'owner' : 'readers';
+    if (!viewer || !(await mayServePhoto(viewer, photoId, query.r, audience))) throw notFound();
     return servePhoto(photoId, query.r, variant);
   },
 );
