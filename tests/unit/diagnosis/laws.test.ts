@@ -1,6 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import type { CaseInput } from '@/diagnosis/case-schema';
+import type { Knowledge } from '@/diagnosis/garments/schema';
 import { prepare, solveRound, tailsOf } from '@/diagnosis/inference/beliefs';
 import { GRID_FIT } from '@/diagnosis/inference/grid';
 import { layoutOf } from '@/diagnosis/inference/layout';
@@ -15,9 +16,14 @@ const cases = arbitraryCase(small);
 const RUNS = { numRuns: 60, seed: 7 };
 
 /** P(beyond tolerance) of a need, both sides' greatest. */
-function tail(input: CaseInput, dimension: string, direction: 'more' | 'less'): number {
-  const fitting = parsed(small, input);
-  const { layout, tables, start } = prepare(small, fitting, STRENGTHS);
+function tail(
+  input: Omit<CaseInput, 'garment'>,
+  dimension: string,
+  direction: 'more' | 'less',
+  knowledge: Knowledge = small,
+): number {
+  const fitting = parsed(knowledge, input);
+  const { layout, tables, start } = prepare(knowledge, fitting, STRENGTHS);
   const { marginals } = solveRound(layout, tables, start, fitting);
   const place = layout.index.dimensions.get(dimension)!;
   return Math.max(...layout.ofDimension[place]!.map((v) => tailsOf(layout, place, marginals[v]!)[direction]));
@@ -220,9 +226,13 @@ describe('laws of a reading', () => {
   });
 
   it('lets the absence of slack say little while a tight width would hide it', () => {
-    const tight = { garment: 'smock', signs: [{ sign: 'seat-lines', severity: 3 }] };
-    const before = tail(tight, 'depth', 'less');
-    expect(before - tail({ ...tight, absent: ['seat-folds'] }, 'depth', 'less')).toBeLessThan(0.1);
+    const tight = { measured: [{ terms: [{ dimension: 'seat' }], needMm: 40, sdMm: 4 }] };
+    const drop = (knowledge: Knowledge) =>
+      tail(tight, 'rise', 'less', knowledge) -
+      tail({ ...tight, absent: ['fold-band'] }, 'rise', 'less', knowledge);
+    const bare = { ...small, signs: small.signs.map((sign) => ({ ...sign, maskedBy: [] })) };
+    expect(drop(small)).toBeGreaterThan(0);
+    expect(drop(small)).toBeLessThan(0.5 * drop(bare));
   });
 });
 
