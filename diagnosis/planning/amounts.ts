@@ -1,0 +1,112 @@
+import type { Side } from '../case-schema';
+import type { Correction } from '../garments/schema';
+import { ownAmount } from '../inference/replay';
+import type { Range } from '../reading';
+import { amountText } from './amount-text';
+import type { Outlook, Tail } from './outlook';
+import { LIKELY_FROM } from './words';
+
+/** A first change takes two thirds of what is estimated. */
+const FIRST_SHARE = 2 / 3;
+/** An estimate is firm when its likely range is no wider than this share of it. */
+const FIRM_SHARE = 0.8;
+
+/** Where the change is no length. */
+export const NO_AMOUNTS = {
+  amountMm: null,
+  amountText: null,
+  estimateMm: null,
+  basis: null,
+  firstMm: null,
+  capRoundMm: null,
+  capTotalMm: null,
+  beyond: null,
+};
+
+/** How far a correction may go on this body, mm of its own basis. */
+export interface Limits {
+  firstMm: number;
+  capRoundMm: number;
+  capTotalMm: number;
+  /** What is left of the total cap after the rounds before. */
+  leftMm: number;
+  /** What this round may take at the most. */
+  capMm: number;
+}
+
+/** Its first amount and caps at this size, and what earlier rounds have left of them; null where the change is no length. */
+export function limitsOf(
+  { layout, fitting }: Outlook,
+  { id, amounts }: Correction,
+  side: Side,
+): Limits | null {
+  if (!amounts) return null;
+  const factor = layout.factors[amounts.sizeLevel];
+  const [firstMm, capRoundMm, capTotalMm] = [amounts.firstMm, amounts.capRoundMm, amounts.capTotalMm].map(
+    (mm) => mm * factor,
+  ) as [number, number, number];
+  const madeMm = fitting.history
+    .flatMap(({ changes }) => changes)
+    .filter(
+      (change) =>
+        change.correction === id && (side === 'both' || change.side === 'both' || change.side === side),
+    )
+    .reduce((sum, change) => sum + ownAmount(layout, change), 0);
+  const leftMm = capTotalMm - madeMm;
+  // Rests below a hundredth of a millimetre come from adding, not from cutting.
+  return {
+    firstMm,
+    capRoundMm,
+    capTotalMm,
+    leftMm: leftMm > 0.01 ? leftMm : 0,
+    capMm: Math.min(capRoundMm, leftMm),
+  };
+}
+
+/**
+ * The amount proposed for this round: the smaller of the first amount and two thirds of the estimate, the whole estimate
+ * once it is firm and not from marks alone; never past a cap.
+ */
+export function amountsOf(outlook: Outlook, correction: Correction, serves: readonly Tail[], limits: Limits) {
+  const amounts = correction.amounts!;
+  const estimate = estimateOf(outlook, correction, serves);
+  const [lowMm, highMm] = estimate.rangeMm;
+  const firm =
+    !outlook.marksAlone &&
+    estimate.probability >= LIKELY_FROM &&
+    highMm - lowMm <= FIRM_SHARE * estimate.meanMm;
+  const wantedMm = firm ? estimate.meanMm : Math.min(limits.firstMm, FIRST_SHARE * estimate.meanMm);
+  const amountMm = Math.min(wantedMm, limits.capMm);
+  const tooFar = estimate.meanMm > limits.leftMm;
+  return {
+    amountMm,
+    amountText: amountText(amountMm, correction, outlook.fitting.unit),
+    estimateMm: estimate.rangeMm,
+    basis: amounts.basis,
+    firstMm: limits.firstMm,
+    capRoundMm: limits.capRoundMm,
+    capTotalMm: limits.capTotalMm,
+    beyond: tooFar ? beyondOf(correction) : null,
+  };
+}
+
+function beyondOf({ amounts }: Correction): 'another-size' | 'another-draft' {
+  return amounts!.sizeLevel === 'length' ? 'another-draft' : 'another-size';
+}
+
+/** What the served needs ask of this correction, in its own basis: the mean of their means, weighed by probability. */
+function estimateOf(outlook: Outlook, { vector }: Correction, serves: readonly Tail[]) {
+  const { index } = outlook.layout;
+  let weight = 0;
+  let meanMm = 0;
+  const rangeMm: Range = [0, 0];
+  for (const tail of serves) {
+    const { perMm } = vector.find(({ dimension }) => index.dimensions.get(dimension) === tail.dimension)!;
+    const share = Math.max(tail.probability, 1e-9);
+    weight += share;
+    meanMm += (share * tail.meanMm) / Math.abs(perMm);
+    for (const end of [0, 1] as const) rangeMm[end] += (share * tail.rangeMm[end]) / Math.abs(perMm);
+  }
+  const probability = serves.reduce((most, tail) => Math.max(most, tail.probability), 0);
+  return { probability, meanMm: meanMm / weight, rangeMm: rangeMm.map((end) => end / weight) as Range };
+}
