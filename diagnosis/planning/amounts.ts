@@ -4,7 +4,7 @@ import { ownAmount } from '../inference/replay';
 import type { Range } from '../reading';
 import { amountText } from './amount-text';
 import type { Outlook, Tail } from './outlook';
-import { LIKELY_FROM } from './words';
+import { LIKELY_FROM, POSSIBLE_FROM } from './words';
 
 /** A first change takes two thirds of what is estimated. */
 const FIRST_SHARE = 2 / 3;
@@ -77,7 +77,7 @@ export function amountsOf(outlook: Outlook, correction: Correction, serves: read
     highMm - lowMm <= FIRM_SHARE * estimate.meanMm;
   const wantedMm = firm ? estimate.meanMm : Math.min(limits.firstMm, FIRST_SHARE * estimate.meanMm);
   const amountMm = Math.min(wantedMm, limits.capMm);
-  const tooFar = estimate.meanMm > limits.leftMm;
+  const tooFar = estimate.probability >= POSSIBLE_FROM && estimate.meanMm > limits.leftMm;
   return {
     amountMm,
     amountText: amountText(amountMm, correction, outlook.fitting.unit),
