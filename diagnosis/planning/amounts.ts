@@ -35,23 +35,15 @@ export interface Limits {
 }
 
 /** Its first amount and caps at this size, and what earlier rounds have left of them; null where the change is no length. */
-export function limitsOf(
-  { layout, fitting }: Outlook,
-  { id, amounts }: Correction,
-  side: Side,
-): Limits | null {
+export function limitsOf(outlook: Outlook, correction: Correction, side: Side): Limits | null {
+  const { layout } = outlook;
+  const { amounts } = correction;
   if (!amounts) return null;
   const factor = layout.factors[amounts.sizeLevel];
   const [firstMm, capRoundMm, capTotalMm] = [amounts.firstMm, amounts.capRoundMm, amounts.capTotalMm].map(
     (mm) => mm * factor,
   ) as [number, number, number];
-  const madeMm = fitting.history
-    .flatMap(({ changes }) => changes)
-    .filter(
-      (change) =>
-        change.correction === id && (side === 'both' || change.side === 'both' || change.side === side),
-    )
-    .reduce((sum, change) => sum + ownAmount(layout, change), 0);
+  const madeMm = netMade(outlook, correction, side);
   const leftMm = capTotalMm - madeMm;
   // Rests below a hundredth of a millimetre come from adding, not from cutting.
   return {
@@ -61,6 +53,33 @@ export function limitsOf(
     leftMm: leftMm > 0.01 ? leftMm : 0,
     capMm: Math.min(capRoundMm, leftMm),
   };
+}
+
+/** What earlier rounds made of a correction, less what they took back by its opposite, mm of its own basis; not below 0. */
+function netMade({ layout, fitting }: Outlook, correction: Correction, side: Side): number {
+  const { index } = layout;
+  const sum = fitting.history
+    .flatMap(({ changes }) => changes)
+    .filter((change) => side === 'both' || change.side === 'both' || change.side === side)
+    .reduce((total, change) => {
+      const other = index.knowledge.corrections[index.corrections.get(change.correction)!]!;
+      if (other.id === correction.id) return total + ownAmount(layout, change);
+      const per = takenBackPerMm(correction, other);
+      return total - per * ownAmount(layout, change);
+    }, 0);
+  return Math.max(0, sum);
+}
+
+/** Millimetres of a correction that a millimetre of another takes back: 0 unless they serve the same needs in opposite directions. */
+function takenBackPerMm(correction: Correction, other: Correction): number {
+  const served = ({ vector }: Correction) => vector.filter(({ coupling }) => !coupling);
+  const [own, others] = [served(correction), served(other)];
+  if (own.length !== others.length) return 0;
+  const ratios = own.map(({ dimension, perMm }) => {
+    const against = others.find((entry) => entry.dimension === dimension);
+    return against ? -against.perMm / perMm : 0;
+  });
+  return ratios.every((ratio) => ratio > 0) ? Math.min(...ratios) : 0;
 }
 
 /**

@@ -11,8 +11,8 @@ import { wordOf } from './words';
 /** Amounts tried for the best admissible one, as parts of the cap. */
 const AMOUNTS_TRIED = 12;
 /** Cost, in tolerances, of a change that was not needed, beside the misfit it makes: for any change, and per unit of risk. */
-const NEEDLESS_COST = 0.1;
-const RISK_COST = 0.3;
+const NEEDLESS_COST = 0.06;
+const RISK_COST = 0.2;
 /** How much of a need is expected to go where the change is not a length. */
 const REMEDY_SHARE = 0.7;
 /** Left and right are one below this difference, mm (1/4 in). */
