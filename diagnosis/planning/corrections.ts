@@ -10,7 +10,7 @@ import { wordOf } from './words';
 
 /** Amounts tried for the best admissible one, as parts of the cap. */
 const AMOUNTS_TRIED = 12;
-/** Cost, in tolerances, of a change that was not needed, beside the misfit it makes: for any change, and per unit of risk. */
+/** Cost, in tolerances of the need served, of a change that was not needed, beside the misfit it makes: for any, and per unit of risk. */
 const NEEDLESS_COST = 0.06;
 const RISK_COST = 0.2;
 /** How much of a need is expected to go where the change is not a length. */
@@ -91,7 +91,8 @@ function scoreOne(outlook: Outlook, correction: Correction, side: Side): Scored 
   const limits = limitsOf(outlook, correction, side);
   if (limits && limits.leftMm <= 0) return null;
   const gain = limits ? bestGain(outlook, correction, side, limits.capMm) : remedyGain(outlook, serves);
-  const score = gain - (NEEDLESS_COST + RISK_COST * correction.risk) * (1 - probability);
+  const loss = most ? outlook.layout.index.knowledge.dimensions[most.dimension]!.loss[most.direction] : 1;
+  const score = gain - loss * (NEEDLESS_COST + RISK_COST * correction.risk) * (1 - probability);
   const row: CorrectionRow = {
     correction: correction.id,
     name: correction.name,
