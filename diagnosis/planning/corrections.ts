@@ -11,8 +11,8 @@ import { wordOf } from './words';
 /** Amounts tried for the best admissible one, as parts of the cap. */
 const AMOUNTS_TRIED = 12;
 /** Cost, in tolerances of the need served, of a change that was not needed, beside the misfit it makes: for any, and per unit of risk. */
-const NEEDLESS_COST = 0.06;
-const RISK_COST = 0.2;
+const NEEDLESS_COST = 0.04;
+const RISK_COST = 0.15;
 /** How much of a need is expected to go where the change is not a length. */
 const REMEDY_SHARE = 0.7;
 /** Left and right are one below this difference, mm (1/4 in). */
@@ -107,22 +107,34 @@ function scoreOne(outlook: Outlook, correction: Correction, side: Side): Scored 
   return { correction, side, score, probability, serves, row };
 }
 
-/** Expected misfit removed at the best amount up to a cap, couplings included. */
-function bestGain({ layout, marginals }: Outlook, { vector }: Correction, side: Side, capMm: number): number {
-  const moves = vector.flatMap(({ dimension, perMm }) => {
+/**
+ * Expected misfit removed at the best amount up to a cap. A coupling is no reason to make a change: what it mends counts
+ * only as far as evidence, not the prior, speaks for it; what it spoils counts in full.
+ */
+function bestGain(
+  { layout, marginals, prior }: Outlook,
+  { vector }: Correction,
+  side: Side,
+  capMm: number,
+): number {
+  const moves = vector.flatMap(({ dimension, perMm, coupling }) => {
     const at = layout.index.dimensions.get(dimension)!;
-    return variablesFor(layout, at, side).map((variable) => ({ at, belief: marginals[variable]!, perMm }));
+    return variablesFor(layout, at, side).map((variable) => (amountMm: number) => {
+      const byZ = (-perMm * amountMm) / layout.scaleMm[at]!;
+      const removed = (belief: Float64Array) =>
+        expectedMisfit(layout, at, belief, 0) - expectedMisfit(layout, at, belief, byZ);
+      const gain = removed(marginals[variable]!);
+      return coupling && gain > 0 ? Math.max(0, gain - Math.max(0, removed(prior[variable]!))) : gain;
+    });
   });
-  const misfit = (amountMm: number) =>
-    moves.reduce(
-      (sum, { at, belief, perMm }) =>
-        sum + expectedMisfit(layout, at, belief, (-perMm * amountMm) / layout.scaleMm[at]!),
-      0,
-    );
-  const before = misfit(0);
   let best = -Infinity;
-  for (let part = 1; part <= AMOUNTS_TRIED; part++)
-    best = Math.max(best, before - misfit((capMm * part) / AMOUNTS_TRIED));
+  for (let part = 1; part <= AMOUNTS_TRIED; part++) {
+    const amountMm = (capMm * part) / AMOUNTS_TRIED;
+    best = Math.max(
+      best,
+      moves.reduce((sum, gainOf) => sum + gainOf(amountMm), 0),
+    );
+  }
   return best;
 }
 
