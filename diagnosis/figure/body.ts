@@ -29,33 +29,58 @@ function mirrored(segments: readonly CubicSegment[]): CubicSegment[] {
   }));
 }
 
-/** The trunk above the waist up to the shoulders, closed inside the garment below it. */
-function frontTorso({ hip, waist }: Proportions): CubicSegment[] {
-  const waistHalf = 0.505 * waist;
-  const rib = 0.26 * waist + 0.26 * hip + 0.04;
-  const chest = 0.12 * waist + 0.42 * hip + 0.07;
+/** Half the width of the chest under the arms: between the waist and the hip, steadied by a constant frame. */
+function chestHalf({ hip, waist }: Proportions): number {
+  return 0.16 * waist + 0.34 * hip + 0.1;
+}
+
+/** The trunk above the waist up to the neck, closed inside the garment below it. */
+function frontTorso(proportions: Proportions): CubicSegment[] {
+  const waistHalf = 0.495 * proportions.waist;
+  const chest = chestHalf(proportions);
+  const rib = 0.5 * waistHalf + 0.5 * chest - 0.015;
   const right: Place[] = [
-    [0.16, -1.98], [0.19, -1.84], [0.5, -1.72], [chest + 0.12, -1.58], [chest + 0.06, -1.3], [chest - 0.01, -1.02],
-    [chest - 0.03, -0.8], [rib, -0.42], [waistHalf + 0.012, -0.12], [waistHalf, 0.02], [waistHalf + 0.02, 0.2],
+    [0.17, -2.02], [0.18, -1.86], [0.36, -1.74], [chest + 0.1, -1.6], [chest + 0.07, -1.34], [chest + 0.01, -1.1],
+    [chest - 0.005, -0.85], [rib, -0.45], [waistHalf + 0.01, -0.14], [waistHalf, 0], [waistHalf - 0.02, 0.1],
+    [waistHalf - 0.16, 0.16],
   ]; // prettier-ignore
   const left = right.map(([x, y]): Place => [-x, y]).reverse();
   return closedCurve([...right, ...left]);
 }
 
-/** The arm on the left of the body, hanging a little away from it, the hand at rest. */
+/** The middle line of the arm: shoulder, elbow and wrist, hanging clear of the hip. */
+function armAxis(proportions: Proportions): { shoulder: Place; elbow: Place; wrist: Place } {
+  const waistHalf = 0.505 * proportions.waist;
+  const chest = chestHalf(proportions);
+  return {
+    shoulder: [chest + 0.12, -1.45],
+    elbow: [Math.max(chest + 0.23, waistHalf + 0.3), -0.42],
+    wrist: [Math.max(chest + 0.3, standingWidths(proportions).hipHalf + 0.27, waistHalf + 0.38), 0.4],
+  };
+}
+
+/** The arm on the left of the body, the hand at rest with its thumb toward the front. */
 function frontArm(proportions: Proportions): CubicSegment[] {
-  const { hip, waist } = proportions;
-  const chest = 0.12 * waist + 0.42 * hip + 0.07;
-  const shoulder = chest + 0.1;
-  const elbow = Math.max(chest + 0.24, 0.505 * waist + 0.27);
-  const wrist = Math.max(standingWidths(proportions).hipHalf + 0.25, 0.505 * waist + 0.36);
+  const { shoulder, elbow, wrist } = armAxis(proportions);
+  const [sx, ex, wx] = [shoulder[0], elbow[0], wrist[0]];
+  const [upper, fore] = [0.5 * sx + 0.5 * ex, 0.65 * ex + 0.35 * wx];
   return closedCurve([
-    [shoulder - 0.1, -1.5], [shoulder + 0.06, -1.56], [shoulder + 0.17, -1.38], [shoulder + 0.2, -1.1],
-    [elbow + 0.1, -0.42], [elbow + 0.16, -0.1], [wrist + 0.1, 0.3], [wrist + 0.075, 0.46], [wrist + 0.125, 0.62],
-    [wrist + 0.12, 0.82], [wrist + 0.085, 0.97], [wrist + 0.035, 1.06], [wrist - 0.01, 1.05], [wrist - 0.03, 0.92],
-    [wrist - 0.045, 0.8], [wrist - 0.07, 0.86], [wrist - 0.105, 0.82], [wrist - 0.1, 0.68], [wrist - 0.085, 0.52],
-    [wrist - 0.075, 0.42], [wrist - 0.1, 0.26], [elbow - 0.135, -0.12], [elbow - 0.14, -0.42], [shoulder - 0.1, -1.05],
-    [shoulder - 0.13, -1.25],
+    [sx - 0.06, -1.6], [sx + 0.1, -1.54], [sx + 0.17, -1.36], [upper + 0.155, -0.92], [ex + 0.125, -0.5],
+    [ex + 0.135, -0.34], [fore + 0.135, -0.08], [wx + 0.09, 0.27], [wx + 0.075, 0.42], [wx + 0.098, 0.54],
+    [wx + 0.115, 0.7], [wx + 0.108, 0.84], [wx + 0.085, 0.96], [wx + 0.045, 1.045], [wx, 1.05], [wx - 0.028, 0.98],
+    [wx - 0.042, 0.86], [wx - 0.06, 0.86], [wx - 0.098, 0.87], [wx - 0.125, 0.8], [wx - 0.12, 0.68], [wx - 0.1, 0.54],
+    [wx - 0.082, 0.42], [wx - 0.088, 0.26], [fore - 0.125, -0.1], [ex - 0.115, -0.4], [upper - 0.135, -0.85],
+    [sx - 0.14, -1.18], [sx - 0.16, -1.4],
+  ]); // prettier-ignore
+}
+
+/** An arm bent out of the way, the hand on the chest, seen from the side: nothing hangs before the garment. */
+function foldedArm({ waist, hip }: Proportions): CubicSegment[] {
+  const reach = 0.14 * (0.5 * waist + 0.5 * hip) + 0.31;
+  return closedCurve([
+    [-0.14, -1.56], [-0.2, -1.36], [-0.17, -1.06], [-0.1, -0.8], [-0.02, -0.68], [0.09, -0.66], [0.2, -0.74],
+    [reach - 0.04, -1.03], [reach + 0.03, -1.2], [reach + 0.02, -1.36], [reach - 0.08, -1.38], [reach - 0.15, -1.2],
+    [0.16, -0.98], [0.13, -1.1], [0.14, -1.36], [0.06, -1.56], [-0.04, -1.62],
   ]); // prettier-ignore
 }
 
@@ -88,19 +113,20 @@ function standingFoot(view: 'front' | 'back', proportions: Proportions): CubicSe
     ]); // prettier-ignore
   }
   return closedCurve([
-    [x - 0.105, y - 0.14], [x - 0.115, y], [x - 0.14, y + 0.12], [x - 0.155, y + 0.24], [x - 0.12, y + 0.32],
-    [x - 0.02, y + 0.345], [x + 0.12, y + 0.335], [x + 0.225, y + 0.29], [x + 0.23, y + 0.22], [x + 0.16, y + 0.1],
-    [x + 0.115, y - 0.02], [x + 0.11, y - 0.14],
+    [x - 0.1, y - 0.14], [x - 0.105, y], [x - 0.13, y + 0.1], [x - 0.16, y + 0.2], [x - 0.165, y + 0.28],
+    [x - 0.13, y + 0.335], [x - 0.06, y + 0.35], [x + 0.03, y + 0.345], [x + 0.11, y + 0.325], [x + 0.17, y + 0.29],
+    [x + 0.195, y + 0.24], [x + 0.18, y + 0.17], [x + 0.14, y + 0.08], [x + 0.11, y - 0.02], [x + 0.105, y - 0.14],
   ]); // prettier-ignore
 }
 
 function sideTorso({ waist, hip, front }: Proportions): CubicSegment[] {
   const girth = 0.5 * waist + 0.5 * hip;
+  const belly = 0.345 * waist + 0.025 * front;
   return closedCurve([
-    [0.1, -1.98], [0.12, -1.82], [0.26, -1.62], [0.25 + 0.15 * girth, -1.25], [0.22 + 0.19 * girth, -0.85],
-    [0.12 + 0.26 * waist, -0.4], [0.35 * waist + 0.02 * front, -0.06], [0.35 * waist + 0.02 * front, 0.2],
-    [-0.345 * waist, 0.2], [-0.35 * waist, -0.06], [-0.1 - 0.27 * waist, -0.4], [-0.2 - 0.26 * girth, -0.9],
-    [-0.22 - 0.26 * girth, -1.3], [-0.36, -1.6], [-0.2, -1.8], [-0.16, -1.98],
+    [0.13, -2.02], [0.12, -1.84], [0.2, -1.62], [0.2 + 0.16 * girth, -1.25], [0.18 + 0.18 * girth, -0.9],
+    [0.14 + 0.22 * waist + 0.01 * front, -0.42], [belly, -0.1], [belly, 0.08], [belly - 0.16, 0.18],
+    [-0.345 * waist + 0.16, 0.16], [-0.345 * waist, 0.04], [-0.345 * waist, -0.12], [-0.1 - 0.265 * waist, -0.42],
+    [-0.2 - 0.235 * girth, -0.9], [-0.21 - 0.24 * girth, -1.3], [-0.34, -1.6], [-0.19, -1.82], [-0.17, -2.02],
   ]); // prettier-ignore
 }
 
@@ -120,6 +146,7 @@ export function bodyShapes(view: FigureView, proportions: Proportions): BodyShap
     return [
       { part: 'foot', segments: sideFoot(-0.07, hemY) },
       { part: 'torso', segments: sideTorso(proportions) },
+      { part: 'arm', segments: foldedArm(proportions) },
     ];
   }
   if (view === 'seated') {
@@ -127,6 +154,7 @@ export function bodyShapes(view: FigureView, proportions: Proportions): BodyShap
     return [
       { part: 'foot', segments: sideFoot(legs.kneeFrontX - 0.32, legs.floorY - 0.265) },
       { part: 'torso', segments: sideTorso(proportions) },
+      { part: 'arm', segments: foldedArm(proportions) },
     ];
   }
   const leg = frontLeg(proportions);

@@ -81,6 +81,7 @@ export function inflated(mask: Field, depth: number): Field {
       }
     }
   }
+  for (let x = 0; x < width; x += 1) u[x] = u[width + x]!;
   const low: Field = { width, height, data: u.map((value) => Math.sqrt(2 * value) * SHRINK * depth) };
   const smooth = blurred(low, 1.2);
   const full = emptyField(mask.width, mask.height);

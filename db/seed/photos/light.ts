@@ -1,9 +1,9 @@
 import { sampled, type Field } from './field';
 
 /** A lamp from the side, a little above: folds show in raking light and vanish in a flash. Unit vector, y downward, z to the camera. */
-const LAMP = { x: -0.66, y: -0.3, z: 0.69 };
-const AMBIENT = 0.4;
-const LAMP_STRENGTH = 0.68;
+const LAMP = { x: -0.72, y: -0.3, z: 0.626 };
+const AMBIENT = 0.34;
+const LAMP_STRENGTH = 0.78;
 const FILL_STRENGTH = 0.12;
 const SHADOW_STEPS = 14;
 const SHADOW_STEP_PX = 4;

@@ -21,17 +21,23 @@ function wallShadow(body: Field): Field {
   return blurred(moved, 34);
 }
 
-/** The shadow on the floor: what stands just above it, flattened. */
+/** The shadow on the floor: darkest where the feet touch it, thinning away from the lamp. */
 function floorShadow(body: Field, floorPx: number): Field {
   const flat = emptyField(body.width, body.height);
-  for (let y = Math.floor(floorPx) - FLOOR_DEPTH_PX; y < body.height; y += 1) {
-    for (let x = 40; x < body.width; x += 1) {
-      const above = Math.round(floorPx - 12 - Math.abs(y - floorPx) * 2.2);
-      const lean = Math.round(18 + (floorPx - above) * 0.35);
-      flat.data[y * body.width + x] = body.data[above * body.width + Math.max(0, x - lean)]!;
+  const touching = Math.round(floorPx) - 10;
+  for (let depth = -26; depth < 40; depth += 1) {
+    const y = Math.round(floorPx) + depth;
+    for (let x = 0; x < body.width; x += 1) {
+      let cover = 0;
+      for (let away = 0; away <= 120; away += 6) {
+        const from = x - away - Math.round(depth * 0.6);
+        if (from < 0) break;
+        cover = Math.max(cover, body.data[touching * body.width + from]! * (1 - away / 150));
+      }
+      flat.data[y * body.width + x] = cover * (depth < 0 ? 1 + depth / 40 : 1 - depth / 60);
     }
   }
-  return blurred(flat, 11);
+  return blurred(flat, 12);
 }
 
 type Box = { left: number; right: number; top: number };
@@ -65,7 +71,7 @@ export function paintRoom(scene: Scene, body: Field, seed: number): Buffer {
       const isFloor = y >= floorTop;
       const isSkirting = !isFloor && y >= floorTop - SKIRTING_PX;
       const ledge = isSkirting && y < floorTop - SKIRTING_PX + 3 ? 0.9 : 1;
-      const shadow = isFloor ? onFloor.data[i]! * 0.5 : onWall.data[i]! * 0.3;
+      const shadow = isFloor ? onFloor.data[i]! * 0.62 : onWall.data[i]! * 0.3;
       let light = fall * ledge * (1 - shadow) * (1 + mottle.data[i]! * 0.012 + grain.data[i]! * 0.012);
       let colour: readonly number[] = isFloor ? FLOOR : WALL;
       if (isFloor) light *= 1 + boards.data[i]! * 0.035 - (y - floorTop < 4 ? 0.22 : 0);

@@ -23,8 +23,8 @@ export type Scene = {
 export function sceneOf(view: FigureView, proportions: Proportions): Scene {
   const floorPx = PHOTO_HEIGHT_PX * FLOOR_FROM_TOP;
   const floor = floorY(view, proportions);
-  const unitPx = Math.min(298, floorPx / (floor + 1.16));
-  const middleX = view === 'seated' ? 0.62 : 0;
+  const unitPx = Math.min(view === 'seated' ? 372 : 300, floorPx / (floor + 1.12));
+  const middleX = view === 'seated' ? 0.56 : 0;
   const direction = pictureDirection(view);
   const toPixel = ({ x, y }: FigurePoint) => ({
     x: PHOTO_WIDTH_PX / 2 + direction * (x - middleX) * unitPx,

@@ -10,7 +10,7 @@ export type Cloth = 'muslin' | 'grey-wool' | 'linen';
 type Colour = readonly [red: number, green: number, blue: number];
 
 const CLOTHS: Record<Cloth, { colour: Colour; weave: number; line: Colour; stitch: Colour }> = {
-  muslin: { colour: [238, 226, 202], weave: 1, line: [62, 84, 128], stitch: [186, 78, 44] },
+  muslin: { colour: [224, 211, 186], weave: 1, line: [62, 84, 128], stitch: [186, 78, 44] },
   'grey-wool': { colour: [122, 124, 131], weave: 1.7, line: [236, 236, 230], stitch: [240, 214, 150] },
   linen: { colour: [206, 190, 158], weave: 1.8, line: [58, 66, 84], stitch: [170, 66, 52] },
 };
@@ -40,11 +40,11 @@ function clothRelief({ scene, folds, tube, torso, seams, seed }: Layers): Field 
   const whole = emptyField(width, height);
   whole.data.forEach((_, i) => (whole.data[i] = Math.max(tube.data[i]!, torso.data[i]!)));
   const relief = inflated(whole, scene.view === 'front' || scene.view === 'back' ? 0.72 : 0.62);
-  const wide = softNoise(width, height, 120, 1.6, seed + 1);
+  const wide = softNoise(width, height, 110, 2.6, seed + 1);
   const narrow = softNoise(width, height, 46, 2.1, seed + 2);
   const sunk = blurred(seams, 3);
   relief.data.forEach((_, i) => {
-    relief.data[i]! += wide.data[i]! * 3.2 + narrow.data[i]! * 0.9 - sunk.data[i]! * 6;
+    relief.data[i]! += wide.data[i]! * 4.6 + narrow.data[i]! * 0.9 - sunk.data[i]! * 6;
   });
   addFolds(relief, folds);
   return blurred(relief, 1.4);

@@ -26,19 +26,15 @@ export function softNoise(
   return field;
 }
 
-/** Brightness of a plain weave about 1: warp and weft, uneven threads, a little grain. `strength` 1 is an unbleached muslin. */
+/** Brightness of a plain weave about 1: threads that swell and thin along their length, slubs, a little grain. `strength` 1 is an unbleached muslin. */
 export function weave(width: number, height: number, strength: number, seed: number): Field {
   const random = seededRandom(seed);
-  const thread = () => (random() + random() - 1) * 0.022;
-  const warp = Float32Array.from({ length: width }, thread);
-  const weft = Float32Array.from({ length: height }, thread);
+  const weft = softNoise(width, height, 26, 0.085, seed + 1);
+  const warp = softNoise(width, height, 2.2, 14, seed + 2);
   const field = emptyField(width, height);
-  for (let y = 0; y < height; y += 1) {
-    for (let x = 0; x < width; x += 1) {
-      const crossing = (x + y) % 2 === 0 ? 0.012 : -0.012;
-      const grain = (random() - 0.5) * 0.05;
-      field.data[y * width + x] = 1 + strength * (warp[x]! + weft[y]! + crossing + grain);
-    }
+  for (let i = 0; i < field.data.length; i += 1) {
+    const grain = (random() - 0.5) * 0.05;
+    field.data[i] = 1 + strength * (weft.data[i]! * 0.022 + warp.data[i]! * 0.018 + grain);
   }
   return field;
 }
