@@ -49,7 +49,7 @@ function frontTorso(proportions: Proportions): CubicSegment[] {
 }
 
 /** The middle line of the arm: shoulder, elbow and wrist, hanging clear of the hip. */
-function armAxis(proportions: Proportions): { shoulder: Place; elbow: Place; wrist: Place } {
+export function armAxis(proportions: Proportions): { shoulder: Place; elbow: Place; wrist: Place } {
   const waistHalf = 0.505 * proportions.waist;
   const chest = chestHalf(proportions);
   return {
