@@ -7,6 +7,8 @@ import { QUEUES } from '@/lib/jobs/queues';
 import { ROLE_GRANTS } from './grants';
 
 const LOCK = 7_235_551; // any constant: two migrations at once wait for each other
+/** pg-boss makes this one itself when it starts to keep times; the worker's role may not make tables. */
+const SCHEDULER_QUEUE = '__pgboss__send-it';
 
 /** Brings the database named by `ownerUrl` to the newest schema: tables, the job queue's own schema, what each role may do. Safe to repeat. */
 export async function migrateDatabase(ownerUrl: string): Promise<void> {
@@ -18,7 +20,11 @@ export async function migrateDatabase(ownerUrl: string): Promise<void> {
     });
     const boss = new PgBoss({ connectionString: ownerUrl, max: 1, supervise: false, schedule: false });
     await boss.start();
-    for (const queue of QUEUES) await boss.createQueue(queue.name, queue);
+    for (const queue of QUEUES) {
+      await boss.createQueue(queue.name, queue);
+      await boss.updateQueue(queue.name, queue); // making one that is there already changes nothing
+    }
+    await boss.createQueue(SCHEDULER_QUEUE);
     await boss.stop({ graceful: false, wait: true });
     await client.unsafe(ROLE_GRANTS);
   } finally {

@@ -14,26 +14,30 @@ export const passwordSchema = z
   .refine((text) => new TextEncoder().encode(text).length <= PASSWORD_BYTES_MAX, 'At most 200 bytes.')
   .refine((text) => !COMMON.has(text.toLowerCase()), 'That one is among the first that anyone would try.');
 
+const NAME_LETTERS_MIN = 4; // shorter names before the @ stand in many words by chance
+const holdsAddress = (password: string, email: string): boolean => {
+  const name = email.split('@')[0] ?? '';
+  return password.includes(email) || (name.length >= NAME_LETTERS_MIN && password.includes(name));
+};
+
 export const signUpSchema = z
   .object({
     displayName: z.string().trim().min(1, 'A name, initials or a made-up name.').max(80),
     email: emailSchema,
     password: passwordSchema,
   })
-  .refine(
-    ({ email, password }) =>
-      !password.toLowerCase().includes(email.split('@')[0] ?? ' ') || password.length > 24,
-    {
-      path: ['password'],
-      message: 'Choose one that does not hold your address.',
-    },
-  );
+  .refine(({ email, password }) => !holdsAddress(password.toLowerCase(), email), {
+    path: ['password'],
+    message: 'Choose one that does not hold your address.',
+  });
 
-/** Only a path of our own is followed after signing in: `//elsewhere` and `https:` are not. */
+const HERE = 'http://here.invalid';
+
+/** Only a path of our own is followed after signing in: `//elsewhere` and `https:` are not, nor what becomes one, like `/a/..//elsewhere`. */
 export const ownPath = (value: unknown): string => {
-  if (typeof value !== 'string' || !/^\/[A-Za-z0-9]/.test(value)) return '/journals';
-  const parsed = URL.parse(value, 'http://here.invalid');
-  return parsed?.origin === 'http://here.invalid' ? `${parsed.pathname}${parsed.search}` : '/journals';
+  const parsed = typeof value === 'string' ? URL.parse(value, HERE) : null;
+  const path = parsed?.origin === HERE ? `${parsed.pathname}${parsed.search}` : '';
+  return /^\/[A-Za-z0-9]/.test(path) ? path : '/journals';
 };
 
 export const signInSchema = z.object({

@@ -8,7 +8,7 @@ import { db, type Executor } from '../client';
 import { sessions } from '../schema/sessions';
 import { users } from '../schema/users';
 import { recordAudit } from './audit';
-import { consumeToken, issueToken } from './tokens';
+import { consumeToken, voidTokens } from './tokens';
 
 interface Account {
   userId: string;
@@ -18,8 +18,8 @@ interface Account {
 const byEmail = (email: string) => and(eq(users.email, email), isNull(users.deletedAt));
 
 async function sendVerification(tx: Executor, account: Account): Promise<void> {
-  const token = await issueToken(tx, account.userId, 'verify-email', account.email);
-  await enqueueMail(tx, account, 'verify-email', verifyLetter(env().APP_ORIGIN, token));
+  await voidTokens(tx, account.userId, 'verify-email');
+  await enqueueMail(tx, account, 'verify-email', verifyLetter(env().APP_ORIGIN));
 }
 
 /** A new account, or a letter to the one that is there: whoever asks learns nothing of it. */
@@ -76,19 +76,19 @@ export async function resendVerification(account: Account): Promise<void> {
   await db().transaction((tx) => sendVerification(tx, account));
 }
 
-/** Whose address the link confirmed; null when the link does not hold. */
-export async function verifyEmail(secret: string): Promise<string | null> {
+/** Whose address the link confirmed, and the password that stands; null when the link does not hold. */
+export async function verifyEmail(secret: string): Promise<{ userId: string; passwordHash: string } | null> {
   return db().transaction(async (tx) => {
     const token = await consumeToken(tx, secret, 'verify-email');
     if (!token) return null;
-    const rows = await tx
+    const [account] = await tx
       .update(users)
       .set({ emailVerifiedAt: sql`coalesce(${users.emailVerifiedAt}, now())` })
       .where(and(eq(users.id, token.userId), eq(users.email, token.email), isNull(users.deletedAt)))
-      .returning({ id: users.id });
-    if (rows.length === 0) return null;
+      .returning({ userId: users.id, passwordHash: users.passwordHash });
+    if (!account) return null;
     await recordAudit(tx, { actorId: token.userId, verb: 'update', objectKind: 'user', objectId: token.userId, fields: ['emailVerifiedAt'] }); // prettier-ignore
-    return token.userId;
+    return account;
   });
 }
 
@@ -100,8 +100,8 @@ export async function askForReset(email: string): Promise<void> {
       .from(users)
       .where(byEmail(email));
     if (!account) return;
-    const token = await issueToken(tx, account.userId, 'reset-password', email);
-    await enqueueMail(tx, account, 'reset-password', resetLetter(env().APP_ORIGIN, token));
+    await voidTokens(tx, account.userId, 'reset-password');
+    await enqueueMail(tx, account, 'reset-password', resetLetter(env().APP_ORIGIN));
   });
 }
 
@@ -122,7 +122,7 @@ export async function resetPassword(secret: string, passwordHash: string): Promi
       .returning({ id: users.id });
     if (rows.length === 0) return null;
     await tx.delete(sessions).where(eq(sessions.userId, userId));
-    await enqueueMail(tx, { userId, email }, 'password-changed', passwordChangedLetter());
+    await enqueueMail(tx, { userId, email }, 'password-changed', passwordChangedLetter(env().APP_ORIGIN));
     await recordAudit(tx, {
       actorId: userId,
       verb: 'update',

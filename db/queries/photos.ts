@@ -37,6 +37,12 @@ export function listPhotos(viewer: Viewer, roundId: string) {
 }
 export type PhotoDto = Awaited<ReturnType<typeof listPhotos>>[number];
 
+/** The photos of a round; null when the round is not in sight, which is not the same as having none. */
+export async function findPhotos(viewer: Viewer, roundId: string): Promise<PhotoDto[] | null> {
+  const seen = await roundIds(and(roundVisibleTo(viewer), eq(rounds.id, roundId)));
+  return seen.length > 0 ? listPhotos(viewer, roundId) : null;
+}
+
 /**
  * Whether these very pictures may be served: the photo is in sight and the revision is the one that stands.
  * @param audience the master, which is the photo to keep, goes to its owner; the smaller pictures to whoever may look

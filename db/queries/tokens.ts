@@ -5,9 +5,21 @@ import type { Executor } from '../client';
 import { tokens } from '../schema/tokens';
 
 const MINUTES = { 'verify-email': 24 * 60, 'reset-password': 30, 'change-email': 24 * 60 } as const;
-type TokenKind = keyof typeof MINUTES;
+export type TokenKind = keyof typeof MINUTES;
+export const isTokenKind = (kind: string): kind is TokenKind => kind in MINUTES;
 
-/** A link's secret for one purpose; the one before of the same kind is void from now on. */
+/** Whatever links of this kind are out are void from now on. */
+export async function voidTokens(tx: Executor, userId: string, kind: TokenKind): Promise<void> {
+  await tx
+    .update(tokens)
+    .set({ usedAt: sql`now()` })
+    .where(and(eq(tokens.userId, userId), eq(tokens.kind, kind), isNull(tokens.usedAt)));
+}
+
+/**
+ * A link's secret for one purpose. It is made when the letter is sent, never before: until then nothing that could be used
+ * stands anywhere, and a letter that was held up does not arrive run out.
+ */
 export async function issueToken(
   tx: Executor,
   userId: string,
@@ -15,7 +27,6 @@ export async function issueToken(
   email: string,
 ): Promise<string> {
   const secret = makeSecret();
-  await tx.delete(tokens).where(and(eq(tokens.userId, userId), eq(tokens.kind, kind)));
   await tx.insert(tokens).values({
     userId,
     kind,
@@ -44,5 +55,7 @@ export async function consumeToken(
       ),
     )
     .returning({ userId: tokens.userId, email: tokens.email });
-  return row ?? null;
+  if (!row) return null;
+  await voidTokens(tx, row.userId, kind); // a letter sent twice after a crash carries two: one use ends both
+  return row;
 }

@@ -7,7 +7,9 @@ import { sessions } from '@/db/schema/sessions';
 import { users } from '@/db/schema/users';
 import { hashSecret, makeSecret } from './secret';
 
+const DAY_MS = 86_400_000;
 const IDLE_DAYS = 14;
+const REFRESH_DAYS = 1; // Lucia by itself moves the idle end only in its second half, and would end sessions after 7 idle days
 export const ABSOLUTE_DAYS = 60;
 
 declare module 'lucia' {
@@ -18,8 +20,10 @@ declare module 'lucia' {
   }
 }
 
+const makeAdapter = () => new DrizzlePostgreSQLAdapter(db(), sessions, users);
+
 function makeLucia() {
-  return new Lucia(new DrizzlePostgreSQLAdapter(db(), sessions, users), {
+  return new Lucia(makeAdapter(), {
     sessionExpiresIn: new TimeSpan(IDLE_DAYS, 'd'),
     getSessionAttributes: ({ endsAt }) => ({ endsAt }),
     getUserAttributes: (user): Omit<Viewer, 'userId'> & { isAllowedIn: boolean } => ({
@@ -42,7 +46,7 @@ const auth = () => (lucia ??= makeLucia());
 /** A new session; the secret goes into the cookie and nowhere else. */
 export async function beginSession(userId: string, userAgent: string, now: Date): Promise<string> {
   const secret = makeSecret();
-  const endsAt = new Date(now.getTime() + ABSOLUTE_DAYS * 86_400_000);
+  const endsAt = new Date(now.getTime() + ABSOLUTE_DAYS * DAY_MS);
   const attributes = { endsAt, userAgent: userAgent.slice(0, 200) };
   await auth().createSession(userId, attributes, { sessionId: hashSecret(secret) });
   return secret;
@@ -55,6 +59,9 @@ export async function viewerOfSecret(secret: string, now: Date): Promise<Viewer 
   if (session.endsAt <= now || !user.isAllowedIn) {
     await auth().invalidateSession(session.id);
     return null;
+  }
+  if (session.expiresAt.getTime() - now.getTime() < (IDLE_DAYS - REFRESH_DAYS) * DAY_MS) {
+    await makeAdapter().updateSessionExpiration(session.id, new Date(now.getTime() + IDLE_DAYS * DAY_MS));
   }
   const { id: userId, isAllowedIn: _isAllowedIn, ...viewer } = user;
   return { userId, ...viewer };

@@ -1,5 +1,8 @@
 import 'server-only';
 
+/** Stands in a letter until it is sent; only then is the secret of its link made. */
+export const LINK_SECRET = '%link-secret%';
+
 export interface MailBody {
   subject: string;
   textBody: string;
@@ -13,12 +16,16 @@ const escape = (text: string) =>
   );
 
 /** A letter of a few sentences and at most one link. Subjects say that something waits, never what of a body it is about. */
-function letter(subject: string, paragraphs: string[], link?: { words: string; href: string }): MailBody {
-  const close = 'If this was not you, nothing has happened and you can leave it.';
-  const lines = [...paragraphs, ...(link ? [`${link.words}:\n${link.href}`] : []), close];
+function letter(
+  subject: string,
+  paragraphs: string[],
+  link: { words: string; href: string },
+  close = 'If this was not you, nothing has happened and you can leave it.',
+): MailBody {
+  const lines = [...paragraphs, `${link.words}:\n${link.href}`, close];
   const html = [
     ...paragraphs.map((text) => `<p>${escape(text)}</p>`),
-    ...(link ? [`<p><a href="${escape(link.href)}">${escape(link.words)}</a></p>`] : []),
+    `<p><a href="${escape(link.href)}">${escape(link.words)}</a></p>`,
     `<p>${escape(close)}</p>`,
   ].join('\n');
   return {
@@ -28,23 +35,23 @@ function letter(subject: string, paragraphs: string[], link?: { words: string; h
   };
 }
 
-export const verifyLetter = (origin: string, token: string): MailBody =>
+export const verifyLetter = (origin: string): MailBody =>
   letter(
     'Confirm your address for Ruckle',
     ['Open this page and press the button to confirm your address. The link holds for 24 hours.'],
     {
       words: 'Confirm my address',
-      href: `${origin}/verify?token=${token}`,
+      href: `${origin}/verify?token=${LINK_SECRET}`,
     },
   );
 
-export const resetLetter = (origin: string, token: string): MailBody =>
+export const resetLetter = (origin: string): MailBody =>
   letter(
     'Choose a new password for Ruckle',
     ['Open this page to choose a new password. The link holds for 30 minutes.'],
     {
       words: 'Choose a new password',
-      href: `${origin}/reset?token=${token}`,
+      href: `${origin}/reset?token=${LINK_SECRET}`,
     },
   );
 
@@ -60,7 +67,10 @@ export const alreadyLetter = (origin: string): MailBody =>
     },
   );
 
-export const passwordChangedLetter = (): MailBody =>
-  letter('Your Ruckle password was changed', [
-    'Your password was changed just now, and every other session was ended.',
-  ]);
+export const passwordChangedLetter = (origin: string): MailBody =>
+  letter(
+    'Your Ruckle password was changed',
+    ['Your password was changed just now, and every other session was ended.'],
+    { words: 'Choose another password', href: `${origin}/forgot` },
+    'If this was not you, choose another password at once: only this mailbox can.',
+  );

@@ -1,24 +1,52 @@
 import 'server-only';
 import { createTransport, type Transporter } from 'nodemailer';
-import { findUnsentMail, markMailSent } from '@/db/queries/mails';
+import {
+  findUnsentMail,
+  issueLinkSecret,
+  markMailRefused,
+  markMailSent,
+  type UnsentMail,
+} from '@/db/queries/mails';
 import { env } from '@/lib/env';
+import { LINK_SECRET } from './compose';
 
 let transport: Transporter | undefined;
 
-/** Sends one letter. It is marked only once the host has taken it: a crash in between sends the same Message-ID again, never another. */
-export async function sendMail(mailId: string): Promise<void> {
-  const mail = await findUnsentMail(mailId);
-  if (!mail) return;
+async function handOver(mail: UnsentMail): Promise<void> {
   transport ??= createTransport({ url: env().SMTP_URL, connectionTimeout: 10_000, socketTimeout: 20_000 });
+  const secret = await issueLinkSecret(mail);
+  const filled = (body: string) => (secret ? body.replaceAll(LINK_SECRET, secret) : body);
   await transport.sendMail({
     from: env().MAIL_FROM,
     to: { name: '', address: mail.toEmail },
     subject: mail.subject,
-    text: mail.textBody,
-    html: mail.htmlBody,
+    text: filled(mail.textBody),
+    html: filled(mail.htmlBody),
     messageId: mail.messageId,
     disableFileAccess: true,
     disableUrlAccess: true,
   });
+}
+
+/** A refusal for good (RFC 5321 4.2.1: 5yz), as against a host that is down or asks to come later. */
+const isRefusal = (thrown: unknown): boolean =>
+  thrown instanceof Error &&
+  'responseCode' in thrown &&
+  typeof thrown.responseCode === 'number' &&
+  thrown.responseCode >= 500;
+
+/**
+ * Sends one letter. It is marked only once the host has taken it: a crash in between sends the same Message-ID again, never another.
+ * @throws whatever kept it from being handed over just now; the job then tries again
+ */
+export async function sendMail(mailId: string): Promise<void> {
+  const mail = await findUnsentMail(mailId);
+  if (!mail) return;
+  try {
+    await handOver(mail);
+  } catch (thrown) {
+    if (!isRefusal(thrown)) throw thrown;
+    return markMailRefused(mailId);
+  }
   await markMailSent(mailId);
 }

@@ -5,6 +5,9 @@ import { Server } from 'node:http';
  * own. Whatever a client sent under that name is overwritten, so it cannot be forged.
  */
 const HEADER = 'x-ruckle-client';
+// Tells lib/request/client-address.ts that the header is ours: a server started without this file believes nobody's.
+globalThis[Symbol.for('ruckle.client-address')] = true;
+
 const emit = Server.prototype.emit;
 
 Server.prototype.emit = function (event, ...args) {

@@ -6,7 +6,7 @@ import { afterAll, beforeAll } from 'vitest';
 import { migrateDatabase } from '@/db/migrate';
 
 const LOCK = 6_114_902; // any constant: two runs do not make the same template at once
-const SOURCES = ['db/migrations', 'db/grants.ts', 'lib/jobs/queues.ts'];
+const SOURCES = ['db/migrations', 'db/migrate.ts', 'db/grants.ts', 'lib/jobs/queues.ts'];
 
 interface TestDatabase {
   /** Speaks to the file's database as its owner: to look behind the application's back. */
@@ -75,7 +75,7 @@ const ENVIRONMENT = {
  * afterwards. The application's modules reach it under the role that serves people.
  * @param environment what the file wants set differently; the rest leads to closed ports
  */
-export function useDatabase(environment: Record<string, string> = {}): TestDatabase {
+export function databaseOfFile(environment: Record<string, string> = {}): TestDatabase {
   const name = `ruckle_test_${randomBytes(6).toString('hex')}`;
   const made = {} as TestDatabase;
   beforeAll(async () => {

@@ -10,6 +10,7 @@ let sent = new Headers();
 
 /** One person's browser: what it holds and what it sends. Starts with an empty jar. */
 export function newBrowser(headers: Record<string, string> = {}): Map<string, string> {
+  Reflect.set(globalThis, Symbol.for('ruckle.client-address'), true); // as the server's own part says of itself
   jar.clear();
   sent = new Headers({
     origin: 'http://127.0.0.1:4321',

@@ -83,8 +83,9 @@ export async function restorePhoto(photoId: string): Promise<Response> {
   return POST(request, context({ photoId }));
 }
 
-export async function listed(roundId: string): Promise<PhotoDto[]> {
+export async function listPhotosOf(roundId: string): Promise<Response> {
   const { GET } = await import('@/app/api/rounds/[roundId]/photos/route');
-  const response = await GET(new Request(`${ORIGIN}/api/rounds/${roundId}/photos`), context({ roundId }));
-  return response.json();
+  return GET(new Request(`${ORIGIN}/api/rounds/${roundId}/photos`), context({ roundId }));
 }
+
+export const listed = async (roundId: string): Promise<PhotoDto[]> => (await listPhotosOf(roundId)).json();

@@ -15,8 +15,8 @@ interface TestStore {
   server: Server;
 }
 
-/** Call it after `useDatabase`: a photo store of the file's own, empty, with its bucket, gone afterwards. */
-export function useStore(): TestStore {
+/** Call it after `databaseOfFile`: a photo store of the file's own, empty, with its bucket, gone afterwards. */
+export function storeOfFile(): TestStore {
   const made = {} as TestStore;
   beforeAll(async () => {
     const folder = mkdtempSync(join(tmpdir(), 'ruckle-store-'));

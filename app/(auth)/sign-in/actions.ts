@@ -5,13 +5,14 @@ import { ownPath, signInSchema } from '@/components/account/account-schema';
 import { findForSignIn, resendVerification } from '@/db/queries/accounts';
 import { verifyPassword } from '@/lib/auth/password';
 import { signInAs } from '@/lib/auth/sign-in';
-import { giveBack, takePoint } from '@/lib/limits/limit';
+import { clearPoints, giveBack, takePoint } from '@/lib/limits/limit';
 import { formAction } from '@/lib/request/action';
 import { clientAddress } from '@/lib/request/client-address';
 import { waitSentence } from '@/lib/request/wait-sentence';
 
 export const signIn = formAction(signInSchema, async ({ email, password, next }, request) => {
-  const wait = await takePoint('sign-in', [`account ${email}`, `address ${clientAddress(request)}`]);
+  const [byAccount, byAddress] = [`account ${email}`, `address ${clientAddress(request)}`];
+  const wait = await takePoint('sign-in', [byAddress, byAccount]);
   if (wait) return { message: waitSentence(wait) };
   const account = await findForSignIn(email);
   const isRight = await verifyPassword(account?.passwordHash ?? null, password);
@@ -23,7 +24,7 @@ export const signIn = formAction(signInSchema, async ({ email, password, next },
     if (!(await takePoint('mail', [`account ${email}`]))) await resendVerification(account);
     return { message: 'Your address is not confirmed yet. A new link is on its way to it.' };
   }
-  await giveBack('sign-in', `account ${email}`);
+  await Promise.all([clearPoints('sign-in', byAccount), giveBack('sign-in', byAddress)]);
   await signInAs(account.userId, request);
   return redirect(ownPath(next) as Route);
 });

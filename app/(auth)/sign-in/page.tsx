@@ -8,7 +8,7 @@ import { signIn } from './actions';
 export const metadata: Metadata = { title: 'Sign in' };
 
 export default async function SignInPage({ searchParams }: PageProps<'/sign-in'>) {
-  const { next } = await searchParams;
+  const { next, confirmed } = await searchParams;
   const foot = (
     <span className="flex flex-wrap justify-between gap-4">
       <Link href="/sign-up" className="text-chalk underline">
@@ -20,7 +20,11 @@ export default async function SignInPage({ searchParams }: PageProps<'/sign-in'>
     </span>
   );
   return (
-    <AccountPage title="Sign in" foot={foot}>
+    <AccountPage
+      title="Sign in"
+      lead={confirmed ? 'Your address is confirmed. Sign in with the password you chose.' : undefined}
+      foot={foot}
+    >
       <SignInForm action={signIn} next={ownPath(next)} />
     </AccountPage>
   );

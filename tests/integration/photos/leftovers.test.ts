@@ -3,17 +3,17 @@ import { dirname, join } from 'node:path';
 import { randomUUID } from 'node:crypto';
 import { beforeAll, describe, expect, it, vi } from 'vitest';
 import type { Viewer } from '@/db/queries/viewer';
-import { useDatabase } from '../../support/database';
+import { databaseOfFile } from '../../support/database';
 import { phoneJpeg } from '../../support/jpegs';
 import { makeRound, makeViewer } from '../../support/people';
 import { addedPhoto, getPicture, removePhoto, sendPhoto } from '../../support/photo-requests';
-import { useStore } from '../../support/store';
+import { storeOfFile } from '../../support/store';
 
 const asking = vi.hoisted(() => ({ viewer: null as Viewer | null }));
 vi.mock('@/lib/auth/viewer', () => ({ currentViewer: async () => asking.viewer }));
 
-const database = useDatabase();
-const store = useStore();
+const database = databaseOfFile();
+const store = storeOfFile();
 const HOUR_MS = 3_600_000;
 
 let roundId: string;

@@ -1,19 +1,19 @@
 import { createHash, randomUUID } from 'node:crypto';
 import { beforeAll, describe, expect, it, vi } from 'vitest';
 import type { Viewer } from '@/db/queries/viewer';
-import { useDatabase } from '../../support/database';
+import { databaseOfFile } from '../../support/database';
 import { HOSTILE_FILES } from '../../support/hostile-files';
 import { paddedTo } from '../../support/jpeg-segments';
 import { phoneJpeg } from '../../support/jpegs';
 import { makeRound, makeViewer } from '../../support/people';
 import { addedPhoto, listed, sendPhoto } from '../../support/photo-requests';
-import { useStore } from '../../support/store';
+import { storeOfFile } from '../../support/store';
 
 const asking = vi.hoisted(() => ({ viewer: null as Viewer | null }));
 vi.mock('@/lib/auth/viewer', () => ({ currentViewer: async () => asking.viewer }));
 
-const database = useDatabase();
-const store = useStore();
+const database = databaseOfFile();
+const store = storeOfFile();
 
 const MEGABYTE = 1024 * 1024;
 const sha256 = (bytes: Buffer) => createHash('sha256').update(bytes).digest('hex');

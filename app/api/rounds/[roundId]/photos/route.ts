@@ -1,13 +1,14 @@
 import { z } from 'zod';
 import { uploadQuerySchema } from '@/components/photos/photo-schema';
-import { listPhotos } from '@/db/queries/photos';
+import { findPhotos } from '@/db/queries/photos';
 import { receivePhoto } from '@/lib/photos/receive-photo';
 import { route } from '@/lib/request/route';
+import { orNotFound } from '@/lib/request/written';
 
 const params = z.object({ roundId: z.uuid() });
 
-export const GET = route({ access: 'viewer', params }, ({ viewer, params }) =>
-  listPhotos(viewer, params.roundId),
+export const GET = route({ access: 'viewer', params }, async ({ viewer, params }) =>
+  orNotFound(await findPhotos(viewer, params.roundId)),
 );
 
 export const POST = route(

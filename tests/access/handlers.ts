@@ -1,0 +1,134 @@
+import { v7 } from 'uuid';
+import { anySignedIn, everyone, only } from './roles';
+import type { HandlerRow } from './row';
+import { smallJpeg } from './small-jpeg';
+
+type Rest = Pick<HandlerRow, 'path' | 'access' | 'body' | 'hasFiles'>;
+const handler = (method: HandlerRow['method'], file: string, rest: Rest): HandlerRow => ({
+  kind: 'handler',
+  method,
+  file: `app/api/${file}/route.ts`,
+  ...rest,
+});
+
+const own = anySignedIn('signed-out');
+const owner = only('signed-out', 'owner');
+const readers = only('signed-out', 'owner', 'reader', 'fitter');
+const fitters = only('signed-out', 'owner', 'fitter');
+
+const wearer = { name: 'Bea', isSelf: true, isUnder18: false, fittedFor: 'standing', wornBeneath: '', shape: [], consentsMeasure: false, consentsPhotograph: false, consentsShare: false, consentOn: null }; // prettier-ignore
+const pattern = { name: 'Narrow legs', maker: '', clothKind: 'woven', stretchPercent: 0, notes: '' };
+const preferences = { displayName: 'Bea', unit: 'in', words: 'us', hidesMeasurements: false, isFitter: false, isPatternMaker: false }; // prettier-ignore
+
+const WEARERS = [
+  handler('GET', 'wearers', { path: () => '/api/wearers', access: own }),
+  handler('POST', 'wearers', { path: () => '/api/wearers', access: own, body: () => ({ id: v7(), wearer }) }),
+  handler('PATCH', 'wearers/[wearerId]', {
+    path: ({ wearerId }) => `/api/wearers/${wearerId}`,
+    access: owner,
+    body: () => ({ version: 1, wearer }),
+  }),
+  handler('DELETE', 'wearers/[wearerId]', {
+    path: ({ wearerId }) => `/api/wearers/${wearerId}`,
+    access: owner,
+  }),
+  handler('POST', 'wearers/[wearerId]/measurements', {
+    path: ({ wearerId }) => `/api/wearers/${wearerId}/measurements`,
+    access: owner,
+    body: () => ({ id: v7(), measuredOn: '2026-01-02', takenAlone: true, waistPlace: 'navel', note: '', unit: 'cm', values: [{ measure: 'hip', typed: '102' }] }), // prettier-ignore
+  }),
+];
+
+const PATTERNS = [
+  handler('GET', 'patterns', { path: () => '/api/patterns', access: own }),
+  handler('POST', 'patterns', { path: () => '/api/patterns', access: own, body: () => ({ id: v7(), pattern }) }),
+  handler('PATCH', 'patterns/[patternId]', {
+    path: ({ patternId }) => `/api/patterns/${patternId}`,
+    access: owner,
+    body: () => ({ version: 1, pattern }),
+  }),
+  handler('DELETE', 'patterns/[patternId]', { path: ({ patternId }) => `/api/patterns/${patternId}`, access: owner }),
+]; // prettier-ignore
+
+const JOURNALS = [
+  handler('GET', 'journals', { path: () => '/api/journals', access: own }),
+  handler('POST', 'journals', {
+    path: () => '/api/journals',
+    access: owner, // for the owner's wearer and draft
+    body: ({ wearerId, draftId }) => ({ id: v7(), name: 'Linen', wearerId, patternDraftId: draftId }),
+  }),
+  handler('PATCH', 'journals/[journalId]', {
+    path: ({ journalId }) => `/api/journals/${journalId}`,
+    access: owner,
+    body: () => ({ version: 1, name: 'Other' }),
+  }),
+  handler('DELETE', 'journals/[journalId]', { path: ({ journalId }) => `/api/journals/${journalId}`, access: owner }),
+  handler('POST', 'journals/[journalId]/rounds', {
+    path: ({ journalId }) => `/api/journals/${journalId}/rounds`,
+    access: owner,
+    body: () => ({ id: v7(), begun: 're-baste', wornOn: null }),
+  }),
+]; // prettier-ignore
+
+const ROUNDS = [
+  handler('PATCH', 'rounds/[roundId]', {
+    path: ({ roundId }) => `/api/rounds/${roundId}`,
+    access: owner,
+    body: () => ({ version: 1, note: 'Seen in daylight.' }),
+  }),
+  handler('DELETE', 'rounds/[roundId]', { path: ({ roundId }) => `/api/rounds/${roundId}`, access: owner }),
+  handler('PUT', 'rounds/[roundId]/evidence', {
+    path: ({ roundId }) => `/api/rounds/${roundId}/evidence`,
+    access: fitters,
+    body: () => ({ signs: [], checks: [], causes: [] }),
+  }),
+  handler('POST', 'rounds/[roundId]/changes', {
+    path: ({ roundId }) => `/api/rounds/${roundId}/changes`,
+    access: owner,
+    body: () => ({ id: v7(), correction: 'other', side: 'both', basis: null, amount: null, reason: '' }),
+  }),
+  handler('PATCH', 'changes/[changeId]', {
+    path: ({ changeId }) => `/api/changes/${changeId}`,
+    access: owner,
+    body: () => ({ version: 1, reason: 'Because.' }),
+  }),
+  handler('DELETE', 'changes/[changeId]', { path: ({ changeId }) => `/api/changes/${changeId}`, access: owner }),
+]; // prettier-ignore
+
+const PHOTOS = [
+  handler('GET', 'rounds/[roundId]/photos', { path: ({ roundId }) => `/api/rounds/${roundId}/photos`, access: readers }),
+  handler('POST', 'rounds/[roundId]/photos', { path: ({ roundId }) => `/api/rounds/${roundId}/photos?key=${v7()}&view=front`, access: owner, body: smallJpeg }),
+  handler('GET', 'photos/[photoId]/[variant]', {
+    path: ({ photoId }) => `/api/photos/${photoId}/640?r=1`,
+    access: only('missing', 'owner', 'reader', 'fitter'),
+    hasFiles: true,
+  }),
+  handler('PATCH', 'photos/[photoId]', {
+    path: ({ photoId }) => `/api/photos/${photoId}`,
+    access: owner,
+    body: () => ({ version: 1, isMirrored: true }),
+  }),
+  handler('DELETE', 'photos/[photoId]', { path: ({ photoId }) => `/api/photos/${photoId}`, access: owner }),
+  handler('POST', 'photos/[photoId]/restore', { path: ({ photoId }) => `/api/photos/${photoId}/restore`, access: owner }),
+  handler('GET', 'photos/[photoId]/marks', { path: ({ photoId }) => `/api/photos/${photoId}/marks`, access: readers }),
+  handler('POST', 'photos/[photoId]/marks', {
+    path: ({ photoId }) => `/api/photos/${photoId}/marks`,
+    access: fitters,
+    body: () => ({ revision: 1, upserts: [], deletes: [] }),
+  }),
+]; // prettier-ignore
+
+const NOWHERE = (['GET', 'POST', 'PUT', 'PATCH', 'DELETE'] as const).map((method) =>
+  handler(method, '[...rest]', { path: () => '/api/no/such/address', access: only('signed-out') }),
+);
+
+export const HANDLER_ROWS: HandlerRow[] = [
+  ...NOWHERE,
+  handler('GET', 'health', { path: () => '/api/health', access: everyone }),
+  handler('PATCH', 'me', { path: () => '/api/me', access: own, body: () => preferences }),
+  ...WEARERS,
+  ...PATTERNS,
+  ...JOURNALS,
+  ...ROUNDS,
+  ...PHOTOS,
+];

@@ -1,0 +1,30 @@
+import { anySignedIn, everyone, only } from './roles';
+import type { PageRow } from './row';
+
+const page = (file: string, path: PageRow['path'], access: PageRow['access']): PageRow => ({ kind: 'page', file: `app/${file}/page.tsx`, path, access }); // prettier-ignore
+const own = anySignedIn('sign-in');
+const owner = only('sign-in', 'owner');
+const readers = only('sign-in', 'owner', 'reader', 'fitter');
+
+export const PAGE_ROWS: PageRow[] = [
+  page('(public)', () => '/', everyone),
+  page('(auth)/sign-in', () => '/sign-in', everyone),
+  page('(auth)/sign-up', () => '/sign-up', everyone),
+  page('(auth)/verify', () => '/verify', everyone),
+  page('(auth)/forgot', () => '/forgot', everyone),
+  page('(auth)/reset', () => '/reset', everyone),
+  page('dev/mail', () => '/dev/mail', everyone), // there only on the one machine that RUCKLE_LOCAL names
+  page('(studio)/settings', () => '/settings', own),
+  page('(studio)/wearers', () => '/wearers', own),
+  page('(studio)/wearers/new', () => '/wearers/new', own),
+  page('(studio)/wearers/[wearerId]', ({ wearerId }) => `/wearers/${wearerId}`, owner),
+  page('(studio)/patterns', () => '/patterns', own),
+  page('(studio)/patterns/new', () => '/patterns/new', own),
+  page('(studio)/patterns/[patternId]', ({ patternId }) => `/patterns/${patternId}`, owner),
+  page('(studio)/journals', () => '/journals', own),
+  page('(studio)/journals/new', () => '/journals/new', own),
+  page('(studio)/journals/[journalId]', ({ journalId }) => `/journals/${journalId}`, readers),
+  page('(studio)/journals/[journalId]/compare', ({ journalId }) => `/journals/${journalId}/compare`, readers),
+  page('(studio)/journals/[journalId]/rounds/new', ({ journalId }) => `/journals/${journalId}/rounds/new`, owner),
+  page('(studio)/journals/[journalId]/rounds/[number]', ({ journalId }) => `/journals/${journalId}/rounds/1`, readers),
+]; // prettier-ignore

@@ -1,0 +1,85 @@
+import { createHash, randomBytes } from 'node:crypto';
+import type { Sql, TransactionSql } from 'postgres';
+import { v7 } from 'uuid';
+import { type Role, ROLES } from './roles';
+
+export interface World {
+  wearerId: string;
+  patternId: string;
+  draftId: string;
+  journalId: string;
+  roundId: string;
+  changeId: string;
+  photoId: string;
+  /** The secret of each role's session; none for who is signed out. */
+  sessions: Record<Role, string | null>;
+}
+
+type Ids = Omit<World, 'sessions'>;
+export const unknownIds = (): Ids => ({
+  wearerId: v7(),
+  patternId: v7(),
+  draftId: v7(),
+  journalId: v7(),
+  roundId: v7(),
+  changeId: v7(),
+  photoId: v7(),
+});
+
+const DAY_MS = 86_400_000;
+
+async function addPerson(tx: TransactionSql, role: Role): Promise<{ userId: string; secret: string }> {
+  const [userId, secret] = [v7(), randomBytes(32).toString('base64url')];
+  await tx`insert into users (id, email, email_verified_at, display_name, password_hash, is_admin, is_pattern_maker, is_fitter)
+    values (${userId}, ${`${userId}@example.org`}, now(), ${role}, 'none', ${role === 'admin'}, ${role === 'pattern maker'}, ${role === 'fitter'})`;
+  const inAWeek = new Date(Date.now() + 7 * DAY_MS);
+  await tx`insert into sessions (id, user_id, expires_at, ends_at)
+    values (${createHash('sha256').update(secret).digest('hex')}, ${userId}, ${inAWeek}, ${inAWeek})`;
+  return { userId, secret };
+}
+
+async function addThings(tx: TransactionSql, ownerId: string, ids: Ids): Promise<void> {
+  const muslinId = v7();
+  await tx`insert into wearers (id, owner_id, name) values (${ids.wearerId}, ${ownerId}, 'Ann')`;
+  await tx`insert into patterns (id, owner_id, name) values (${ids.patternId}, ${ownerId}, 'Wide legs')`;
+  await tx`insert into pattern_versions (id, pattern_id, ordinal) values (${ids.draftId}, ${ids.patternId}, 1)`;
+  await tx`insert into journals (id, owner_id, wearer_id, pattern_version_id, name)
+    values (${ids.journalId}, ${ownerId}, ${ids.wearerId}, ${ids.draftId}, 'Wool trousers')`;
+  await tx`insert into muslins (id, journal_id, ordinal) values (${muslinId}, ${ids.journalId}, 1)`;
+  await tx`insert into rounds (id, journal_id, muslin_id, number) values (${ids.roundId}, ${ids.journalId}, ${muslinId}, 1)`;
+  await tx`insert into rounds (id, journal_id, muslin_id, number, begun) values (${v7()}, ${ids.journalId}, ${muslinId}, 2, 're-baste')`;
+  await tx`insert into changes (id, round_id, author_id, correction, side)
+    values (${ids.changeId}, ${ids.roundId}, ${ownerId}, 'any', 'both')`;
+  await tx`insert into photos (id, round_id, upload_key, view, width_px, height_px, master_sha256, master_bytes)
+    values (${ids.photoId}, ${ids.roundId}, ${v7()}, 'front', 800, 1200, 'none', 1)`;
+}
+
+/** What each role holds on the journal: level, until when, whether taken back. */
+const GRANTS: Partial<Record<Role, { level: string; expiresInDays: number | null; isRevoked: boolean }>> = {
+  reader: { level: 'read', expiresInDays: null, isRevoked: false },
+  fitter: { level: 'fit', expiresInDays: 7, isRevoked: false },
+  revoked: { level: 'fit', expiresInDays: null, isRevoked: true },
+  expired: { level: 'fit', expiresInDays: -1, isRevoked: false },
+  'pattern maker': { level: 'share-to-test', expiresInDays: null, isRevoked: false },
+};
+
+/** An owner with one of everything, and one person in each role towards it; people and things are new each time. */
+export function makeWorld(sql: Sql): Promise<World> {
+  return sql.begin(async (tx) => {
+    const ids = unknownIds();
+    const people = new Map<Role, { userId: string; secret: string }>();
+    for (const role of ROLES) if (role !== 'anonymous') people.set(role, await addPerson(tx, role));
+    const ownerId = people.get('owner')?.userId ?? '';
+    await addThings(tx, ownerId, ids);
+    for (const [role, { userId }] of people) {
+      const grant = GRANTS[role];
+      if (!grant) continue;
+      const { level, expiresInDays, isRevoked } = grant;
+      const expiresAt = expiresInDays === null ? null : new Date(Date.now() + expiresInDays * DAY_MS);
+      await tx`insert into grants (id, subject_user_id, journal_id, level, granted_by, expires_at, revoked_at)
+        values (${v7()}, ${userId}, ${ids.journalId}, ${level}, ${ownerId}, ${expiresAt}, ${isRevoked ? new Date() : null})`;
+    }
+    const sessions = Object.fromEntries(ROLES.map((role) => [role, people.get(role)?.secret ?? null]));
+    return { ...ids, sessions: sessions as World['sessions'] };
+  });
+}
