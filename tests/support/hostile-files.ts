@@ -113,7 +113,7 @@ const HUGE_EXIF = Buffer.concat([
 ]);
 
 async function manySegments(marker: number, payload: Buffer): Promise<Buffer> {
-  let bytes = await jpeg();
+  let bytes: Buffer = await jpeg();
   for (let i = 0; i < 60; i += 1) bytes = withSegment(bytes, marker, payload);
   return bytes;
 }
