@@ -59,7 +59,7 @@ type Part = Omit<Reading, 'checks' | 'exact' | 'engine'>;
 /** Everything that follows from the beliefs alone. */
 function decide(ready: Fitting, fitting: Case, { marginals }: Solution): { part: Part; scored: Scored[] } {
   const { layout, tables } = ready;
-  const outlook = outlookOf(layout, fitting, marginals);
+  const outlook = outlookOf(ready, fitting, marginals);
   const { scored, spent } = scoreCorrections(outlook);
   const causes = causeRows(outlook);
   const { plan, muslin, leftOut } = planOf(outlook, scored, settleBefore(outlook, causes));

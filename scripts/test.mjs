@@ -1,108 +1,93 @@
 import { rmSync } from 'node:fs';
-import { ensureBuild } from './steps/build.mjs';
-import { databaseUrl, ensureCluster, removeCluster } from './steps/cluster.mjs';
-import { migrate } from './steps/database.mjs';
+import { PARTS } from './steps/all-parts.mjs';
+import { removeCluster } from './steps/cluster.mjs';
 import { foldersOf } from './steps/folders.mjs';
-import { describe, end } from './steps/identity.mjs';
+import { describe, end, isOurs } from './steps/identity.mjs';
 import { checkNode, ensurePackages } from './steps/machine.mjs';
 import { ensureModules } from './steps/modules.mjs';
 import { readRun, writeRun } from './steps/run-file.mjs';
-import { main, say } from './steps/say.mjs';
-import { startApplication, startStandIns } from './steps/services.mjs';
+import { endCommands } from './steps/run.mjs';
+import { complain, onStopSignal, say, Stop } from './steps/say.mjs';
 import { Supervisor } from './steps/supervise.mjs';
 
-/** Everything from the format to the browser, in order; `npm test -- unit browser` runs some of it. */
-await main(async () => {
-  checkNode();
-  await ensurePackages(['postgresql', 'chromium']);
-  await ensureModules();
-  const { check, playwright, vitest } = await import('./steps/parts.mjs');
+/** The parts that were asked for by name, in their order; all of them where none was. */
+function choose(names) {
+  const unknown = names.filter((name) => !PARTS.some((part) => part.name === name));
+  const known = PARTS.map(({ name }) => name).join(', ');
+  if (unknown.length > 0) throw new Stop(`No part is called ${unknown.join(', ')}. There are: ${known}.`);
+  return PARTS.filter(({ name }) => names.length === 0 || names.includes(name));
+}
 
+/** A place of its own for this run, emptied of the run before. */
+async function makeContext() {
   const folders = foldersOf('test');
   const before = readRun(folders.runFile);
+  if (before.supervisor && isOurs(before.supervisor))
+    throw new Stop('`npm test` runs in this clone already.');
   await Promise.all(before.processes.map((one) => end(one)));
   await removeCluster(folders);
   for (const path of [folders.objects, folders.mail, folders.runFile, folders.logs])
     rmSync(path, { recursive: true, force: true });
-  foldersOf('test'); // made anew, empty
-  const run = readRun(folders.runFile);
+  folders.make();
+  const run = { ...readRun(folders.runFile), supervisor: describe('test', process.pid) };
   const save = () => writeRun(folders.runFile, run);
+  save();
   const supervisor = new Supervisor(folders, (processes) => {
     run.processes = processes;
     save();
   });
-  run.supervisor = describe('test', process.pid);
-
-  const stopAll = async () => {
+  const stop = async () => {
+    endCommands();
     await supervisor.stop();
     await removeCluster(folders);
+    rmSync(folders.runFile, { force: true });
   };
-  for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP'])
-    process.on(signal, () => void stopAll().then(() => process.exit(130)));
+  return { folders, run, save, supervisor, stop };
+}
 
-  const database = async () => {
-    await ensureCluster(folders, run, { fast: true });
-    save();
-  };
-  const application = async () => {
-    await database();
-    await migrate(folders, run);
-    await startStandIns(supervisor, folders, run);
-    const origin = await startApplication(supervisor, folders, run, { withDemo: true, preferredPort: 0 });
-    return {
-      BASE_URL: origin,
-      MAIL_CATCHER_DIR: folders.mail,
-      RUN_JSON: folders.runFile,
-      STORE_DIR: folders.objects,
-      LOGS_DIR: folders.logs,
-      ADMIN_DATABASE_URL: databaseUrl(run, 'owner'),
-    };
-  };
-
-  const parts = [
-    check('format', [['prettier', '--check', '.']]),
-    check('lint', [['eslint', '.', '--max-warnings', '0']]),
-    check('types', [
-      ['next', 'typegen'],
-      ['tsc', '--noEmit'],
-    ]),
-    check('unused', [['knip']]),
-    vitest('unit', ['unit', 'components']),
-    vitest('integration', ['integration'], () => ({
-      TEST_DATABASE_OWNER_URL: databaseUrl(run, 'owner', 'postgres'),
-      TEST_DATABASE_APP_URL: databaseUrl(run, 'app', 'postgres'),
-      TEST_DATABASE_PURGE_URL: databaseUrl(run, 'purge', 'postgres'),
-    })),
-    { name: 'build', run: () => ensureBuild().then(() => ({ passed: 1, failed: 0 })) },
-    playwright('browser', application),
-  ];
-  const chosen = process.argv.slice(2);
-  const unknown = chosen.filter((name) => !parts.some((part) => part.name === name));
-  if (unknown.length > 0)
-    say(`There is no part called ${unknown.join(', ')}. Parts: ${parts.map(({ name }) => name).join(', ')}.`);
-
-  const total = { passed: 0, failed: unknown.length };
-  try {
-    for (const part of parts.filter(({ name }) => chosen.length === 0 || chosen.includes(name))) {
-      if (part.name === 'integration') await database();
-      if (part.name === 'browser') await ensureBuild();
-      const began = performance.now();
-      say(`\n— ${part.name}`);
-      const { passed, failed } = await part.run({ folders, run }).catch((thrown) => {
-        process.stderr.write(`${thrown.message}\n`);
-        return { passed: 0, failed: 1 };
-      });
-      const isEmpty = passed + failed === 0;
-      if (isEmpty) say(`  ${part.name} ran nothing: that is a failure.`);
-      total.passed += passed;
-      total.failed += failed + (isEmpty ? 1 : 0);
-      say(
-        `  ${part.name}: ${passed} passed, ${failed} failed, ${((performance.now() - began) / 1000).toFixed(0)} s`,
-      );
-    }
-  } finally {
-    await stopAll();
+async function runPart(part, context) {
+  const began = performance.now();
+  say(`\n— ${part.name}`);
+  const counts = await part.run(context).catch((thrown) => {
+    complain(thrown);
+    return { passed: 0, failed: 1 };
+  });
+  if (counts.passed + counts.failed === 0) {
+    say(`  ${part.name} ran nothing: that is a failure.`);
+    counts.failed = 1;
   }
-  say(`\n${total.passed} passed, ${total.failed} failed`);
-  process.exit(total.failed === 0 && total.passed > 0 ? 0 : 1);
-});
+  const seconds = ((performance.now() - began) / 1000).toFixed(0);
+  say(`  ${part.name}: ${counts.passed} passed, ${counts.failed} failed, ${seconds} s`);
+  return counts;
+}
+
+/** Everything from the format to the browser; `npm test -- unit browser` runs some of it. */
+async function testAll(total) {
+  checkNode();
+  const parts = choose(process.argv.slice(2));
+  const context = await makeContext();
+  let isStopping = false;
+  onStopSignal(() => {
+    isStopping = true;
+    void context.stop().then(() => process.exit(130));
+  });
+  await ensurePackages([...new Set(parts.flatMap(({ needs }) => needs))]);
+  await ensureModules();
+  for (const part of parts) {
+    const { passed, failed } = await runPart(part, context);
+    if (isStopping) await new Promise(() => {}); // the signal's own work ends us
+    total.passed += passed;
+    total.failed += failed;
+  }
+  await context.stop();
+}
+
+const total = { passed: 0, failed: 0 };
+try {
+  await testAll(total);
+} catch (thrown) {
+  complain(thrown);
+  total.failed += 1;
+}
+say(`\n${total.passed} passed, ${total.failed} failed`);
+process.exitCode = total.failed === 0 && total.passed > 0 ? 0 : 1;

@@ -1,4 +1,5 @@
 import { Figure } from '@/components/figure/Figure';
+import { REFERENCE_PROPORTIONS } from '@/diagnosis/figure/proportions';
 import { LinkButton } from '@/components/ui/LinkButton';
 
 /** What this is, in one breath, beside the figure. */
@@ -19,7 +20,7 @@ export function Opening() {
         </LinkButton>
       </div>
       <div className="mx-auto w-full max-w-72">
-        <Figure view="back" />
+        <Figure view="back" proportions={REFERENCE_PROPORTIONS} title="The back of a figure in trousers" />
       </div>
     </section>
   );

@@ -35,18 +35,19 @@ export interface CalibrationResult {
 /**
  * Calibration by simulation (Talts et al. 2018): needs drawn from the prior, evidence from the needs, and the needs' ranks
  * within their posteriors must be uniform. It tests the code, not the knowledge. Maskers are left out: they weigh an
- * absence by a belief and are no part of the drawn world.
+ * absence by a belief and are no part of the drawn world. With another `truth` the signs show by other strengths than are read.
  */
 export function calibrate(
   knowledge: Knowledge,
   strengths: Strengths,
   seed: number,
   fittings: number,
+  truth = strengths,
 ): CalibrationResult {
   const open = { ...knowledge, signs: knowledge.signs.map((sign) => ({ ...sign, maskedBy: [] })) };
   const random = new Random(seed);
   const empty = emptyCase(open);
-  const world = worldOf(open, empty, strengths);
+  const world = worldOf(open, empty, truth);
   const ranks = open.dimensions.map(() => Array.from({ length: RANK_BINS }, () => 0));
   const predictions: Prediction[] = [];
   const losses: { ours: number; naive: number }[] = [];

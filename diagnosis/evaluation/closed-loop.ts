@@ -1,6 +1,6 @@
 import type { Case, PastRound } from '../case-schema';
 import { startReading } from '../diagnose';
-import type { Correction, Knowledge } from '../garments/schema';
+import type { Correction, Grade, Knowledge } from '../garments/schema';
 import { variablesFor } from '../inference/layout';
 import type { Layout } from '../inference/layout';
 import { STRENGTHS } from '../inference/strengths';
@@ -9,7 +9,6 @@ import { emptyCase } from './calibration';
 import { drawNeeds, lookAtSigns, stateOf, worldOf } from './person';
 import type { World } from './person';
 import { Random } from './random';
-import type { Grade } from '../garments/schema';
 
 const ROUNDS_MAX = 20;
 const NOTICED = 0.8;
@@ -30,7 +29,13 @@ interface Proposal {
   amountMm: number;
 }
 
-type Fitter = (fitting: Case, world: World) => Proposal[];
+interface Answer {
+  proposals: Proposal[];
+  /** Causes that are no lengths and rank first: the person sees to them, and finds that they were not it. */
+  settled: string[];
+}
+
+type Fitter = (fitting: Case) => Answer;
 
 /** Hidden persons are fitted round after round by the reading's plan and by the first thing in the book, from the same starts. */
 export function closedLoop(
@@ -90,11 +95,13 @@ function fitOne(random: Random, world: World, start: readonly number[], fitter: 
   const empty = emptyCase(layout.index.knowledge);
   const history: PastRound[] = [];
   const toSolve = start.flatMap((z, v) => (z !== 0 ? [v] : []));
+  const absent: string[] = [];
   let taken = 0;
   while (taken < ROUNDS_MAX && toSolve.some((v) => isBeyond(layout, v, zs[v]!))) {
     const states = zs.map((z, v) => (layout.variables[v]!.kind === 'need' ? stateOf(z) : 0));
     const signs = lookAtSigns(random, world, states, NOTICED);
-    const proposals = fitter({ ...empty, signs, history }, world);
+    const { proposals, settled } = fitter({ ...empty, signs, history, causes: { present: [], absent } });
+    absent.push(...settled);
     const changes = proposals.map(({ correction, amountMm }) => {
       const madeMm = Math.max(0.5, amountMm + CUTTING_SD_MM * random.normal());
       apply(layout, zs, correction, madeMm);
@@ -122,12 +129,15 @@ function apply(layout: Layout, zs: number[], { vector }: Correction, amountMm: n
 
 /** Does what the reading plans. */
 function planFitter(knowledge: Knowledge): Fitter {
-  return (fitting) =>
-    startReading(knowledge, fitting).first.plan.flatMap(({ correction, amountMm }) =>
+  return (fitting) => {
+    const { plan, ranked } = startReading(knowledge, fitting).first;
+    const proposals = plan.flatMap(({ correction, amountMm }) =>
       amountMm === null
         ? []
         : [{ correction: knowledge.corrections.find(({ id }) => id === correction)!, amountMm }],
     );
+    return { proposals, settled: ranked.filter(({ kind }) => kind === 'cause').map(({ id }) => id) };
+  };
 }
 
 const GRADE_RANK: Record<Grade, number> = { defining: 0, strong: 1, usual: 2, sometimes: 3, rare: 4 };
@@ -150,9 +160,9 @@ function bookFitter(knowledge: Knowledge): Fitter {
         .filter((change) => change.correction === correction.id)
         .reduce((sum, { amountMm }) => sum + (amountMm ?? 0), 0);
       const amountMm = Math.min(amounts.firstMm, amounts.capTotalMm - madeMm);
-      if (amountMm > 0) return [{ correction, amountMm }];
+      if (amountMm > 0) return { proposals: [{ correction, amountMm }], settled: [] };
     }
-    return [];
+    return { proposals: [], settled: [] };
   };
 }
 

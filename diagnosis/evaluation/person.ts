@@ -28,13 +28,50 @@ export function drawStates(random: Random, { prior }: World): number[] {
   return prior.map((weights) => random.index(weights));
 }
 
-/** No cause, `count` needs well beyond their tolerance, all others 0; z per variable. */
+/** A need in one direction that shows somewhere and that some correction meets, with the most that it may be, z. */
+interface Curable {
+  variable: number;
+  sign: 1 | -1;
+  mostZ: number;
+}
+
+const NEED_MIN_Z = 0.8;
+const NEED_MAX_Z = 2.5;
+
+/** No cause, up to `count` needs well beyond their tolerance and within the reach of a correction's caps, all others 0; z per variable. */
 export function drawNeeds(random: Random, { layout }: World, count: number): number[] {
-  const needs = layout.variables.flatMap(({ kind }, variable) => (kind === 'need' ? [variable] : []));
   const zs = layout.variables.map(() => 0);
-  for (const variable of random.sample(needs, count))
-    zs[variable] = (random.chance(0.5) ? 1 : -1) * random.between(0.8, 2.5);
+  const used = new Set<number>();
+  for (const { variable, sign, mostZ } of random.shuffle(curableNeeds(layout))) {
+    if (used.size === count) break;
+    if (used.has(variable)) continue;
+    used.add(variable);
+    zs[variable] = sign * random.between(Math.min(NEED_MIN_Z, mostZ), mostZ);
+  }
   return zs;
+}
+
+function curableNeeds({ index, ofDimension, scaleMm, toleranceMm }: Layout): Curable[] {
+  const { knowledge } = index;
+  return knowledge.dimensions.flatMap(({ id }, dimension) =>
+    ([1, -1] as const).flatMap((sign): Curable[] => {
+      const direction = sign > 0 ? 'more' : 'less';
+      const shows = knowledge.signs.some(({ links }) =>
+        links.some((link) => link.to === id && link.direction === direction),
+      );
+      const reachMm = Math.max(
+        0,
+        ...knowledge.corrections.flatMap(({ amounts, vector }) =>
+          vector
+            .filter((entry) => entry.dimension === id && !entry.coupling && entry.perMm * sign > 0)
+            .map(({ perMm }) => (amounts ? amounts.capTotalMm * Math.abs(perMm) : 0)),
+        ),
+      );
+      const mostZ = Math.min(NEED_MAX_Z, reachMm / scaleMm[dimension]!);
+      const beyond = mostZ * scaleMm[dimension]! > 1.2 * toleranceMm[dimension]!;
+      return shows && beyond ? [{ variable: ofDimension[dimension]![0]!, sign, mostZ }] : [];
+    }),
+  );
 }
 
 /** The nearest state of a need's grid. */

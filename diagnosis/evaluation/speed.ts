@@ -55,9 +55,9 @@ function withSigns(knowledge: Knowledge, signs: readonly Sign[], random: Random)
 }
 
 function readOnly(knowledge: Knowledge, fitting: Case): void {
-  const { layout, tables, start } = prepare(knowledge, fitting, STRENGTHS);
-  const { marginals } = solveRound(layout, tables, start, fitting);
-  scoreCorrections(outlookOf(layout, fitting, marginals));
+  const ready = prepare(knowledge, fitting, STRENGTHS);
+  const { marginals } = solveRound(ready.layout, ready.tables, ready.start, fitting);
+  scoreCorrections(outlookOf(ready, fitting, marginals));
 }
 
 function timed(clock: () => number, work: () => unknown): number {

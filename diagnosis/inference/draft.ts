@@ -1,4 +1,4 @@
-import { GRID_REACH, GRID_SIZE, SD_MIN_Z, zAt } from './grid';
+import { GRID_REACH, GRID_SIZE, SD_MIN_Z, transpose, zAt } from './grid';
 import type { Finding, Network, Pair, Slot } from './network';
 
 /** A Gaussian on a weighted sum of needs, in millimetres. */
@@ -49,26 +49,39 @@ export interface Assembled {
 }
 
 /**
- * Turns gathered evidence into a network. A sum of two needs becomes their joint where neither is in another joint;
- * the other sums are left for messages.
+ * Turns gathered evidence into a network. A sum of two needs becomes their joint as long as the joints keep the shape of
+ * stars (one need with several others); the other sums are left for messages.
  */
 export function assemble(draft: Draft): Assembled {
-  const joints: Joint[] = draft.beliefs.pairs.map((pair) => ({ ...pair, logs: null }));
+  const joints = draft.beliefs.pairs.map((pair): Joint => ({ ...pair, logs: null }));
+  const kept = joints.length;
   const sums = draft.sums.filter((sum) => !joinAsPair(sum, joints));
-  const owned = new Set(draft.beliefs.pairs.flatMap(({ first, second }) => [first, second]));
   let logShift = 0;
+  const leaves = new Set(joints.slice(0, kept).map(({ second }) => second));
   const unary = draft.beliefs.marginals.map((belief, variable) => {
     const { weights, shift } = weightsOf(draft.logs[variable]!);
     logShift += shift;
-    return owned.has(variable) ? weights : weights.map((weight, state) => weight * belief[state]!);
+    // The joint of a leaf given its centre holds the leaf's own belief.
+    return leaves.has(variable) ? weights : weights.map((weight, state) => weight * belief[state]!);
   });
-  const pairs = joints.map(({ first, second, table, logs }): Pair => {
-    if (!logs) return { first, second, table };
-    const { weights, shift } = weightsOf(logs);
+  const pairs = joints.map((joint, place): Pair => {
+    const { first, second } = joint;
+    const table = place < kept ? givenCentre(joint.table, draft.beliefs.marginals[first]!) : joint.table;
+    if (!joint.logs) return { first, second, table };
+    const { weights, shift } = weightsOf(joint.logs);
     logShift += shift;
     return { first, second, table: weights.map((weight, i) => weight * table[i]!) };
   });
   return { network: { unary, pairs, ...layFindings(draft.findings, unary.length) }, logShift, sums };
+}
+
+/** P(leaf | centre), row by row. */
+function givenCentre(joint: Float64Array, centre: Float64Array): Float64Array {
+  const columns = joint.length / centre.length;
+  return joint.map((weight, i) => {
+    const whole = centre[Math.floor(i / columns)]!;
+    return whole > 0 ? weight / whole : 0;
+  });
 }
 
 /** Evidence of one kind never speaks more strongly than this, so that contradictory evidence leaves some belief (e^−200). */
@@ -106,18 +119,39 @@ interface Joint extends Pair {
 function joinAsPair({ terms, meanMm, sdMm }: SumFactor, joints: Joint[]): boolean {
   if (terms.length !== 2) return false;
   const [a, b] = terms as [SumFactor['terms'][number], SumFactor['terms'][number]];
-  const holds = ({ first, second }: Joint, variable: number) => first === variable || second === variable;
-  let joint = joints.find((one) => holds(one, a.variable) && holds(one, b.variable));
-  if (!joint) {
-    if (joints.some((one) => holds(one, a.variable) || holds(one, b.variable))) return false;
-    const table = new Float64Array(GRID_SIZE * GRID_SIZE).fill(1);
-    joint = { first: a.variable, second: b.variable, table, logs: null };
-    joints.push(joint);
-  }
+  const joint = jointOf(a.variable, b.variable, joints);
+  if (!joint) return false;
   const [rows, columns] = joint.first === a.variable ? [a, b] : [b, a];
   joint.logs ??= new Float64Array(GRID_SIZE * GRID_SIZE);
   addSumLogs(joint.logs, rows.perZ, columns.perZ, meanMm, sdMm);
   return true;
+}
+
+/** The joint of two variables, made where it keeps the shape of stars; undefined where it would not. */
+function jointOf(a: number, b: number, joints: Joint[]): Joint | undefined {
+  const made = joints.find(
+    ({ first, second }) => (first === a && second === b) || (first === b && second === a),
+  );
+  if (made) return made;
+  const pairsOf = (variable: number) =>
+    joints.filter((one) => one.first === variable || one.second === variable);
+  const [second, first] = pairsOf(b).length === 0 ? [b, a] : [a, b];
+  const held = pairsOf(first);
+  if (pairsOf(second).length > 0) return undefined;
+  const asLeaf = held.find((one) => one.second === first);
+  if (asLeaf && pairsOf(asLeaf.first).length > 1) return undefined;
+  if (asLeaf) turn(asLeaf);
+  const table = new Float64Array(GRID_SIZE * GRID_SIZE).fill(1);
+  const joint = { first, second, table, logs: null };
+  joints.push(joint);
+  return joint;
+}
+
+/** Makes the leaf of a lone pair its centre. */
+function turn(joint: Joint): void {
+  [joint.first, joint.second] = [joint.second, joint.first];
+  joint.table = transpose(joint.table);
+  joint.logs = joint.logs && transpose(joint.logs);
 }
 
 /** Adds the logarithm of a Gaussian on a sum; a mean out of reach lies at the end of what the grid reaches. */

@@ -1,5 +1,5 @@
 import { normalise } from './grid';
-import { groupTable, pairMarginal, singleMarginal } from './group-tables';
+import { groupTable, singleMarginal, starJoints } from './group-tables';
 import { groupsOf } from './network';
 import type { Finding, Group, Network, Posterior } from './network';
 import { orBackward, orProduct, orWeights } from './or-product';
@@ -41,9 +41,9 @@ export function eliminate(network: Network, order = orderOf(network)): Posterior
   };
   const unlinked = Float64Array.of(1);
   for (const group of groups) {
-    const at = walked.findIndex(({ step }) => step.group.variables[0] === group.variables[0]);
-    if (at >= 0) result.logWeight += collect(network, group, walked[at]!.local, weights[at]!, result, false);
-    else result.logWeight += collect(network, group, [], unlinked, result, true);
+    const at = walked.findIndex(({ step }) => step.group.centre === group.centre);
+    if (at >= 0) collect(network, group, walked[at]!.local, weights[at]!, result);
+    else result.logWeight += collect(network, group, [], unlinked, result);
   }
   return result;
 }
@@ -61,39 +61,31 @@ export function orderOf(network: Network): Order {
   return orderGroups(groupsOf(network), network.findings);
 }
 
-/** Stores the beliefs of a group and returns what it adds to the weight of the evidence (an unlinked group only). */
+/** Stores the beliefs of a group and returns the logarithm of its whole weight. */
 function collect(
   network: Network,
   group: Group,
   local: readonly number[],
   weights: Float64Array,
   result: Posterior,
-  counts: boolean,
 ): number {
-  if (group.pair < 0) {
-    const variable = group.variables[0]!;
-    const belief = singleMarginal(network, variable, local, weights, space);
+  if (group.pairs.length === 0) {
+    const belief = singleMarginal(network, group.centre, local, weights, space);
     const sum = normalise(belief);
-    result.marginals[variable] = belief;
-    return counts ? Math.log(sum) : 0;
+    result.marginals[group.centre] = belief;
+    return Math.log(sum);
   }
-  const joint = pairMarginal(network, group, local, weights, space);
-  const sum = normalise(joint);
-  const [first, second] = group.variables as [number, number];
-  result.joints[group.pair] = joint;
-  result.marginals[first] = marginOf(
-    joint,
-    network.unary[first]!.length,
-    network.unary[second]!.length,
-    true,
-  );
-  result.marginals[second] = marginOf(
-    joint,
-    network.unary[first]!.length,
-    network.unary[second]!.length,
-    false,
-  );
-  return counts ? Math.log(sum) : 0;
+  let whole = 0;
+  starJoints(network, group, local, weights, space).forEach((joint, place) => {
+    whole = Math.log(normalise(joint));
+    const pair = group.pairs[place]!;
+    const { second } = network.pairs[pair]!;
+    const [rows, columns] = [network.unary[group.centre]!.length, network.unary[second]!.length];
+    result.joints[pair] = joint;
+    result.marginals[group.centre] = marginOf(joint, rows, columns, true);
+    result.marginals[second] = marginOf(joint, rows, columns, false);
+  });
+  return whole;
 }
 
 function marginOf(joint: Float64Array, rows: number, columns: number, ofRows: boolean): Float64Array {

@@ -20,3 +20,8 @@ export function normalise(weights: Float64Array): number {
   for (let i = 0; i < weights.length; i++) weights[i]! /= sum;
   return sum;
 }
+
+/** A joint of two needs with rows and columns exchanged. */
+export function transpose(joint: Float64Array): Float64Array {
+  return joint.map((_, i) => joint[(i % GRID_SIZE) * GRID_SIZE + Math.floor(i / GRID_SIZE)]!);
+}

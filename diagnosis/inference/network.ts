@@ -18,7 +18,10 @@ export interface Finding {
   leak: Float64Array;
 }
 
-/** Two variables with a joint factor, row-major over (first, second). A variable is in one pair at the most. */
+/**
+ * Two variables with a joint factor, row-major over (first, second). Pairs form stars: variables that are `first` (centres)
+ * are never `second` (leaves), and a leaf is in one pair only.
+ */
 export interface Pair {
   first: number;
   second: number;
@@ -43,27 +46,22 @@ export interface Posterior {
   width: number;
 }
 
-/** Variables that are eliminated together, and the bits that they touch. */
+/** A star of variables that are eliminated together (mostly a single one), and the bits that they touch. */
 export interface Group {
-  variables: readonly number[];
-  /** Index into `pairs`, or −1. */
-  pair: number;
+  centre: number;
+  /** Places of its pairs in the network. */
+  pairs: readonly number[];
   bits: readonly number[];
 }
 
-/** Groups the variables of a network: each pair is one group, each other variable one of its own. */
-export function groupsOf(network: Network): Group[] {
-  const paired = new Set(network.pairs.flatMap((pair) => [pair.first, pair.second]));
-  const touched = (variables: number[]) => [
-    ...new Set(variables.flatMap((v) => network.slots[v]!.flatMap((slot) => slot.bits))),
-  ];
-  const pairs = network.pairs.map((pair, index) => {
-    const variables = [pair.first, pair.second];
-    return { variables, pair: index, bits: touched(variables) };
+/** Groups the variables of a network into stars: a centre with the leaves of its pairs, or one variable alone. */
+export function groupsOf({ unary, slots, pairs }: Network): Group[] {
+  const leaves = new Set(pairs.map(({ second }) => second));
+  return unary.flatMap((_, centre) => {
+    if (leaves.has(centre)) return [];
+    const own = pairs.flatMap(({ first }, place) => (first === centre ? [place] : []));
+    const variables = [centre, ...own.map((place) => pairs[place]!.second)];
+    const bits = new Set(variables.flatMap((variable) => slots[variable]!.flatMap((slot) => slot.bits)));
+    return [{ centre, pairs: own, bits: [...bits] }];
   });
-  const singles = network.unary
-    .map((_, variable) => variable)
-    .filter((variable) => !paired.has(variable))
-    .map((variable) => ({ variables: [variable], pair: -1, bits: touched([variable]) }));
-  return [...pairs, ...singles];
 }

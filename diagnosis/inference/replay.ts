@@ -1,6 +1,6 @@
 import type { Change, PastRound } from '../case-schema';
 import type { Beliefs } from './draft';
-import { GRID_SIZE, GRID_STEP, normalise } from './grid';
+import { GRID_SIZE, GRID_STEP, normalise, transpose } from './grid';
 import { variablesFor } from './layout';
 import type { Layout } from './layout';
 
@@ -108,13 +108,11 @@ function movedRows(table: Float64Array, shift: Shift | undefined): Float64Array 
   return transpose(out);
 }
 
-function transpose(table: Float64Array): Float64Array {
-  return table.map((_, i) => table[(i % GRID_SIZE) * GRID_SIZE + Math.floor(i / GRID_SIZE)]!);
-}
-
 function priorJoint(prior: Beliefs, first: number, second: number): Float64Array {
-  const own = prior.pairs.find((pair) => pair.first === first && pair.second === second);
-  if (own) return own.table;
+  for (const pair of prior.pairs) {
+    if (pair.first === first && pair.second === second) return pair.table;
+    if (pair.first === second && pair.second === first) return transpose(pair.table);
+  }
   const rows = prior.marginals[first]!;
   const columns = prior.marginals[second]!;
   return Float64Array.from(

@@ -1,27 +1,22 @@
 import type { Side } from '../case-schema';
 import type { Correction } from '../garments/schema';
 import { variablesFor } from '../inference/layout';
-import { ownAmount } from '../inference/replay';
-import type { CorrectionRow, Range } from '../reading';
-import { amountText } from './amount-text';
+import type { CorrectionRow } from '../reading';
+import { NO_AMOUNTS, amountsOf, limitsOf } from './amounts';
 import { expectedMisfit } from './misfit';
 import { tailAt } from './outlook';
 import type { Outlook, Tail } from './outlook';
-import { LIKELY_FROM, wordOf } from './words';
+import { wordOf } from './words';
 
 /** Amounts tried for the best admissible one, as parts of the cap. */
 const AMOUNTS_TRIED = 12;
-/** A first change takes two thirds of what is estimated. */
-const FIRST_SHARE = 2 / 3;
-/** Cost, in tolerances, of a change that was not needed, beside the misfit it makes: for any change, and per unit of risk. */
-const NEEDLESS_COST = 0.1;
-const RISK_COST = 0.3;
+/** Cost, in tolerances of the need served, of a change that was not needed, beside the misfit it makes: for any, and per unit of risk. */
+const NEEDLESS_COST = 0.04;
+const RISK_COST = 0.15;
 /** How much of a need is expected to go where the change is not a length. */
 const REMEDY_SHARE = 0.7;
 /** Left and right are one below this difference, mm (1/4 in). */
 const SIDES_APART_MM = 6;
-/** An estimate is firm when its likely range is no wider than this share of it. */
-const FIRM_SHARE = 0.8;
 
 /** A correction that was scored, with what planning needs beside the row. */
 export interface Scored {
@@ -96,7 +91,8 @@ function scoreOne(outlook: Outlook, correction: Correction, side: Side): Scored 
   const limits = limitsOf(outlook, correction, side);
   if (limits && limits.leftMm <= 0) return null;
   const gain = limits ? bestGain(outlook, correction, side, limits.capMm) : remedyGain(outlook, serves);
-  const score = gain - (NEEDLESS_COST + RISK_COST * correction.risk) * (1 - probability);
+  const loss = most ? outlook.layout.index.knowledge.dimensions[most.dimension]!.loss[most.direction] : 1;
+  const score = gain - loss * (NEEDLESS_COST + RISK_COST * correction.risk) * (1 - probability);
   const row: CorrectionRow = {
     correction: correction.id,
     name: correction.name,
@@ -111,67 +107,34 @@ function scoreOne(outlook: Outlook, correction: Correction, side: Side): Scored 
   return { correction, side, score, probability, serves, row };
 }
 
-const NO_AMOUNTS = {
-  amountMm: null,
-  amountText: null,
-  estimateMm: null,
-  basis: null,
-  firstMm: null,
-  capRoundMm: null,
-  capTotalMm: null,
-  beyond: null,
-};
-
-interface Limits {
-  firstMm: number;
-  capRoundMm: number;
-  capTotalMm: number;
-  /** What is left of the total cap after the rounds before. */
-  leftMm: number;
-  /** What this round may take at the most. */
-  capMm: number;
-}
-
-function limitsOf({ layout, fitting }: Outlook, { id, amounts }: Correction, side: Side): Limits | null {
-  if (!amounts) return null;
-  const factor = layout.factors[amounts.sizeLevel];
-  const [firstMm, capRoundMm, capTotalMm] = [amounts.firstMm, amounts.capRoundMm, amounts.capTotalMm].map(
-    (mm) => mm * factor,
-  ) as [number, number, number];
-  const madeMm = fitting.history
-    .flatMap(({ changes }) => changes)
-    .filter(
-      (change) =>
-        change.correction === id && (side === 'both' || change.side === 'both' || change.side === side),
-    )
-    .reduce((sum, change) => sum + ownAmount(layout, change), 0);
-  const leftMm = capTotalMm - madeMm;
-  // Rests below a hundredth of a millimetre come from adding, not from cutting.
-  return {
-    firstMm,
-    capRoundMm,
-    capTotalMm,
-    leftMm: leftMm > 0.01 ? leftMm : 0,
-    capMm: Math.min(capRoundMm, leftMm),
-  };
-}
-
-/** Expected misfit removed at the best amount up to a cap, couplings included. */
-function bestGain({ layout, marginals }: Outlook, { vector }: Correction, side: Side, capMm: number): number {
-  const moves = vector.flatMap(({ dimension, perMm }) => {
+/**
+ * Expected misfit removed at the best amount up to a cap. A coupling is no reason to make a change: what it mends counts
+ * only as far as evidence, not the prior, speaks for it; what it spoils counts in full.
+ */
+function bestGain(
+  { layout, marginals, prior }: Outlook,
+  { vector }: Correction,
+  side: Side,
+  capMm: number,
+): number {
+  const moves = vector.flatMap(({ dimension, perMm, coupling }) => {
     const at = layout.index.dimensions.get(dimension)!;
-    return variablesFor(layout, at, side).map((variable) => ({ at, belief: marginals[variable]!, perMm }));
+    return variablesFor(layout, at, side).map((variable) => (amountMm: number) => {
+      const byZ = (-perMm * amountMm) / layout.scaleMm[at]!;
+      const removed = (belief: Float64Array) =>
+        expectedMisfit(layout, at, belief, 0) - expectedMisfit(layout, at, belief, byZ);
+      const gain = removed(marginals[variable]!);
+      return coupling && gain > 0 ? Math.max(0, gain - Math.max(0, removed(prior[variable]!))) : gain;
+    });
   });
-  const misfit = (amountMm: number) =>
-    moves.reduce(
-      (sum, { at, belief, perMm }) =>
-        sum + expectedMisfit(layout, at, belief, (-perMm * amountMm) / layout.scaleMm[at]!),
-      0,
-    );
-  const before = misfit(0);
   let best = -Infinity;
-  for (let part = 1; part <= AMOUNTS_TRIED; part++)
-    best = Math.max(best, before - misfit((capMm * part) / AMOUNTS_TRIED));
+  for (let part = 1; part <= AMOUNTS_TRIED; part++) {
+    const amountMm = (capMm * part) / AMOUNTS_TRIED;
+    best = Math.max(
+      best,
+      moves.reduce((sum, gainOf) => sum + gainOf(amountMm), 0),
+    );
+  }
   return best;
 }
 
@@ -181,48 +144,4 @@ function remedyGain({ layout }: Outlook, serves: readonly Tail[]): number {
     const { loss } = layout.index.knowledge.dimensions[dimension]!;
     return sum + (REMEDY_SHARE * probability * loss[direction] * (meanMm - toleranceMm)) / toleranceMm;
   }, 0);
-}
-
-function amountsOf(outlook: Outlook, correction: Correction, serves: readonly Tail[], limits: Limits) {
-  const amounts = correction.amounts!;
-  const estimate = estimateOf(outlook, correction, serves);
-  const [lowMm, highMm] = estimate.rangeMm;
-  const firm =
-    !outlook.marksAlone &&
-    estimate.probability >= LIKELY_FROM &&
-    highMm - lowMm <= FIRM_SHARE * estimate.meanMm;
-  const wantedMm = firm ? estimate.meanMm : Math.min(limits.firstMm, FIRST_SHARE * estimate.meanMm);
-  const amountMm = Math.min(wantedMm, limits.capMm);
-  const tooFar = estimate.meanMm > limits.leftMm;
-  return {
-    amountMm,
-    amountText: amountText(amountMm, correction, outlook.fitting.unit),
-    estimateMm: estimate.rangeMm,
-    basis: amounts.basis,
-    firstMm: limits.firstMm,
-    capRoundMm: limits.capRoundMm,
-    capTotalMm: limits.capTotalMm,
-    beyond: tooFar ? beyondOf(correction) : null,
-  };
-}
-
-function beyondOf({ amounts }: Correction): 'another-size' | 'another-draft' {
-  return amounts!.sizeLevel === 'length' ? 'another-draft' : 'another-size';
-}
-
-/** What the served needs ask of this correction, in its own basis: the mean of their means, weighed by probability. */
-function estimateOf(outlook: Outlook, { vector }: Correction, serves: readonly Tail[]) {
-  const { index } = outlook.layout;
-  let weight = 0;
-  let meanMm = 0;
-  const rangeMm: Range = [0, 0];
-  for (const tail of serves) {
-    const { perMm } = vector.find(({ dimension }) => index.dimensions.get(dimension) === tail.dimension)!;
-    const share = Math.max(tail.probability, 1e-9);
-    weight += share;
-    meanMm += (share * tail.meanMm) / Math.abs(perMm);
-    for (const end of [0, 1] as const) rangeMm[end] += (share * tail.rangeMm[end]) / Math.abs(perMm);
-  }
-  const probability = serves.reduce((most, tail) => Math.max(most, tail.probability), 0);
-  return { probability, meanMm: meanMm / weight, rangeMm: rangeMm.map((end) => end / weight) as Range };
 }

@@ -6,7 +6,7 @@ import { POSSIBLE_FROM } from './words';
 
 const CHANGES_MAX = 3;
 /** A change less probable than this waits for a check, unless nothing else is planned. */
-const PLANNED_FROM = 0.35;
+const PLANNED_FROM = 0.25;
 const FIRST_GUESS_FROM = 0.15;
 /** What is left out is named down to this probability. */
 const NAMED_FROM = 0.2;

@@ -3,9 +3,12 @@ import { sql } from 'drizzle-orm';
 import PgBoss from 'pg-boss';
 import type { Executor } from '@/db/client';
 
-/** What is left out is null to PostgreSQL; an object goes as JSON text, for Drizzle's driver does not write it out. */
-const bound = (value: unknown) =>
-  value !== null && typeof value === 'object' ? JSON.stringify(value) : (value ?? null);
+/** As text that the database casts itself: a missing value is null, an object JSON, a moment its ISO form. */
+function bound(value: unknown): unknown {
+  if (value === undefined || value === null) return null;
+  if (value instanceof Date) return value.toISOString();
+  return typeof value === 'object' ? JSON.stringify(value) : value;
+}
 
 /** pg-boss writes `$1, $2 …`; the transaction takes them as bound values. */
 const inTransaction = (tx: Executor) => ({

@@ -22,8 +22,11 @@ export function foldersOf(kind) {
     runFile: join(data, 'run.json'),
     cluster: isRoot ? `/var/lib/postgresql/ruckle-${name}${suffix}` : join(data, 'postgres'),
     runsAsPostgres: isRoot,
+    make() {
+      for (const folder of [data, folders.logs, folders.mail, folders.objects])
+        mkdirSync(folder, { recursive: true, mode: 0o700 });
+    },
   };
-  for (const folder of [data, folders.logs, folders.mail, folders.objects])
-    mkdirSync(folder, { recursive: true, mode: 0o700 });
+  folders.make();
   return folders;
 }

@@ -2,11 +2,15 @@ import { existsSync, readdirSync } from 'node:fs';
 import { run } from './run.mjs';
 import { say, Stop } from './say.mjs';
 
+/** Whether a Node.js version is one that the pinned packages run on: 20.20 up to, not including, 25 (as package.json says). */
+export function isNodeSupported(version) {
+  const [major = 0, minor = 0] = version.split('.').map(Number);
+  return (major > 20 && major < 25) || (major === 20 && minor >= 20);
+}
+
 export function checkNode() {
-  const [major = 0, minor = 0] = process.versions.node.split('.').map(Number);
-  if (major < 20 || (major === 20 && minor < 20)) {
-    throw new Stop(`Ruckle needs Node.js 20.20 or newer; this is ${process.version}.`);
-  }
+  if (!isNodeSupported(process.versions.node))
+    throw new Stop(`Ruckle needs Node.js from 20.20 to 24; this is ${process.version}.`);
 }
 
 /** Where Debian keeps the database's programs; null when they are not installed. */
@@ -19,22 +23,26 @@ export function postgresPrograms() {
   return newest ? `${base}/${newest}/bin` : null;
 }
 
-const WANTED = {
+const IS_THERE = {
   postgresql: () => postgresPrograms() !== null,
   chromium: () => existsSync('/usr/bin/chromium'),
 };
+const missingOf = (names) => names.filter((name) => !IS_THERE[name]());
 
-/** Installs the Debian packages that are missing, or names the one command where this user may not. */
+/** Installs the Debian packages that are missing, or names the one command where that cannot be done here. */
 export async function ensurePackages(names) {
-  const missing = names.filter((name) => !WANTED[name]());
+  const missing = missingOf(names);
   if (missing.length === 0) return;
-  if (process.getuid?.() !== 0) {
-    throw new Stop(
-      `Missing on this machine: ${missing.join(', ')}. Run:\n  sudo apt-get install -y ${missing.join(' ')}\nthen start again.`,
-    );
+  const isRoot = process.getuid?.() === 0;
+  if (isRoot) {
+    say(`· installing ${missing.join(' and ')} …`);
+    const env = { ...process.env, DEBIAN_FRONTEND: 'noninteractive' };
+    await run('apt-get', ['update'], { env, allowFailure: true });
+    const args = ['install', '-y', '--no-install-recommends', ...missing];
+    await run('apt-get', args, { env, allowFailure: true });
   }
-  say(`· installing ${missing.join(' and ')} …`);
-  const env = { ...process.env, DEBIAN_FRONTEND: 'noninteractive' };
-  await run('apt-get', ['update'], { env, allowFailure: true });
-  await run('apt-get', ['install', '-y', '--no-install-recommends', ...missing], { env });
+  const still = missingOf(names);
+  if (still.length === 0) return;
+  const command = `${isRoot ? '' : 'sudo '}apt-get install -y ${still.join(' ')}`;
+  throw new Stop(`Missing on this machine: ${still.join(', ')}. Run this, then start again:\n  ${command}`);
 }

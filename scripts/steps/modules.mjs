@@ -10,6 +10,8 @@ export async function ensureModules() {
   const stampFile = join(ROOT, 'node_modules', '.ruckle-stamp');
   const stamp = stampOf(ROOT, ['package-lock.json', '.npmrc']);
   if (existsSync(stampFile) && readFileSync(stampFile, 'utf8') === stamp) return;
-  await timed('installing node modules', () => run('npm', ['ci', '--no-progress'], { cwd: ROOT }));
+  // What builds is a development dependency: wanted even where NODE_ENV says production.
+  const args = ['ci', '--include=dev', '--no-progress'];
+  await timed('installing node modules', () => run('npm', args, { cwd: ROOT }));
   writeFileSync(stampFile, stamp);
 }

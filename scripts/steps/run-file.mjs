@@ -1,5 +1,5 @@
 import { randomBytes } from 'node:crypto';
-import { existsSync, readFileSync, renameSync, writeFileSync } from 'node:fs';
+import { closeSync, fsyncSync, openSync, readFileSync, renameSync, writeSync } from 'node:fs';
 
 const secret = () => randomBytes(24).toString('base64url');
 
@@ -17,17 +17,21 @@ const freshRun = () => ({
   stamps: {},
 });
 
-/** What a run must remember from one start to the next: its secrets, ports, processes and stamps. Readable by its user only. */
+/** What a run must remember from one start to the next: its secrets, ports, processes and stamps. Missing or damaged is as new. */
 export function readRun(file) {
-  if (!existsSync(file)) return freshRun();
   try {
     return { ...freshRun(), ...JSON.parse(readFileSync(file, 'utf8')) };
-  } catch {
-    return freshRun();
+  } catch (thrown) {
+    if (thrown.code === 'ENOENT' || thrown instanceof SyntaxError) return freshRun();
+    throw thrown;
   }
 }
 
+/** Readable by its user only; whole or not at all, and on the disk: without its secrets the database cannot be opened. */
 export function writeRun(file, run) {
-  writeFileSync(`${file}.new`, `${JSON.stringify(run, null, 2)}\n`, { mode: 0o600 });
+  const out = openSync(`${file}.new`, 'w', 0o600);
+  writeSync(out, `${JSON.stringify(run, null, 2)}\n`);
+  fsyncSync(out);
+  closeSync(out);
   renameSync(`${file}.new`, file);
 }

@@ -1,14 +1,31 @@
 import { spawn } from 'node:child_process';
 import { once } from 'node:events';
+import { signalGroup } from './identity.mjs';
 import { Stop } from './say.mjs';
+
+const running = new Set();
+
+/** Ends whatever command is being run, with all it has started: we are stopping. */
+export function endCommands() {
+  for (const child of running) signalGroup(child.pid, 'SIGTERM');
+}
 
 /**
  * Runs a command to its end.
  * @param options.quiet keeps its output back unless it fails
- * @returns what it printed on standard output
+ * @param options.input what it is given on standard input
+ * @returns its exit code and what it printed on standard output
  */
-export async function run(command, args, { quiet = true, allowFailure = false, ...options } = {}) {
-  const child = spawn(command, args, { stdio: ['ignore', 'pipe', 'pipe'], ...options });
+export async function run(
+  command,
+  args,
+  { quiet = true, allowFailure = false, input = '', ...options } = {},
+) {
+  // A group of its own: Ctrl-C reaches only us, who end it in order.
+  const child = spawn(command, args, { stdio: 'pipe', detached: true, ...options });
+  if (child.pid !== undefined) running.add(child);
+  child.stdin.on('error', () => {}); // it did not want to read; its exit code tells
+  child.stdin.end(input);
   let printed = '';
   let all = '';
   child.stdout.on('data', (chunk) => {
@@ -20,13 +37,16 @@ export async function run(command, args, { quiet = true, allowFailure = false, .
     all += chunk;
     if (!quiet) process.stderr.write(chunk);
   });
-  const [code] = await Promise.race([
-    once(child, 'close'),
-    once(child, 'error').then(([error]) => {
-      throw new Stop(`${command} could not be started: ${error.message}`);
-    }),
-  ]);
-  if (code !== 0 && !allowFailure)
-    throw new Stop(`${quiet ? all : ''}\n${command} ${args[0] ?? ''} ended with ${code}.`);
-  return { code, printed };
+  try {
+    const [code] = await once(child, 'close');
+    if (code !== 0 && !allowFailure)
+      throw new Stop(`${quiet ? all : ''}\n${command} ${args[0] ?? ''} ended with ${code}.`);
+    return { code, printed };
+  } catch (thrown) {
+    if (thrown.syscall?.startsWith('spawn'))
+      throw new Stop(`${command} could not be started: ${thrown.message}`);
+    throw thrown;
+  } finally {
+    running.delete(child);
+  }
 }

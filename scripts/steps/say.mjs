@@ -1,3 +1,6 @@
+// Whoever read along may have gone (`npm start | head`): that must not end what runs.
+for (const stream of [process.stdout, process.stderr]) stream.on('error', () => {});
+
 /** One voice for every script: what is being done, and how long it took. */
 export const say = (text) => process.stdout.write(`${text}\n`);
 
@@ -12,12 +15,16 @@ export async function timed(label, work) {
 /** An expected failure: a sentence for the person, no stack. */
 export class Stop extends Error {}
 
-/** Runs a script's main function; an expected failure prints its sentence, a bug its stack. */
-export async function main(work) {
-  try {
-    await work();
-  } catch (thrown) {
-    process.stderr.write(`${thrown instanceof Stop ? thrown.message : (thrown?.stack ?? thrown)}\n`);
-    process.exitCode = 1;
-  }
+/** Says what went wrong: the sentence of an expected failure, the stack of a bug. */
+export const complain = (thrown) =>
+  process.stderr.write(`${thrown instanceof Stop ? thrown.message : (thrown?.stack ?? thrown)}\n`);
+
+/** Runs `work` once at the first sign that we should stop, and never twice. */
+export function onStopSignal(work) {
+  let isStopping = false;
+  for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP'])
+    process.on(signal, () => {
+      if (!isStopping) void work();
+      isStopping = true;
+    });
 }

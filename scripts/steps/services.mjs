@@ -1,7 +1,8 @@
 import { join } from 'node:path';
+import { pathToFileURL } from 'node:url';
 import { untilHealthy, untilListening } from './answering.mjs';
-import { seed, TS_FLAGS } from './database.mjs';
-import { environmentOf, workerEnvironment } from './environment.mjs';
+import { STANDALONE } from './build.mjs';
+import { TS_FLAGS } from './database.mjs';
 import { ROOT } from './folders.mjs';
 import { freePort } from './ports.mjs';
 import { timed } from './say.mjs';
@@ -16,6 +17,7 @@ export async function startStandIns(supervisor, folders, runState) {
     ...process.env,
     STORE_PORT: String(runState.ports.store),
     STORE_DIR: folders.objects,
+    STORE_BUCKET: 'ruckle',
     STORE_ACCESS_KEY_ID: runState.secrets.storeKeyId,
     STORE_SECRET_ACCESS_KEY: runState.secrets.storeSecret,
     MAIL_PORT: String(runState.ports.mail),
@@ -23,30 +25,25 @@ export async function startStandIns(supervisor, folders, runState) {
   };
   supervisor.start(node('store', ['scripts/services/store.mjs'], env));
   supervisor.start(node('mail', ['scripts/services/mail-catcher.mjs'], env));
-  await untilListening(runState.ports.store, 'The photo store');
-  await untilListening(runState.ports.mail, 'The mail catcher');
+  await supervisor.during(untilListening(runState.ports.store, 'The photo store'));
+  await supervisor.during(untilListening(runState.ports.mail, 'The mail catcher'));
 }
 
-/** The application: the web process (built, or in development) and the worker. */
-export async function startApplication(
-  supervisor,
-  folders,
-  runState,
-  { dev = false, withDemo = false, preferredPort = 3000 } = {},
-) {
-  runState.ports.web = await freePort(runState.ports.web, preferredPort);
-  if (withDemo) await seed(folders, runState);
-  const env = environmentOf(folders, runState);
-  const address = ['--import', join(ROOT, 'scripts/services/client-address.mjs')];
-  const web = dev
-    ? node(
-        'web',
-        [...address, 'node_modules/next/dist/bin/next', 'dev', '-p', env.PORT, '-H', env.HOSTNAME],
-        { ...env, NODE_ENV: 'development' },
-      )
-    : node('web', [...address, 'server.js'], env, join(ROOT, '.next', 'standalone'));
-  supervisor.start(web);
-  supervisor.start(node('worker', [...TS_FLAGS, 'lib/jobs/worker.ts'], workerEnvironment(folders, runState)));
-  await timed('starting', () => untilHealthy(env.APP_ORIGIN));
-  return env.APP_ORIGIN;
+// An address, not a path: a folder's name may hold characters that mean something in one.
+const CLIENT_ADDRESS = pathToFileURL(join(ROOT, 'scripts/services/client-address.mjs')).href;
+
+function webProcess(env, isDev) {
+  const before = ['--import', CLIENT_ADDRESS];
+  if (!isDev) return node('web', [...before, 'server.js'], env, STANDALONE);
+  const next = ['node_modules/next/dist/bin/next', 'dev', '-p', env.PORT, '-H', env.HOSTNAME];
+  return node('web', [...before, ...next], { ...env, NODE_ENV: 'development' });
+}
+
+/** The application: the web process (built, or in development) and the worker; waits until it answers. */
+export async function startApplication(supervisor, { webEnv, workerEnv, isDev = false }) {
+  supervisor.start(webProcess(webEnv, isDev));
+  supervisor.start(node('worker', [...TS_FLAGS, 'lib/jobs/worker.ts'], workerEnv));
+  const origin = `http://127.0.0.1:${webEnv.PORT}`;
+  await timed('starting', () => supervisor.during(untilHealthy(origin)));
+  return origin;
 }

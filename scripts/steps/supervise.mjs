@@ -1,14 +1,16 @@
 import { spawn } from 'node:child_process';
-import { once } from 'node:events';
-import { openSync } from 'node:fs';
+import { appendFileSync, closeSync, openSync } from 'node:fs';
 import { join } from 'node:path';
-import { describe } from './identity.mjs';
+import { setTimeout as sleep } from 'node:timers/promises';
+import { describe, signalGroup } from './identity.mjs';
+import { Restarts } from './restarts.mjs';
 import { Stop } from './say.mjs';
 
-const RESTARTS_MAX = 5;
+const GRACE_MS = 8000;
+const LOOK_MS = 500;
 
 /**
- * Keeps a handful of processes alive. One that dies is started again, up to five times; then everything stops and the log that
+ * Keeps a handful of processes alive. One that dies is started again; one that dies too often fails the whole, and the log that
  * says why is named.
  */
 export class Supervisor {
@@ -16,37 +18,78 @@ export class Supervisor {
   #isStopping = false;
   #failed;
   #fail;
+  #watched = [];
 
+  /** @param onChange told the processes that now run, each time one is started */
   constructor(folders, onChange) {
     this.folders = folders;
     this.onChange = onChange;
-    this.failed = new Promise((_, reject) => {
+    this.#failed = new Promise((_, reject) => {
       this.#fail = reject;
     });
-    this.failed.catch(() => {});
+    this.#failed.catch(() => {});
+  }
+
+  /** Waits for some work, but no longer than until a process has died too often. */
+  async during(work) {
+    return Promise.race([work, this.#failed]);
+  }
+
+  /** Never fulfils: rejects when a process has died too often. */
+  get failed() {
+    return this.#failed;
   }
 
   /** @param spec `{ name, command, args, env, cwd }` */
-  start(spec, restarts = 0) {
+  start(spec, restarts = new Restarts()) {
     const log = join(this.folders.logs, `${spec.name}.log`);
     const out = openSync(log, 'a', 0o600);
-    const child = spawn(spec.command, spec.args, {
-      cwd: spec.cwd,
-      env: spec.env,
-      stdio: ['ignore', out, out],
-    });
+    // A group of its own: Ctrl-C reaches only us, who stop all in order, and what it has started ends with it.
+    const options = { cwd: spec.cwd, env: spec.env, stdio: ['ignore', out, out], detached: true };
+    const child = spawn(spec.command, spec.args, options);
+    closeSync(out);
+    if (child.pid === undefined) {
+      child.once('error', (error) => this.#fail(new Stop(`${spec.name}: ${error.message}`)));
+      return;
+    }
     this.#children.set(spec.name, child);
-    child.once('exit', () => {
-      this.#children.delete(spec.name);
-      if (this.#isStopping) return;
-      if (restarts >= RESTARTS_MAX)
-        return this.#fail(
-          new Stop(`${spec.name} stopped ${RESTARTS_MAX + 1} times. Its log says why: ${log}`),
-        );
-      setTimeout(() => !this.#isStopping && this.start(spec, restarts + 1), 200 * 2 ** restarts);
-    });
+    child.once('exit', () => void this.#afterExit(spec, child, restarts, log));
     this.onChange(this.processes());
-    return child;
+  }
+
+  async #afterExit(spec, child, restarts, log) {
+    this.#children.delete(spec.name);
+    signalGroup(child.pid, 'SIGKILL');
+    if (this.#isStopping) return;
+    const pauseMs = restarts.next(Date.now());
+    if (pauseMs === null) return this.#fail(diedTooOften(spec.name, log));
+    this.#note(`${spec.name} ended (${child.exitCode ?? child.signalCode}): started again`);
+    await sleep(pauseMs);
+    // What it stands on comes first, else it would use up its restarts in the dark.
+    while (!this.#isStopping && !this.#watched.every(({ isReady }) => isReady())) await sleep(LOOK_MS);
+    if (!this.#isStopping) this.start(spec, restarts);
+  }
+
+  /** Watches over what is not our child, as a server that outlives a killed start; the children stand on it. */
+  watch({ name, log, isAlive, isReady, restart }) {
+    const restarts = new Restarts();
+    const look = async () => {
+      while (!this.#isStopping) {
+        await sleep(LOOK_MS);
+        if (this.#isStopping || isAlive()) continue;
+        const pauseMs = restarts.next(Date.now());
+        if (pauseMs === null) return this.#fail(diedTooOften(name, log));
+        this.#note(`${name} is gone: started again`);
+        await sleep(pauseMs);
+        if (!this.#isStopping) await restart().catch((thrown) => this.#note(thrown.message));
+      }
+    };
+    this.#watched.push({ isReady, done: look() });
+  }
+
+  // In a log of its own: the terminal's last line stays the address.
+  #note(text) {
+    appendFileSync(join(this.folders.logs, 'supervisor.log'), `${new Date().toISOString()} ${text}\n`);
   }
 
   processes() {
@@ -55,14 +98,14 @@ export class Supervisor {
 
   async stop() {
     this.#isStopping = true;
-    const ending = [...this.#children.values()].map(async (child) => {
-      if (child.exitCode !== null || child.signalCode !== null) return;
-      const gone = once(child, 'exit');
-      child.kill('SIGTERM');
-      const timer = setTimeout(() => child.kill('SIGKILL'), 8000);
-      await gone;
-      clearTimeout(timer);
+    const ending = [...this.#children.values()].map((child) => {
+      const gone = new Promise((resolve) => child.once('exit', resolve));
+      signalGroup(child.pid, 'SIGTERM');
+      const timer = setTimeout(() => signalGroup(child.pid, 'SIGKILL'), GRACE_MS);
+      return gone.then(() => clearTimeout(timer));
     });
-    await Promise.all(ending);
+    await Promise.all([...ending, ...this.#watched.map(({ done }) => done)]);
   }
 }
+
+const diedTooOften = (name, log) => new Stop(`${name} stopped again and again. Its log says why: ${log}`);

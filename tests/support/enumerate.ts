@@ -68,10 +68,10 @@ function reachAll({ slots, findings }: Network, states: readonly number[], bits:
 export function randomNetwork(random: Random, sizes: readonly number[], findingCount: number): Network {
   const weights = (length: number, least: number) =>
     Float64Array.from({ length }, () => random.between(least, 1));
-  const pairs =
-    sizes.length >= 2 && random.chance(0.5)
-      ? [{ first: 0, second: 1, table: weights(sizes[0]! * sizes[1]!, 0) }]
-      : [];
+  const leaves = random.chance(0.5) ? 1 + random.below(2) : 0;
+  const pairs = sizes
+    .slice(1, 1 + leaves)
+    .map((size, i) => ({ first: 0, second: i + 1, table: weights(sizes[0]! * size, 0) }));
   let next = 0;
   const findings = Array.from({ length: findingCount }, () => {
     const bits = random.chance(0.3) ? [next, next + 1] : [next];

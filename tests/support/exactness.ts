@@ -1,6 +1,6 @@
 import type { CaseInput } from '@/diagnosis/case-schema';
 import type { Random } from '@/diagnosis/evaluation/random';
-import type { Knowledge } from '@/diagnosis/garments/schema';
+import type { Dimension, Knowledge } from '@/diagnosis/garments/schema';
 import { prepare, solveRound } from '@/diagnosis/inference/beliefs';
 import { CURRENT_ROUND } from '@/diagnosis/inference/solve';
 import { STRENGTHS } from '@/diagnosis/inference/strengths';
@@ -28,8 +28,10 @@ export function exactnessOf(random: Random, threeNeedsShare = 0.06): number {
   const knowledge = drawSmall(random, dimensions, 3 - dimensions + random.below(2), 6);
   const noted = random.sample(knowledge.signs, 1 + random.below(6));
   const signs = noted.map(({ id }) => ({ sign: id, severity: random.below(4) }));
-  const pair = dimensions === 2 && random.chance(0.3);
-  return differenceToBook(knowledge, { signs, measured: pair ? [sumOf(random, knowledge)] : [] });
+  const centre = random.pick(knowledge.dimensions);
+  const others = knowledge.dimensions.filter((one) => one !== centre && random.chance(0.4));
+  const measured = others.map((other) => sumOf(random, random.shuffle([centre, other])));
+  return differenceToBook(knowledge, { signs, measured });
 }
 
 /** The same error where three needs are known by their sum: it is passed as messages. */
@@ -37,10 +39,10 @@ export function longSumErrorOf(random: Random): number {
   const knowledge = drawSmall(random, 3, 0, 5);
   const noted = random.sample(knowledge.signs, random.below(4));
   const signs = noted.map(({ id }) => ({ sign: id, severity: random.below(3) }));
-  return differenceToBook(knowledge, { signs, measured: [sumOf(random, knowledge)] });
+  return differenceToBook(knowledge, { signs, measured: [sumOf(random, knowledge.dimensions)] });
 }
 
-function sumOf(random: Random, { dimensions }: Knowledge) {
+function sumOf(random: Random, dimensions: readonly Dimension[]) {
   const terms = dimensions.map(({ id }) => ({ dimension: id, weight: random.between(0.5, 1) }));
   return { terms, needMm: random.between(-30, 30), sdMm: random.between(18, 30) };
 }

@@ -1,6 +1,6 @@
 import { parseCase } from '@/diagnosis/case';
 import type { Case, CaseInput } from '@/diagnosis/case-schema';
-import { diagnose } from '@/diagnosis/diagnose';
+import { diagnose, startReading } from '@/diagnosis/diagnose';
 import type { Knowledge } from '@/diagnosis/garments/schema';
 import type { Reading } from '@/diagnosis/reading';
 
@@ -14,6 +14,11 @@ export function parsed(knowledge: Knowledge, input: Omit<CaseInput, 'garment'>):
 /** The reading of a case that is meant to be valid. */
 export function readCase(knowledge: Knowledge, input: Omit<CaseInput, 'garment'>): Reading {
   return diagnose(knowledge, parsed(knowledge, input));
+}
+
+/** The first part of the reading: everything but reasons and the exact re-score of checks. */
+export function readFirst(knowledge: Knowledge, input: Omit<CaseInput, 'garment'>): Reading {
+  return startReading(knowledge, parsed(knowledge, input)).first;
 }
 
 /** Probability and score of everything in a reading, by id, side and direction. */

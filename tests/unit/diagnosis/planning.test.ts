@@ -61,6 +61,16 @@ describe('a plan', () => {
     ).toEqual(['add-knee left']);
   });
 
+  it('settles a likely cause before a change that would look the same', () => {
+    const { plan, leftOut } = readCase(small, {
+      causes: { present: ['untrimmed'] },
+      signs: [{ sign: 'taut-rise', severity: 2 }],
+      measured: [measured('depth', 20), measured('knee', 20)],
+    });
+    expect(plan.map(({ correction: id }) => id)).toEqual(['add-knee']);
+    expect(leftOut.find(({ id }) => id === 'add-depth')!.why).toMatch(/First settle this: untrimmed curve/);
+  });
+
   it('asks for the muslin that its most demanding change needs', () => {
     const knowledge = changed(({ id }) => (id === 'add-depth' ? { muslin: 'new-cloth' as const } : {}));
     expect(readCase(knowledge, { measured: [measured('depth', 20)] }).muslin).toBe('new-cloth');

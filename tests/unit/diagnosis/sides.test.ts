@@ -15,6 +15,14 @@ function knees(input: Omit<CaseInput, 'garment'>): number[] {
   return layout.ofDimension[place]!.map((variable) => tailsOf(layout, place, marginals[variable]!).more);
 }
 
+/** P(depth is spare), a need without sides. */
+function shortDepth(signs: CaseInput['signs']): number {
+  const fitting = parsed(small, { signs });
+  const { layout, tables, start } = prepare(small, fitting, STRENGTHS);
+  const { marginals } = solveRound(layout, tables, start, fitting);
+  return tailsOf(layout, 0, marginals[layout.ofDimension[0]![0]!]!).less;
+}
+
 const pull = (side: 'both' | 'left' | 'right', severity = 2) => ({ sign: 'knee-pull', severity, side });
 
 describe('left and right', () => {
@@ -51,20 +59,24 @@ describe('left and right', () => {
   });
 
   it('do not count a need without sides twice', () => {
-    const fitting = (signs: CaseInput['signs']) => parsed(small, { signs });
-    const depth = (signs: CaseInput['signs']) => {
-      const one = fitting(signs);
-      const { layout, tables, start } = prepare(small, one, STRENGTHS);
-      const { marginals } = solveRound(layout, tables, start, one);
-      return tailsOf(layout, 0, marginals[layout.ofDimension[0]![0]!]!).less;
-    };
-    const once = depth([{ sign: 'leg-fold', severity: 2, side: 'both' }]);
-    const apart = depth([
+    const once = shortDepth([{ sign: 'leg-fold', severity: 2, side: 'both' }]);
+    const apart = shortDepth([
       { sign: 'leg-fold', severity: 2, side: 'left' },
       { sign: 'leg-fold', severity: 2, side: 'right' },
     ]);
     expect(apart / once).toBeLessThan(2);
     expect(apart / once).toBeGreaterThan(0.5);
+  });
+
+  it('clear a need without sides where only one leg shows what it would show on both', () => {
+    const open = shortDepth([{ sign: 'leg-fold', severity: 3, side: 'left' }]);
+    const other = (severity: number) =>
+      shortDepth([
+        { sign: 'leg-fold', severity: 3, side: 'left' },
+        { sign: 'leg-fold', severity, side: 'right' },
+      ]);
+    expect(other(0)).toBeLessThan(shortDepth([]));
+    expect(other(1)).toBeLessThan(open);
   });
 
   it('have a joint prior whose margins are the prior of each', () => {

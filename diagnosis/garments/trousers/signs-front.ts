@@ -1,0 +1,38 @@
+import type { Sign } from '../schema';
+import { causeLink, link, sign } from './build';
+
+/** In front: waist, hip, fork. */
+export const frontSigns: Sign[] = [
+  sign({ id: 'taut-lines-rising-from-front-fork', name: 'Taut lines rising from the front fork', description: 'Taut lines run from the fork up toward the hip on both sides.', group: 'fork', tension: 'tight', zone: 'fork-front', views: ['front', 'close-up'], leak: 'high',
+    links: [link('front-extension', 'more', 'strong', 'trousers:TF017'), link('front-rise', 'more', 'usual'), link('crotch-depth', 'more', 'usual'), link('front-thigh', 'more', 'usual'), causeLink('curve-allowance-untrimmed', 'strong')], synonyms: ['whiskers', 'camel toe lines', 'smile lines', 'pulling at the crotch', 'lines from the crotch'],
+    lookAlikes: [['slack-lines-falling-from-front-fork', 'Those hang; these pull.']] }),
+  sign({ id: 'slack-lines-falling-from-front-fork', name: 'Slack lines at the front fork', description: 'Soft upright folds gather at the fork and run into the inner leg.', group: 'fork', tension: 'slack', zone: 'fork-front', views: ['front', 'close-up'],
+    links: [link('front-extension', 'less', 'strong', 'trousers:TC006'), link('front-rise', 'less', 'usual', 'trousers:TF023'), link('front-curve', 'more', 'sometimes')], synonyms: ['frown lines', 'baggy crotch', 'extra fabric at the front crotch'] }),
+  sign({ id: 'split-line-at-front-fork', name: 'A split line at the front fork', description: 'The seam presses in at the front of the fork.', group: 'fork', tension: 'tight', zone: 'fork-front', views: ['front', 'close-up'],
+    links: [link('front-extension', 'more', 'usual'), link('crotch-depth', 'more', 'usual'), link('front-rise', 'more', 'usual'), link('front-curve', 'more', 'usual', 'trousers:TK019')], synonyms: ['camel toe', 'cameltoe', 'seam splits me'] }),
+  sign({ id: 'fork-cuts', name: 'The fork cuts', description: 'Felt more than seen: the seam cuts at the fork, standing or sitting.', group: 'fork', tension: 'feel', zone: 'fork-front', views: ['front', 'seated'],
+    links: [link('crotch-depth', 'more', 'strong'), link('front-extension', 'more', 'usual'), link('back-extension', 'more', 'usual'), link('waist-front', 'more', 'sometimes', 'trousers:TF027'), link('waist-back', 'more', 'sometimes', 'trousers:TF027')], synonyms: ['crotch too tight', 'cuts me in the crotch', 'uncomfortable crotch'] }),
+  sign({ id: 'fork-hangs-low', name: 'The fork hangs low', description: 'The fork does not touch the body; it hangs a finger or more below.', group: 'depth', tension: 'slack', zone: 'fork-front', views: ['front', 'back', 'left', 'right'],
+    links: [link('crotch-depth', 'less', 'strong', 'trousers:TC022'), link('front-thigh', 'more', 'sometimes', 'trousers:TF036'), link('back-thigh', 'more', 'sometimes', 'trousers:TF036'), causeLink('not-at-level', 'usual')], synonyms: ['low crotch', 'drop crotch', 'crotch too low', 'saggy crotch'],
+    maskedBy: [{ to: 'front-thigh', direction: 'more' }, { to: 'back-thigh', direction: 'more' }] }),
+  sign({ id: 'tight-lines-across-front-hip', name: 'Tight level lines across the front hip', description: 'Taut level lines run over the front between the sides.', group: 'hip', tension: 'tight', zone: 'hip-front', views: ['front', 'left', 'right'],
+    links: [link('hip-front', 'more', 'strong', 'trousers:TF001'), link('abdomen-width', 'more', 'usual')], synonyms: ['too tight over my hips', 'horizontal wrinkles in front', 'pulling across the hips'] }),
+  sign({ id: 'tight-lines-below-front-waist', name: 'Tight lines below the front waist', description: 'Taut lines lie across the rounded front, 75 to 100 mm below the waist.', group: 'abdomen', tension: 'tight', zone: 'abdomen', views: ['front', 'left', 'right'],
+    links: [link('abdomen-width', 'more', 'strong', 'trousers:TC012'), link('waist-front', 'more', 'usual'), link('front-rise', 'more', 'sometimes')], synonyms: ['tight over my belly', 'tummy pulling', 'stomach wrinkles'] }),
+  sign({ id: 'centre-fronts-do-not-meet', name: 'The centre fronts do not meet', description: 'The closure cannot be shut, or strains.', group: 'abdomen', tension: 'gap', zone: 'fly', views: ['front'],
+    links: [link('waist-front', 'more', 'strong', 'trousers:TC012'), link('abdomen-width', 'more', 'strong', 'trousers:TC012')], synonyms: ['cannot close', 'zip will not close', 'button pops'] }),
+  sign({ id: 'fold-at-centre-front', name: 'A level fold at centre front', description: 'A fold lies across below the waist at centre front and runs out before the side.', group: 'front-rise', tension: 'slack', zone: 'abdomen', views: ['front'],
+    links: [link('front-rise', 'less', 'strong', 'trousers:TF023'), link('crotch-depth', 'less', 'sometimes'), link('waist-front', 'less', 'sometimes', 'trousers:TC047')], synonyms: ['fabric folds at the front', 'extra length in front', 'bubble at the fly'] }),
+  sign({ id: 'waist-dips-in-front', name: 'The waist is pulled down in front', description: 'The band sits below its mark in front.', group: 'front-rise', tension: 'place', zone: 'waist-front', views: ['front', 'left', 'right'],
+    links: [link('front-rise', 'more', 'strong'), link('waist-front', 'more', 'usual'), causeLink('not-at-level', 'strong')], synonyms: ['slides down in front', 'waist dips in front', 'goes under my belly'] }),
+  sign({ id: 'waist-stands-off-in-front', name: 'The waist stands off in front', description: 'The band stands away from the body in front.', group: 'waist', tension: 'gap', zone: 'waist-front', views: ['front', 'left', 'right', 'seated'],
+    links: [link('waist-front', 'less', 'strong'), link('front-rise', 'less', 'sometimes')], synonyms: ['gaps in front', 'loose waist in front'] }),
+  sign({ id: 'vertical-slack-front-hip', name: 'Loose upright folds at the front hip', description: 'Folds stand upright over the front hip and can be pinched.', group: 'hip', tension: 'slack', zone: 'hip-front', views: ['front', 'left', 'right'],
+    links: [link('hip-front', 'less', 'strong', 'trousers:TC084'), link('abdomen-width', 'less', 'usual'), link('front-thigh', 'less', 'sometimes')], synonyms: ['too wide at the front', 'baggy front'] }),
+  sign({ id: 'pockets-gape', name: 'The pockets stand open', description: 'The slanted mouths of the pockets gape.', group: 'hip', tension: 'gap', zone: 'pocket', views: ['front', 'left', 'right'], leak: 'high',
+    links: [link('hip-front', 'more', 'strong'), link('hip-back', 'more', 'usual'), link('abdomen-width', 'more', 'usual'), causeLink('pocket-without-stay', 'strong', 'trousers:TC046')], synonyms: ['pockets gape', 'pockets stick out', 'gaping pockets', 'pocket flare'] }),
+  sign({ id: 'bubble-at-side-hip', name: 'A bubble at the side hip', description: 'Cloth stands out at the side between waist and hip.', group: 'high-hip', tension: 'slack', zone: 'high-hip-side', views: ['front', 'back', 'left', 'right'], sided: true,
+    links: [link('high-hip-curve', 'less', 'strong'), link('waist-front', 'more', 'sometimes'), link('waist-back', 'more', 'sometimes')], synonyms: ['hip bump', 'poof at the side', 'jodhpur'] }),
+  sign({ id: 'tight-at-side-above-hip', name: 'Tight at the side above the hip', description: 'The side presses between waist and hip; lines point to it.', group: 'high-hip', tension: 'tight', zone: 'high-hip-side', views: ['front', 'back', 'left', 'right'], sided: true,
+    links: [link('high-hip-curve', 'more', 'strong'), link('hip-front', 'more', 'sometimes'), link('hip-back', 'more', 'sometimes')], synonyms: ['love handles', 'tight at high hip', 'hip bone pulls'] }),
+]; // prettier-ignore

@@ -1,0 +1,38 @@
+import type { Sign } from '../schema';
+import { causeLink, link, sign } from './build';
+
+/** The leg, and seams off plumb. */
+export const legSigns: Sign[] = [
+  sign({ id: 'tight-lines-front-thigh', name: 'Tight lines over the front thigh', description: 'Level or slanting taut lines over the thigh; 10 mm cannot be pinched.', group: 'thigh', tension: 'tight', zone: 'thigh-front', views: ['front', 'left', 'right'], sided: true,
+    links: [link('front-thigh', 'more', 'strong', 'trousers:TC024'), link('front-extension', 'more', 'sometimes'), link('crotch-depth', 'more', 'rare')], synonyms: ['tight thighs', 'thigh lines', 'quads too big'] }),
+  sign({ id: 'tight-lines-back-thigh', name: 'Tight lines over the back thigh', description: 'Taut lines run round the back of the thigh below the seat.', group: 'thigh', tension: 'tight', zone: 'thigh-back', views: ['back', 'left', 'right'], sided: true,
+    links: [link('back-thigh', 'more', 'strong'), link('back-extension', 'more', 'usual')], synonyms: ['tight behind the thigh', 'hamstring tight'] }),
+  sign({ id: 'vertical-slack-front-thigh', name: 'Loose upright folds on the front thigh', description: 'Folds stand upright on the front of the thigh and can be pinched.', group: 'thigh', tension: 'slack', zone: 'thigh-front', views: ['front', 'left', 'right'], sided: true,
+    links: [link('front-thigh', 'less', 'strong', 'trousers:TC024'), link('hip-front', 'less', 'sometimes')], synonyms: ['baggy thighs', 'thighs too wide'] }),
+  sign({ id: 'calf-catches-behind', name: 'The calf catches the cloth', description: 'The back leg hangs up on the calf and folds behind the knee.', group: 'calf', tension: 'tight', zone: 'calf', views: ['back', 'left', 'right'], fullLength: true,
+    links: [link('calf-girth', 'more', 'defining', 'trousers:TF032'), link('hem-width', 'more', 'usual', 'trousers:TF033'), link('back-leg-length', 'less', 'rare')], synonyms: ['stuck on my calf', 'catches on calves', 'tight calves'] }),
+  sign({ id: 'folds-behind-knee', name: 'Folds behind the knee', description: 'Level folds gather behind the knee while standing.', group: 'knee', tension: 'slack', zone: 'behind-knee', views: ['back', 'left', 'right'], sided: true, fullLength: true,
+    links: [link('back-leg-length', 'less', 'strong', 'trousers:TC059'), link('calf-girth', 'more', 'usual'), causeLink('stance', 'sometimes')], synonyms: ['wrinkles behind the knee', 'knee folds'] }),
+  sign({ id: 'diagonal-from-inner-hem-to-front-knee', name: 'A slanting fold from the inner hem to the front knee', description: 'A soft fold runs from the inseam at the hem up and forward to the knee.', group: 'leg-line', tension: 'slack', zone: 'lower-leg', views: ['front', 'left', 'right'], sided: true, fullLength: true,
+    links: [link('leg-swing', 'more', 'strong', 'trousers:TC007', 'trousers:TF028'), link('calf-girth', 'more', 'sometimes'), causeLink('stance', 'sometimes')], synonyms: ['twisted leg', 'diagonal drag on the lower leg'] }),
+  sign({ id: 'knees-pull-inward', name: 'The leg pulls at the inner knee', description: 'Taut lines point to the inner side of the knee.', group: 'leg-line', tension: 'tight', zone: 'knee', views: ['front', 'back'], sided: true, fullLength: true,
+    links: [link('knee-shift', 'more', 'strong', 'trousers:TF030'), link('knee-girth', 'more', 'usual')], synonyms: ['knock knees', 'pulls at my knees'] }),
+  sign({ id: 'knee-tight-when-sitting', name: 'The knee is tight when you sit', description: 'The cloth strains over the bent knee and the hem creeps up.', group: 'knee', tension: 'tight', zone: 'knee', views: ['seated'], fullLength: true,
+    links: [link('knee-girth', 'more', 'strong'), link('crotch-depth', 'more', 'sometimes', 'trousers:TC008')], synonyms: ['cannot bend my knees', 'tight knees'] }),
+  sign({ id: 'hem-lifts-when-sitting', name: 'The hem climbs far when you sit', description: 'Long enough standing, the hem crawls half to the knee in sitting.', group: 'hem', tension: 'place', zone: 'hem', views: ['seated'], fullLength: true,
+    links: [link('crotch-depth', 'more', 'usual', 'trousers:TC008'), link('back-extension', 'more', 'usual', 'trousers:TC008'), link('leg-length', 'more', 'usual', 'W5'), link('calf-girth', 'more', 'sometimes', 'trousers:TF033')], synonyms: ['too short when sitting', 'ride up when I sit'] }),
+  sign({ id: 'hem-folds-on-shoe', name: 'The hem breaks on the shoe', description: 'The leg folds above the shoe, more than was meant.', group: 'hem', tension: 'slack', zone: 'hem', views: ['front', 'back', 'left', 'right'], fullLength: true,
+    links: [link('leg-length', 'less', 'strong'), link('crotch-depth', 'less', 'sometimes'), causeLink('not-at-level', 'usual')], synonyms: ['too long', 'puddle at the ankle', 'trip over the hem'] }),
+  sign({ id: 'side-seam-swings-forward', name: 'The side seam swings to the front', description: 'The side seam runs forward of plumb going down.', group: 'side-seam', tension: 'tilt', zone: 'side-seam', views: ['left', 'right'], sided: true,
+    links: [link('hip-front', 'more', 'usual'), link('leg-twist', 'less', 'usual'), causeLink('off-grain', 'usual', 'trousers:TF038')], synonyms: ['side seam not straight', 'seam twists to the front'] }),
+  sign({ id: 'side-seam-swings-back', name: 'The side seam swings to the back', description: 'The side seam runs behind plumb going down.', group: 'side-seam', tension: 'tilt', zone: 'side-seam', views: ['left', 'right'], sided: true,
+    links: [link('hip-back', 'more', 'usual'), link('leg-twist', 'more', 'usual'), causeLink('off-grain', 'usual', 'trousers:TF038')], synonyms: ['side seam leans back', 'seam twists to the back'] }),
+  sign({ id: 'one-side-waist-low', name: 'A fold at one side of the waist', description: 'A fold lies under the waist at one side, or that side sits lower.', group: 'side-waist', tension: 'slack', zone: 'waist-side', views: ['front', 'back'], sided: true,
+    links: [link('side-rise', 'less', 'strong'), causeLink('stance', 'usual'), causeLink('not-sewn-as-planned', 'sometimes')], synonyms: ['uneven hips', 'one hip higher', 'crooked waist'] }),
+  sign({ id: 'one-side-pulls-up', name: 'Lines pull up to one side of the waist', description: 'Taut lines rise toward one side of the waist.', group: 'side-waist', tension: 'tight', zone: 'waist-side', views: ['front', 'back'], sided: true,
+    links: [link('side-rise', 'more', 'strong'), causeLink('stance', 'usual'), causeLink('layers-or-pocket-contents', 'sometimes')], synonyms: ['one side pulls', 'higher hip pulls'] }),
+  sign({ id: 'leg-twists-round', name: 'The leg twists round', description: 'Crease and seams spiral round the leg.', group: 'side-seam', tension: 'tilt', zone: 'lower-leg', views: ['front', 'back'], sided: true, fullLength: true,
+    links: [link('leg-twist', 'more', 'sometimes'), link('leg-twist', 'less', 'sometimes'), causeLink('off-grain', 'defining', 'trousers:TF038'), causeLink('not-sewn-as-planned', 'usual')], synonyms: ['twisted legs', 'spiral leg', 'jeans twist'] }),
+  sign({ id: 'hem-dips-behind', name: 'The hem lifts behind', description: 'The hem is shorter over the heel than in front.', group: 'hem', tension: 'place', zone: 'hem', views: ['back', 'left', 'right'], fullLength: true,
+    links: [link('hem-slope', 'more', 'strong', 'trousers:TM046'), link('calf-girth', 'more', 'usual')], synonyms: ['shorter at the back', 'hem rides up at the heel'] }),
+]; // prettier-ignore
