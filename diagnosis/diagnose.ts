@@ -54,6 +54,14 @@ export function startReading(
   return { first, finish };
 }
 
+/** The ranking alone, for trying many strengths on many cases. */
+export function rankCase(knowledge: Knowledge, fitting: Case, strengths: Strengths): RankedItem[] {
+  const ready = prepare(knowledge, fitting, strengths);
+  const { marginals } = solveRound(ready.layout, ready.tables, ready.start, fitting);
+  const outlook = outlookOf(ready, fitting, marginals);
+  return rankedItems(causeRows(outlook), scoreCorrections(outlook).scored);
+}
+
 type Part = Omit<Reading, 'checks' | 'exact' | 'engine'>;
 
 /** Everything that follows from the beliefs alone. */
