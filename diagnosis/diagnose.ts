@@ -58,7 +58,7 @@ export function startReading(
 export function rankCase(knowledge: Knowledge, fitting: Case, strengths: Strengths): RankedItem[] {
   const ready = prepare(knowledge, fitting, strengths);
   const { marginals } = solveRound(ready.layout, ready.tables, ready.start, fitting);
-  const outlook = outlookOf(ready, fitting, marginals);
+  const outlook = outlookOf(ready.layout, fitting, marginals);
   return rankedItems(causeRows(outlook), scoreCorrections(outlook).scored);
 }
 
@@ -67,7 +67,7 @@ type Part = Omit<Reading, 'checks' | 'exact' | 'engine'>;
 /** Everything that follows from the beliefs alone. */
 function decide(ready: Fitting, fitting: Case, { marginals }: Solution): { part: Part; scored: Scored[] } {
   const { layout, tables } = ready;
-  const outlook = outlookOf(ready, fitting, marginals);
+  const outlook = outlookOf(ready.layout, fitting, marginals);
   const { scored, spent } = scoreCorrections(outlook);
   const causes = causeRows(outlook);
   const { plan, muslin, leftOut } = planOf(outlook, scored, settleBefore(outlook, causes));

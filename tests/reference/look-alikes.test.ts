@@ -3,7 +3,7 @@ import { isOpenAtFirst, walkGroup } from '@/diagnosis/evaluation/look-alikes';
 import { trousers } from '@/diagnosis/garments/trousers';
 import { lookAlikes } from './cases/look-alikes';
 
-describe('the look-alikes', () => {
+describe('the look-alikes', { timeout: 30_000 }, () => {
   it('are the fourteen groups of the fitter’s reference', () => {
     expect(lookAlikes.map(({ row }) => row).sort((a, b) => a - b)).toEqual(
       Array.from({ length: 14 }, (_, i) => i + 1),
