@@ -1,11 +1,12 @@
 'use client';
 import { Camera, ImagePlus } from 'lucide-react';
-import { type ChangeEvent, useState } from 'react';
+import { type ChangeEvent, useEffect, useState } from 'react';
 import { Choice } from '@/components/ui/Choice';
 import { Disclosure } from '@/components/ui/Disclosure';
 import { buttonClass } from '@/components/ui/styles';
 import type { PhotoDto } from '@/db/queries/photos';
 import type { View } from '@/diagnosis/garments/schema';
+import { readyToPrepare } from './prepare-photo';
 import { UploadLines } from './UploadLines';
 import { useUploads } from './useUploads';
 import { TAKEN_OPTIONS, VIEW_OPTIONS } from './view-words';
@@ -25,6 +26,7 @@ export function PhotoUploader({ userId, roundId, view, isFolded, onAdded }: Prop
   const [chosenView, setChosenView] = useState<View | null>(null);
   const [taken, setTaken] = useState<'camera' | 'mirror'>('camera');
   const { lines, add, cancel } = useUploads({ userId, roundId, onAdded });
+  useEffect(() => void readyToPrepare(), []);
   const shown = chosenView ?? view;
   const take = (event: ChangeEvent<HTMLInputElement>) => {
     const files = [...(event.target.files ?? [])];

@@ -22,8 +22,8 @@ export function RankedCause({ row, cause, onRuleOut }: Props) {
       <ReasonList because={row.because} against={row.against} />
       {onRuleOut ? (
         <div>
-          <Button onClick={() => onRuleOut(row.cause)}>
-            Looked at, it is not that<span className="sr-only">: {cause.name}</span>
+          <Button onClick={() => onRuleOut(row.cause)} aria-label={`Looked at, it is not that: ${cause.name}`}>
+            Looked at, it is not that
           </Button>
         </div>
       ) : null}

@@ -56,8 +56,8 @@ export function RankedCorrection({ row, correction, unit, isPlanned, onTake }: P
           {isPlanned ? (
             <p className="font-bold">In the plan</p>
           ) : (
-            <Button onClick={take}>
-              Take it into the plan<span className="sr-only">: {row.name}</span>
+            <Button onClick={take} aria-label={`Take it into the plan: ${row.name}`}>
+              Take it into the plan
             </Button>
           )}
         </div>

@@ -8,7 +8,7 @@ export function JumpBar({ reading }: { reading: Reading | null }) {
     first && reading.corrections.find((one) => one.correction === first.id && one.side === first.side);
   const words = row ? `${row.name}: ${row.word}` : 'The reading';
   return (
-    <div className="no-print fixed inset-x-0 bottom-[calc(3.6rem+env(safe-area-inset-bottom))] z-10 border-t-2 border-line bg-paper lg:hidden">
+    <div className="no-print fixed inset-x-0 bottom-[calc(3.2rem+env(safe-area-inset-bottom))] md:bottom-0 z-10 border-t-2 border-line bg-paper lg:hidden">
       <nav aria-label="Parts of this round" className="flex items-stretch justify-between">
         <a href="#reading" className="flex min-h-11 min-w-0 flex-1 items-center px-4 font-bold">
           <span className="truncate">{words}</span>
