@@ -22,7 +22,7 @@ const config = [
       '@typescript-eslint/consistent-type-imports': 'error',
       eqeqeq: ['error', 'always'],
       'no-console': 'error',
-      // Private photos must never pass through an image service and its cache.
+      // Photos are private: they never pass through the framework's shared image cache.
       '@next/next/no-img-element': 'off',
     },
   },

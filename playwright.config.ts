@@ -12,6 +12,8 @@ const FLAGS = [
   '--use-fake-ui-for-media-stream',
 ];
 
+const FAULTS = /faults\.spec\.ts/;
+
 /** A real browser, the one of the machine, on the two sizes that people hold and sit at. */
 export default defineConfig({
   testDir: 'tests/e2e',
@@ -31,11 +33,20 @@ export default defineConfig({
     {
       name: 'phone',
       use: { ...devices['Pixel 7'], viewport: { width: 390, height: 844 }, deviceScaleFactor: 2 },
+      testIgnore: FAULTS,
     },
     {
       name: 'desktop',
       use: { viewport: { width: 1440, height: 900 } },
       testMatch: /\.desktop\.spec\.ts|journey\.spec\.ts|axe\.spec\.ts/,
+    },
+    // Kills what the others stand on, so it waits for them; together they would fail for nothing.
+    {
+      name: 'faults',
+      use: { viewport: { width: 1440, height: 900 } },
+      testMatch: FAULTS,
+      dependencies: ['phone', 'desktop'],
+      fullyParallel: false,
     },
   ],
 });

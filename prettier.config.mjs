@@ -1,1 +1,3 @@
-export default { singleQuote: true, printWidth: 110, trailingComma: 'all' };
+const config = { singleQuote: true, printWidth: 110, trailingComma: 'all' };
+
+export default config;

@@ -16,6 +16,8 @@ export default defineConfig({
         resolve: { alias },
         test: {
           name: 'unit',
+          // Laws try many cases, and the machine may be busy with other work.
+          testTimeout: 30_000,
           environment: 'node',
           include: ['tests/unit/**/*.test.ts', 'tests/reference/**/*.test.ts'],
         },
@@ -25,6 +27,7 @@ export default defineConfig({
         resolve: { alias },
         test: {
           name: 'components',
+          testTimeout: 30_000,
           environment: 'jsdom',
           include: ['tests/components/**/*.test.tsx'],
           setupFiles: ['tests/support/jsdom.ts'],

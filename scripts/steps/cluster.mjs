@@ -118,6 +118,7 @@ export function putAside(path) {
  */
 export async function ensureCluster(folders, runState, { isThrowaway = false } = {}) {
   await putAsideForeign(folders, runState);
+  runState.cluster = folders.cluster;
   if (!isMade(folders)) await initialise(folders, runState.secrets.super, isThrowaway);
   const running = await settledPostmaster(folders);
   runState.ports.postgres = running?.port ?? (await freePort(runState.ports.postgres, 5432));
