@@ -1,8 +1,8 @@
 import type { PhotoDto } from '@/db/queries/photos';
 import type { View } from '@/diagnosis/garments/schema';
-import { PHOTO_BYTES_MAX, PHOTO_FAULTS } from '@/lib/photos/faults';
 import { makeUploadKey, preparePhoto } from './prepare-photo';
 import { sendUpload, type UploadEnd } from './send-upload';
+import { PHOTO_BYTES_MAX, TOO_LARGE_MESSAGE } from './upload-size-schema';
 import { dropUpload, keepUpload, listUploads, type WaitingUpload } from './upload-store';
 
 export interface UploadLine {
@@ -167,7 +167,7 @@ export class UploadSender {
     this.#edit(key, { state: 'sending', part: 0, message: '' });
     const end: UploadEnd =
       prepared.file.size > PHOTO_BYTES_MAX
-        ? { kind: 'refused', message: PHOTO_FAULTS['too-large'].message }
+        ? { kind: 'refused', message: TOO_LARGE_MESSAGE }
         : await sendUpload(prepared, (part) => this.#edit(key, { part }), abort.signal);
     this.#sending = null;
     if (end.kind === 'cancelled') return null;

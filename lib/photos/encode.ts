@@ -1,7 +1,8 @@
 import 'server-only';
 import { createHash } from 'node:crypto';
 import sharp from 'sharp';
-import { PHOTO_BYTES_MAX, type PhotoFault } from './faults';
+import { PHOTO_BYTES_MAX } from '@/components/photos/upload-size-schema';
+import type { PhotoFault } from './faults';
 import { sniff } from './sniff';
 import { Turns } from './turns';
 

@@ -1,7 +1,8 @@
 import 'server-only';
 import { findDoomed, findKeptRevisions, forgetDoomed, listDoomed } from '@/db/queries/photo-leftovers';
+import { purgePhotos } from '@/db/queries/purge-photos';
 import { deleteObject, listObjects } from '@/lib/photo-store';
-import { photoOfKey } from './keys';
+import { photoKeys, photoOfKey } from './keys';
 
 const YOUNG_MS = 3_600_000;
 
@@ -33,8 +34,12 @@ async function eraseDoomed(now: Date): Promise<void> {
   }
 }
 
-/** Sweeps the store: what was doomed and is due, and what a broken upload left behind. */
+/**
+ * Sweeps up: photos whose days in the bin are over, files that were doomed and are due, and what a broken upload left behind. Safe to
+ * run twice at once, and again after it broke off.
+ */
 export async function erasePhotoLeftovers(now: Date): Promise<void> {
+  await purgePhotos(now, photoKeys);
   await eraseDoomed(now);
   await eraseOrphans(now);
 }

@@ -1,12 +1,9 @@
-export const PHOTO_BYTES_MAX = 25 * 1024 * 1024;
+import { TOO_LARGE_MESSAGE } from '@/components/photos/upload-size-schema';
 
 /** Why a file was not taken: one sentence each. In every case nothing of it is kept. */
 export const PHOTO_FAULTS = {
   empty: { status: 422, message: 'This file is empty.' },
-  'too-large': {
-    status: 413,
-    message: 'This file is over 25 MB. A photo from the phone’s own camera is smaller.',
-  },
+  'too-large': { status: 413, message: TOO_LARGE_MESSAGE },
   'too-many-pixels': {
     status: 413,
     message: 'This picture has more than 50 megapixels. Save it smaller, then add it again.',

@@ -1,6 +1,7 @@
 import 'server-only';
 import { createHash } from 'node:crypto';
 import { v7 } from 'uuid';
+import { PHOTO_BYTES_MAX } from '@/components/photos/upload-size-schema';
 import { addPhoto, findRoundForUpload, type NewPhoto, type PhotoDto } from '@/db/queries/photos';
 import type { Viewer } from '@/db/queries/viewer';
 import { takePoint } from '@/lib/limits/limit';
@@ -8,7 +9,7 @@ import { Problem } from '@/lib/request/problem';
 import { orNotFound } from '@/lib/request/written';
 import { waitSentence } from '@/lib/request/wait-sentence';
 import { encodePhoto } from './encode';
-import { PHOTO_BYTES_MAX, PHOTO_FAULTS, type PhotoFault } from './faults';
+import { PHOTO_FAULTS, type PhotoFault } from './faults';
 import { storePhoto, unstorePhoto } from './keep-photo';
 import { withBody } from './read-body';
 

@@ -2,7 +2,7 @@ import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
 import type { UploadEnd } from '@/components/photos/send-upload';
 import { type UploadLine, UploadSender } from '@/components/photos/upload-sender';
 import { countUploads, listUploads, type WaitingUpload } from '@/components/photos/upload-store';
-import { PHOTO_BYTES_MAX } from '@/lib/photos/faults';
+import { PHOTO_BYTES_MAX } from '@/components/photos/upload-size-schema';
 import type { PhotoDto } from '@/db/queries/photos';
 
 type Send = (

@@ -6,7 +6,7 @@ import type { Viewer } from '@/db/queries/viewer';
 import { databaseOfFile } from '../../support/database';
 import { phoneJpeg } from '../../support/jpegs';
 import { makeRound, makeViewer } from '../../support/people';
-import { addedPhoto, getPicture, removePhoto, sendPhoto } from '../../support/photo-requests';
+import { addedPhoto, getPicture, removePhoto, restorePhoto, sendPhoto } from '../../support/photo-requests';
 import { storeOfFile } from '../../support/store';
 
 const asking = vi.hoisted(() => ({ viewer: null as Viewer | null }));
@@ -56,6 +56,31 @@ describe('a row and its files', () => {
     age(left, HOUR_MS + 1000);
     await sweep();
     expect(store.keys()).toEqual(before);
+  });
+});
+
+describe('a photo in the bin', () => {
+  it('is gone after thirty days but for an id and a hash, and its files a day after that', async () => {
+    const photo = await addedPhoto(sendPhoto(roundId, jpeg));
+    const [row] = await database.owner`select master_sha256 from photos where id = ${photo.id}`;
+    await removePhoto(photo.id);
+    const inDays = (days: number) => new Date(Date.now() + days * 24 * HOUR_MS);
+    const rows = () => database.owner`select id from photos where id = ${photo.id}`;
+    const files = () => store.keys().filter((key) => key.includes(photo.id));
+    await sweep(inDays(29.9));
+    expect(await rows()).toHaveLength(1);
+    await sweep(inDays(30.1));
+    expect(await rows()).toEqual([]);
+    expect(await database.owner`select id, hash, object_kind from tombstones`).toEqual([
+      { id: photo.id, hash: row?.master_sha256, object_kind: 'photo' },
+    ]);
+    expect(files()).toHaveLength(4);
+    await sweep(inDays(31));
+    expect(files()).toHaveLength(4);
+    await sweep(inDays(31.2));
+    expect(files()).toEqual([]);
+    expect(await database.owner`select key from doomed_objects`).toEqual([]);
+    expect((await restorePhoto(photo.id)).status).toBe(404);
   });
 });
 
