@@ -54,12 +54,20 @@ export function startReading(
   return { first, finish };
 }
 
+/** The ranking alone, for trying many strengths on many cases. */
+export function rankCase(knowledge: Knowledge, fitting: Case, strengths: Strengths): RankedItem[] {
+  const ready = prepare(knowledge, fitting, strengths);
+  const { marginals } = solveRound(ready.layout, ready.tables, ready.start, fitting);
+  const outlook = outlookOf(ready.layout, fitting, marginals);
+  return rankedItems(causeRows(outlook), scoreCorrections(outlook).scored);
+}
+
 type Part = Omit<Reading, 'checks' | 'exact' | 'engine'>;
 
 /** Everything that follows from the beliefs alone. */
 function decide(ready: Fitting, fitting: Case, { marginals }: Solution): { part: Part; scored: Scored[] } {
   const { layout, tables } = ready;
-  const outlook = outlookOf(ready, fitting, marginals);
+  const outlook = outlookOf(ready.layout, fitting, marginals);
   const { scored, spent } = scoreCorrections(outlook);
   const causes = causeRows(outlook);
   const { plan, muslin, leftOut } = planOf(outlook, scored, settleBefore(outlook, causes));

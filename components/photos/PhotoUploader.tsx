@@ -8,23 +8,20 @@ import type { PhotoDto } from '@/db/queries/photos';
 import type { View } from '@/diagnosis/garments/schema';
 import { UploadLines } from './UploadLines';
 import { useUploads } from './useUploads';
-import { VIEW_OPTIONS } from './view-words';
+import { TAKEN_OPTIONS, VIEW_OPTIONS } from './view-words';
 
 interface Props {
   userId: string;
   roundId: string;
   /** The view that is on the table, taken as what comes next. */
   view: View;
+  /** Where photos are there already, the questions wait behind a line. */
+  isFolded: boolean;
   onAdded: (photo: PhotoDto) => void;
 }
 
-const TAKEN = [
-  { value: 'camera', label: 'By a camera' },
-  { value: 'mirror', label: 'In a mirror' },
-] as const;
-
 /** Photos into a round, one or several: what they show and whether a mirror was between is asked, the rest goes by itself. */
-export function PhotoUploader({ userId, roundId, view, onAdded }: Props) {
+export function PhotoUploader({ userId, roundId, view, isFolded, onAdded }: Props) {
   const [chosenView, setChosenView] = useState<View | null>(null);
   const [taken, setTaken] = useState<'camera' | 'mirror'>('camera');
   const { lines, add, cancel } = useUploads({ userId, roundId, onAdded });
@@ -54,23 +51,34 @@ export function PhotoUploader({ userId, roundId, view, onAdded }: Props) {
       />
     </label>
   );
-  return (
+  const questions = (
     <div className="grid gap-4">
       <Choice legend="What it shows" options={VIEW_OPTIONS} value={shown} onChange={setChosenView} />
-      <Choice legend="Taken" options={TAKEN} value={taken} onChange={setTaken} />
+      <Choice legend="Taken" options={TAKEN_OPTIONS} value={taken} onChange={setTaken} />
       <div className="flex flex-wrap gap-3">
         {pick('Take a photo', Camera, true)}
         {pick('Add photos', ImagePlus, false)}
       </div>
-      <UploadLines lines={lines} onCancel={(key) => void cancel(key)} />
-      <Disclosure summary="How to take one that can be read">
-        <ul className="list-disc pl-5">
-          <li>Phone at hip height, at least two and a half metres away, level.</li>
-          <li>Lamp from the side, no flash. Plain wall, plain mid-tone cloth.</li>
-          <li>Usual heel, eyes ahead, feet a hand apart, arms a little away. One photo after five steps.</li>
-          <li>The phone’s own camera keeps its picture in the gallery, and perhaps in its cloud.</li>
-        </ul>
-      </Disclosure>
+      <HowToTake />
     </div>
+  );
+  return (
+    <div className="grid gap-4">
+      {isFolded ? <Disclosure summary="Add photos">{questions}</Disclosure> : questions}
+      <UploadLines lines={lines} onCancel={(key) => void cancel(key)} />
+    </div>
+  );
+}
+
+function HowToTake() {
+  return (
+    <Disclosure summary="How to take one that can be read">
+      <ul className="list-disc pl-5">
+        <li>Phone at hip height, at least two and a half metres away, level.</li>
+        <li>Lamp from the side, no flash. Plain wall, plain mid-tone cloth.</li>
+        <li>Usual heel, eyes ahead, feet a hand apart, arms a little away. One photo after five steps.</li>
+        <li>The phone’s own camera keeps its picture in the gallery, and perhaps in its cloud.</li>
+      </ul>
+    </Disclosure>
   );
 }

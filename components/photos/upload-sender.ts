@@ -1,7 +1,8 @@
 import type { PhotoDto } from '@/db/queries/photos';
 import type { View } from '@/diagnosis/garments/schema';
+import { PHOTO_BYTES_MAX, PHOTO_FAULTS } from '@/lib/photos/faults';
 import { makeUploadKey, preparePhoto } from './prepare-photo';
-import { sendUpload } from './send-upload';
+import { sendUpload, type UploadEnd } from './send-upload';
 import { dropUpload, keepUpload, listUploads, type WaitingUpload } from './upload-store';
 
 export interface UploadLine {
@@ -164,7 +165,10 @@ export class UploadSender {
     const abort = new AbortController();
     this.#sending = { key, abort };
     this.#edit(key, { state: 'sending', part: 0, message: '' });
-    const end = await sendUpload(prepared, (part) => this.#edit(key, { part }), abort.signal);
+    const end: UploadEnd =
+      prepared.file.size > PHOTO_BYTES_MAX
+        ? { kind: 'refused', message: PHOTO_FAULTS['too-large'].message }
+        : await sendUpload(prepared, (part) => this.#edit(key, { part }), abort.signal);
     this.#sending = null;
     if (end.kind === 'cancelled') return null;
     if (end.kind === 'again') {

@@ -27,15 +27,18 @@ function database(userId: string): Promise<IDBPDatabase<Uploads>> {
   const had = open.get(userId);
   if (had) return had;
   const letGo = () => void open.delete(userId);
-  const made = openDB<Uploads>(nameOf(userId), 1, {
-    upgrade: (db) => void db.createObjectStore('uploads', { keyPath: 'key' }).createIndex('round', 'roundId'),
-    // Signing out in another tab erases these files; a connection held here would keep them.
-    blocking: (_now, _wanted, event) => {
-      (event.target as IDBDatabase).close();
-      letGo();
-    },
-    terminated: letGo,
-  });
+  const opening = async () =>
+    openDB<Uploads>(nameOf(userId), 1, {
+      upgrade: (db) =>
+        void db.createObjectStore('uploads', { keyPath: 'key' }).createIndex('round', 'roundId'),
+      // Signing out in another tab erases these files; a connection held here would keep them.
+      blocking: (_now, _wanted, event) => {
+        (event.target as IDBDatabase).close();
+        letGo();
+      },
+      terminated: letGo,
+    });
+  const made = opening();
   made.catch(letGo);
   open.set(userId, made);
   return made;

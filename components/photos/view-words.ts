@@ -13,3 +13,8 @@ export const VIEW_OPTIONS = (Object.entries(VIEW_WORDS) as [View, string][]).map
   value,
   label,
 }));
+
+export const TAKEN_OPTIONS = [
+  { value: 'camera', label: 'By a camera' },
+  { value: 'mirror', label: 'In a mirror' },
+] as const;

@@ -4,9 +4,12 @@ import { useEffect, useState } from 'react';
 import useSWR from 'swr';
 import { MarkedPhoto } from '@/components/marks/MarkedPhoto';
 import { fetchJson } from '@/components/net/send';
+import { PhotoFacts } from '@/components/photos/PhotoFacts';
 import { PhotoUploader } from '@/components/photos/PhotoUploader';
+import { usePhotoEdits } from '@/components/photos/usePhotoEdits';
+import { VIEW_WORDS } from '@/components/photos/view-words';
 import { Button } from '@/components/ui/Button';
-import { Disclosure } from '@/components/ui/Disclosure';
+import { Notice } from '@/components/ui/Notice';
 import type { DeskRoundDto } from '@/db/queries/desk';
 import type { PhotoDto } from '@/db/queries/photos';
 import type { View } from '@/diagnosis/garments/schema';
@@ -34,10 +37,17 @@ export function PhotoStage({ round, photos: first, userId, isOwner, view, onView
   useEffect(() => {
     if (chosenView) onView(chosenView);
   }, [chosenView, onView]);
-  const added = (photo: PhotoDto) => {
-    void mutate((now = []) => [...now.filter(({ id }) => id !== photo.id), photo], { revalidate: false });
+  const put = (photo: PhotoDto) => {
+    const others = (now: PhotoDto[] = first) => now.filter(({ id }) => id !== photo.id);
+    const inOrder = (a: PhotoDto, b: PhotoDto) => (a.id < b.id ? -1 : 1);
+    void mutate((now) => [...others(now), photo].sort(inOrder), { revalidate: false });
     setChosenId(photo.id);
   };
+  const { message, removed, edit, remove, undo } = usePhotoEdits({
+    onChanged: put,
+    onRemoved: ({ id }) =>
+      void mutate((now = first) => now.filter((one) => one.id !== id), { revalidate: false }),
+  });
   return (
     <div className="grid gap-4">
       {chosen ? (
@@ -67,14 +77,34 @@ export function PhotoStage({ round, photos: first, userId, isOwner, view, onView
           </Button>
         </div>
       ) : null}
+      {isOwner && chosen && !isCovered ? (
+        <PhotoFacts
+          photo={chosen}
+          onEdit={(change) => void edit(chosen, change)}
+          onRemove={() => void remove(chosen)}
+        />
+      ) : null}
+      {removed ? (
+        <Notice role="status">
+          <p>
+            The photo ({VIEW_WORDS[removed.view].toLowerCase()}) is put away, with its marks, for 30 days.
+          </p>
+          <Button onClick={() => void undo()}>Bring it back</Button>
+        </Notice>
+      ) : null}
+      {message ? (
+        <Notice tone="care" role="alert">
+          {message}
+        </Notice>
+      ) : null}
       {isOwner ? (
-        photos.length === 0 ? (
-          <PhotoUploader userId={userId} roundId={round.id} view={view} onAdded={added} />
-        ) : (
-          <Disclosure summary="Add photos">
-            <PhotoUploader userId={userId} roundId={round.id} view={view} onAdded={added} />
-          </Disclosure>
-        )
+        <PhotoUploader
+          userId={userId}
+          roundId={round.id}
+          view={view}
+          isFolded={photos.length > 0}
+          onAdded={put}
+        />
       ) : null}
     </div>
   );

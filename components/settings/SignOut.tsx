@@ -1,5 +1,5 @@
 'use client';
-import { useEffect, useState } from 'react';
+import { useActionState, useEffect, useState } from 'react';
 import type { FormState } from '@/lib/request/action';
 import { countDrafts, wipeDrafts } from '@/components/offline/drafts';
 import { countUploads, wipeUploads } from '@/components/photos/upload-store';
@@ -18,18 +18,18 @@ export function SignOut({ userId, action }: Props) {
       setWaiting(drafts + uploads),
     );
   }, [userId]);
-  const leave = async (form: FormData) => {
-    await Promise.all([wipeDrafts(userId), wipeUploads(userId)]);
-    await action({}, form);
-  };
+  const [state, leave] = useActionState(action, {});
+  // The form is the server's own, so that it works before any of this has loaded; nothing can wait on the device before that.
+  const wipe = () => void Promise.all([wipeDrafts(userId), wipeUploads(userId)]);
   return (
-    <form action={leave} className="grid gap-2">
+    <form action={leave} onSubmit={wipe} className="grid gap-2">
       {waiting > 0 ? (
         <p className="border-l-4 border-basting pl-3">
           {waiting === 1 ? 'One thing waits' : `${waiting} things wait`} on this device and would be lost.
           Open its round with a connection first, and it is sent.
         </p>
       ) : null}
+      {state.message ? <p role="alert">{state.message}</p> : null}
       <div>
         <Button type="submit">Sign out</Button>
       </div>

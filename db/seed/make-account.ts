@@ -1,3 +1,4 @@
+import { eq } from 'drizzle-orm';
 import { v7 } from 'uuid';
 import { hashPassword } from '@/lib/auth/password';
 import { db } from '../client';
@@ -20,6 +21,8 @@ export async function makeDemoAccount({ email, password, name, unit }: DemoAccou
     unit: unit === 'in' ? ('in' as const) : ('cm' as const),
     isFitter: unit === 'in',
   };
+  // What an earlier, broken seeding left of this invented person goes first.
+  await db().delete(users).where(eq(users.email, email));
   await db()
     .insert(users)
     .values({ id, ...own, passwordHash: await hashPassword(password), emailVerifiedAt: new Date() });

@@ -1,3 +1,4 @@
+import sharp from 'sharp';
 import { ensureBucket } from '@/lib/photo-store';
 import accounts from './accounts.json' with { type: 'json' };
 import { DEMO_GARMENTS } from './demo';
@@ -5,6 +6,8 @@ import { hangDemoGarment } from './hang-garment';
 import { makeDemoAccount } from './make-account';
 
 /** Invented people and garments for a first look, made through the same functions that serve people. */
+// The demo draws its pictures itself, as SVG; what people send is never read as one.
+sharp.unblock({ operation: ['VipsForeignLoadSvg'] });
 await ensureBucket();
 for (const account of accounts) {
   const viewer = await makeDemoAccount(account);

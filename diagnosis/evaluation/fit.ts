@@ -1,4 +1,4 @@
-import { startReading } from '../diagnose';
+import { rankCase } from '../diagnose';
 import type { Knowledge } from '../garments/schema';
 import { GRADES } from '../garments/schema';
 import type { Strengths } from '../inference/strengths';
@@ -60,7 +60,7 @@ export function meanReciprocalPlace(
   strengths: Strengths,
 ): number {
   const sum = cases.reduce((total, published) => {
-    const { ranked } = startReading(knowledge, parsedCase(knowledge, published), strengths).first;
+    const ranked = rankCase(knowledge, parsedCase(knowledge, published), strengths);
     return total + 1 / placeOf(ranked, published.accept);
   }, 0);
   return sum / cases.length;
@@ -74,7 +74,7 @@ export function fitStrengths(
   knowledge: Knowledge,
   cases: readonly PublishedCase[],
   start: Strengths,
-  passes = 3,
+  passes = 2,
 ): Strengths {
   let best = start;
   let most = meanReciprocalPlace(knowledge, cases, best);
@@ -116,8 +116,7 @@ export function leaveSourcesOut(
       cases
         .filter((one) => one.source === source)
         .filter((one) => {
-          const { ranked } = startReading(knowledge, parsedCase(knowledge, one), strengths).first;
-          return placeOf(ranked, one.accept) === 1;
+          return placeOf(rankCase(knowledge, parsedCase(knowledge, one), strengths), one.accept) === 1;
         }).length
     );
   }, 0);

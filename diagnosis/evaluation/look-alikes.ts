@@ -15,8 +15,11 @@ export interface LookAlikeGroup {
   case: CaseInput;
   steps: {
     check: string;
-    /** Outcomes that settle something, with what they show; two or more are expected to share the first places. */
-    outcomes: { outcome: string; shows: Shown[] }[];
+    /**
+     * Outcomes that settle something, with what they show (two or more share the first places), and signs that the
+     * outcome itself names.
+     */
+    outcomes: { outcome: string; shows: Shown[]; also?: string[] }[];
     /** The outcome with which one goes on to the next step; undefined on the last. */
     goOn?: string;
   }[];
@@ -46,8 +49,9 @@ export function isOpenAtFirst(knowledge: Knowledge, group: LookAlikeGroup): bool
 export function walkGroup(knowledge: Knowledge, group: LookAlikeGroup): WalkedOutcome[] {
   const done: NonNullable<CaseInput['tests']> = [];
   return group.steps.flatMap(({ check, outcomes, goOn }) => {
-    const walked = outcomes.map(({ outcome, shows }) => {
-      const { ranked } = read(knowledge, { ...group.case, tests: [...done, { check, outcome }] });
+    const walked = outcomes.map(({ outcome, shows, also = [] }) => {
+      const signs = [...(group.case.signs ?? []), ...also.map((sign) => ({ sign, severity: 2 }))];
+      const { ranked } = read(knowledge, { ...group.case, signs, tests: [...done, { check, outcome }] });
       return {
         check,
         outcome,

@@ -1,6 +1,6 @@
 import { parseCase } from '../case';
 import type { Case, CaseInput } from '../case-schema';
-import { diagnose } from '../diagnose';
+import { diagnose, rankCase } from '../diagnose';
 import type { Correction, Knowledge } from '../garments/schema';
 import type { Strengths } from '../inference/strengths';
 import { POSSIBLE_FROM } from '../planning/words';
@@ -100,8 +100,7 @@ export function placeOf(ranked: readonly { id: string }[], accept: readonly stri
 /** The reading's own order. */
 export function readingRanker(knowledge: Knowledge, strengths: Strengths): Ranker {
   return (fitting) => {
-    const { ranked } = diagnose(knowledge, fitting, strengths);
-    return ranked.map(({ id }, place) => ({ id, score: -place }));
+    return rankCase(knowledge, fitting, strengths).map(({ id }, place) => ({ id, score: -place }));
   };
 }
 

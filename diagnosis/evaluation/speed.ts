@@ -57,7 +57,7 @@ function withSigns(knowledge: Knowledge, signs: readonly Sign[], random: Random)
 function readOnly(knowledge: Knowledge, fitting: Case): void {
   const ready = prepare(knowledge, fitting, STRENGTHS);
   const { marginals } = solveRound(ready.layout, ready.tables, ready.start, fitting);
-  scoreCorrections(outlookOf(ready, fitting, marginals));
+  scoreCorrections(outlookOf(ready.layout, fitting, marginals));
 }
 
 function timed(clock: () => number, work: () => unknown): number {

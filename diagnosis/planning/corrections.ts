@@ -13,6 +13,8 @@ const AMOUNTS_TRIED = 12;
 /** Cost, in tolerances of the need served, of a change that was not needed, beside the misfit it makes: for any, and per unit of risk. */
 const NEEDLESS_COST = 0.04;
 const RISK_COST = 0.15;
+/** How much of what a coupling spoils counts where it is set right later in the order of work. */
+const LATER_SHARE = 0.2;
 /** How much of a need is expected to go where the change is not a length. */
 const REMEDY_SHARE = 0.7;
 /** Left and right are one below this difference, mm (1/4 in). */
@@ -108,23 +110,25 @@ function scoreOne(outlook: Outlook, correction: Correction, side: Side): Scored 
 }
 
 /**
- * Expected misfit removed at the best amount up to a cap. A coupling is no reason to make a change: what it mends counts
- * only as far as evidence, not the prior, speaks for it; what it spoils counts in full.
+ * Expected misfit removed at the best amount up to a cap. A coupling is no reason to make a change: what it may mend does
+ * not count; what it spoils does, less where the order of work comes to it later anyway (a hem that drops is set last).
  */
 function bestGain(
-  { layout, marginals, prior }: Outlook,
-  { vector }: Correction,
+  { layout, marginals }: Outlook,
+  { vector, stage }: Correction,
   side: Side,
   capMm: number,
 ): number {
   const moves = vector.flatMap(({ dimension, perMm, coupling }) => {
     const at = layout.index.dimensions.get(dimension)!;
-    return variablesFor(layout, at, side).map((variable) => (amountMm: number) => {
-      const byZ = (-perMm * amountMm) / layout.scaleMm[at]!;
-      const removed = (belief: Float64Array) =>
-        expectedMisfit(layout, at, belief, 0) - expectedMisfit(layout, at, belief, byZ);
-      const gain = removed(marginals[variable]!);
-      return coupling && gain > 0 ? Math.max(0, gain - Math.max(0, removed(prior[variable]!))) : gain;
+    const later = layout.index.knowledge.dimensions[at]!.stage > stage;
+    return variablesFor(layout, at, side).map((variable) => {
+      const belief = marginals[variable]!;
+      const before = expectedMisfit(layout, at, belief, 0);
+      return (amountMm: number) => {
+        const gain = before - expectedMisfit(layout, at, belief, (-perMm * amountMm) / layout.scaleMm[at]!);
+        return coupling ? Math.min(0, gain) * (later ? LATER_SHARE : 1) : gain;
+      };
     });
   });
   let best = -Infinity;

@@ -1,7 +1,6 @@
 import type { Case, RoundEvidence, Side } from '../case-schema';
 import type { Direction } from '../garments/schema';
 import { tailsOf } from '../inference/beliefs';
-import type { Fitting } from '../inference/beliefs';
 import { GRID_SIZE, zAt } from '../inference/grid';
 import type { Layout } from '../inference/layout';
 import type { Range } from '../reading';
@@ -10,8 +9,6 @@ import type { Range } from '../reading';
 export interface Outlook {
   layout: Layout;
   marginals: readonly Float64Array[];
-  /** Beliefs before any evidence. */
-  prior: readonly Float64Array[];
   fitting: Case;
   /** Whether anything at all was recorded, in any round. */
   evidence: boolean;
@@ -20,15 +17,11 @@ export interface Outlook {
 }
 
 /** Looks at the beliefs of a case. */
-export function outlookOf(
-  { layout, prior }: Pick<Fitting, 'layout' | 'prior'>,
-  fitting: Case,
-  marginals: readonly Float64Array[],
-): Outlook {
+export function outlookOf(layout: Layout, fitting: Case, marginals: readonly Float64Array[]): Outlook {
   const rounds: RoundEvidence[] = [fitting, ...fitting.history];
   const firm = rounds.some(({ tests, measured }) => tests.length + measured.length > 0);
   const noted = rounds.some(({ signs, absent }) => signs.length + absent.length > 0);
-  return { layout, marginals, prior: prior.marginals, fitting, evidence: firm || noted, marksAlone: !firm };
+  return { layout, marginals, fitting, evidence: firm || noted, marksAlone: !firm };
 }
 
 /** A need in one direction: how probable, and how large if so, in millimetres of its own basis (unsigned). */

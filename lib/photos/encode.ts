@@ -1,11 +1,10 @@
 import 'server-only';
 import { createHash } from 'node:crypto';
 import sharp from 'sharp';
-import type { PhotoFault } from './faults';
+import { PHOTO_BYTES_MAX, type PhotoFault } from './faults';
 import { sniff } from './sniff';
 import { Turns } from './turns';
 
-export const PHOTO_BYTES_MAX = 25 * 1024 * 1024;
 const PIXELS_MAX = 50_000_000;
 const SECONDS_MAX = 20;
 const MASTER_PX = 2400;

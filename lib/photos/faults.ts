@@ -1,3 +1,5 @@
+export const PHOTO_BYTES_MAX = 25 * 1024 * 1024;
+
 /** Why a file was not taken: one sentence each. In every case nothing of it is kept. */
 export const PHOTO_FAULTS = {
   empty: { status: 422, message: 'This file is empty.' },

@@ -5,29 +5,36 @@ import type { PhotoFault } from './faults';
 const HELD_BYTES_MAX = 256 * 1024 * 1024;
 let heldBytes = 0;
 
+/** A body that is too long is read to its end unkept, so far: a client that is cut off while it sends never hears why. */
+const UNKEPT_BYTES_MAX = 128 * 1024 * 1024;
+
 type Read = { bytes: Buffer } | { fault: PhotoFault };
 
 async function readAll(request: Request, bytesMax: number, hold: (bytes: number) => boolean): Promise<Read> {
   const announced = request.headers.get('content-length');
-  if (Number(announced ?? 0) > bytesMax) return { fault: 'too-large' };
+  let fault: PhotoFault | null = Number(announced ?? 0) > bytesMax ? 'too-large' : null;
+  if (Number(announced ?? 0) > UNKEPT_BYTES_MAX) return { fault: 'too-large' };
   const chunks: Uint8Array[] = [];
   let bytes = 0;
   const reader = request.body?.getReader();
   for (let read = await reader?.read(); read && !read.done; read = await reader?.read()) {
     bytes += read.value.length;
-    const fault = bytes > bytesMax ? 'too-large' : hold(read.value.length) ? null : 'busy';
-    if (fault) {
+    if (bytes > bytesMax) fault = 'too-large';
+    else if (!fault && !hold(read.value.length)) fault = 'busy';
+    if (fault) chunks.length = 0;
+    else chunks.push(read.value);
+    if (bytes > UNKEPT_BYTES_MAX) {
       await reader?.cancel();
-      return { fault };
+      break;
     }
-    chunks.push(read.value);
   }
+  if (fault) return { fault };
   if (announced !== null && bytes !== Number(announced)) return { fault: 'cut' };
   return { bytes: Buffer.concat(chunks) };
 }
 
 /**
- * Works on the whole body of an upload, which is held in memory that long. Nothing beyond the limit is read, and a body that is
+ * Works on the whole body of an upload, which is held in memory that long. Nothing beyond the limit is kept, and a body that is
  * shorter than was announced is a fault, never a short file.
  * @param bytesMax the longest body that may be
  */

@@ -7,8 +7,8 @@ import { takePoint } from '@/lib/limits/limit';
 import { Problem } from '@/lib/request/problem';
 import { orNotFound } from '@/lib/request/written';
 import { waitSentence } from '@/lib/request/wait-sentence';
-import { encodePhoto, PHOTO_BYTES_MAX } from './encode';
-import { PHOTO_FAULTS, type PhotoFault } from './faults';
+import { encodePhoto } from './encode';
+import { PHOTO_BYTES_MAX, PHOTO_FAULTS, type PhotoFault } from './faults';
 import { storePhoto, unstorePhoto } from './keep-photo';
 import { withBody } from './read-body';
 

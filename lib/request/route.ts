@@ -5,6 +5,7 @@ import { currentViewer } from '@/lib/auth/viewer';
 import { env } from '@/lib/env';
 import { log } from '@/lib/log';
 import { answerJson, answerProblem, Problem } from './problem';
+import { readText } from './read-text';
 import { isSameOrigin } from './same-origin';
 
 interface RouteSpec<
@@ -41,9 +42,8 @@ async function readJson(request: Request): Promise<unknown> {
   if (!/^application\/json\b/.test(request.headers.get('content-type') ?? '')) {
     throw new Problem(415, 'content-type', 'This address takes JSON.');
   }
-  const text = await request.text();
-  if (text.length > JSON_BYTES_MAX)
-    throw new Problem(413, 'too-large', 'That is more than can be saved at once.');
+  const text = await readText(request, JSON_BYTES_MAX);
+  if (text === null) throw new Problem(413, 'too-large', 'That is more than can be saved at once.');
   try {
     return JSON.parse(text);
   } catch {

@@ -3,7 +3,7 @@ import { anySignedIn, everyone, only } from './roles';
 import type { HandlerRow } from './row';
 import { smallJpeg } from './small-jpeg';
 
-type Rest = Pick<HandlerRow, 'path' | 'access' | 'body' | 'hasFiles'>;
+type Rest = Pick<HandlerRow, 'path' | 'access' | 'body' | 'hasFiles' | 'isInBin'>;
 const handler = (method: HandlerRow['method'], file: string, rest: Rest): HandlerRow => ({
   kind: 'handler',
   method,
@@ -109,7 +109,7 @@ const PHOTOS = [
     body: () => ({ version: 1, isMirrored: true }),
   }),
   handler('DELETE', 'photos/[photoId]', { path: ({ photoId }) => `/api/photos/${photoId}`, access: owner }),
-  handler('POST', 'photos/[photoId]/restore', { path: ({ photoId }) => `/api/photos/${photoId}/restore`, access: owner }),
+  handler('POST', 'photos/[photoId]/restore', { path: ({ photoId }) => `/api/photos/${photoId}/restore`, access: owner, isInBin: true }),
   handler('GET', 'photos/[photoId]/marks', { path: ({ photoId }) => `/api/photos/${photoId}/marks`, access: readers }),
   handler('POST', 'photos/[photoId]/marks', {
     path: ({ photoId }) => `/api/photos/${photoId}/marks`,

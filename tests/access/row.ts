@@ -20,6 +20,8 @@ export interface HandlerRow extends Base {
   body?: (ids: Ids) => unknown;
   /** The photo of the world must lie in the store, not only in the table. */
   hasFiles?: boolean;
+  /** The photo of the world lies in the bin. */
+  isInBin?: boolean;
 }
 export interface ActionRow extends Base {
   kind: 'action';

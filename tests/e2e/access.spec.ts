@@ -2,7 +2,7 @@ import { expect, test } from '@playwright/test';
 import postgres from 'postgres';
 import { MATRIX } from '../access/matrix';
 import { ROLES } from '../access/roles';
-import { nameOf } from '../access/row';
+import { nameOf, type Row } from '../access/row';
 import { smallJpeg } from '../access/small-jpeg';
 import { makeWorld, unknownIds, type World } from '../access/world';
 import { answerOf, askAction, askHandler, askPage, inOrder, storePhoto, withoutIds } from '../support/ask';
@@ -11,14 +11,16 @@ import { answerOf, askAction, askHandler, askPage, inOrder, storePhoto, withoutI
 const sql = postgres(process.env.ADMIN_DATABASE_URL ?? '', { max: 2 });
 test.afterAll(() => sql.end());
 
-async function worldFor(hasFiles: boolean): Promise<World> {
+async function worldFor(row: Row): Promise<World> {
   const world = await makeWorld(sql);
-  return hasFiles ? { ...world, photoId: await storePhoto(world, await smallJpeg()) } : world;
+  if (row.kind !== 'handler') return world;
+  if (row.isInBin) await sql`update photos set deleted_at = now() where id = ${world.photoId}`;
+  return row.hasFiles ? { ...world, photoId: await storePhoto(world, await smallJpeg()) } : world;
 }
 
 for (const row of MATRIX) {
   test(`${nameOf(row)} is open to whom it should be, and to nobody else`, async () => {
-    const world = await worldFor(row.kind === 'handler' && row.hasFiles === true);
+    const world = await worldFor(row);
     const unknown = unknownIds();
     const send = (ids: Omit<World, 'sessions'>, session: string | null) => {
       if (row.kind === 'page') return askPage(row, ids, session);

