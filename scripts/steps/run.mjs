@@ -4,9 +4,11 @@ import { signalGroup } from './identity.mjs';
 import { Stop } from './say.mjs';
 
 const running = new Set();
+let isEnding = false;
 
 /** Ends whatever command is being run, with all it has started: we are stopping. */
 export function endCommands() {
+  isEnding = true; // what they say while they are being ended is nobody's concern
   for (const child of running) signalGroup(child.pid, 'SIGTERM');
 }
 
@@ -31,11 +33,11 @@ export async function run(
   child.stdout.on('data', (chunk) => {
     printed += chunk;
     all += chunk;
-    if (!quiet) process.stdout.write(chunk);
+    if (!quiet && !isEnding) process.stdout.write(chunk);
   });
   child.stderr.on('data', (chunk) => {
     all += chunk;
-    if (!quiet) process.stderr.write(chunk);
+    if (!quiet && !isEnding) process.stderr.write(chunk);
   });
   try {
     const [code] = await once(child, 'close');
