@@ -4,7 +4,7 @@ import { useRouter } from 'next/navigation';
 import { useState } from 'react';
 import { useForm } from 'react-hook-form';
 import { v7 } from 'uuid';
-import { z } from 'zod';
+import type { z } from 'zod';
 import { type Sent, sendJson } from '@/components/net/send';
 import { newPattern, patternSchema } from '@/components/patterns/pattern-schema';
 import { PatternFields } from '@/components/patterns/PatternFields';

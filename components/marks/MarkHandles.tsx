@@ -18,7 +18,7 @@ interface Props {
 /** The mark in hand: dragged whole by its line, or by one of its ends. Arrow keys do the same. */
 export function MarkHandles({ mark, surface, widthPx, heightPx, unit, onMoved, onMoving }: Props) {
   const grip = useRef<{ from: PhotoPoint; index: number | null; moved: Mark } | null>(null);
-  const grab = (index: number | null) => (event: PointerEvent<SVGElement>) => {
+  const grab = (event: PointerEvent<SVGElement>, index: number | null) => {
     if (!surface.current) return;
     event.stopPropagation();
     event.currentTarget.setPointerCapture(event.pointerId);
@@ -44,7 +44,7 @@ export function MarkHandles({ mark, surface, widthPx, heightPx, unit, onMoved, o
   const ends = mark.points.length === 1 ? [0] : [0, mark.points.length - 1];
   return (
     <g className="touch-none">
-      <g className="cursor-move" onPointerDown={grab(null)} {...moves}>
+      <g className="cursor-move" onPointerDown={(event) => grab(event, null)} {...moves}>
         <MarkShape mark={mark} widthPx={widthPx} heightPx={heightPx} unit={unit} isSelected />
       </g>
       {ends.map((index) => {
@@ -59,7 +59,7 @@ export function MarkHandles({ mark, surface, widthPx, heightPx, unit, onMoved, o
             stroke="#10141c"
             strokeWidth={3 * unit}
             className="cursor-grab"
-            onPointerDown={grab(index)}
+            onPointerDown={(event) => grab(event, index)}
             {...moves}
           />
         ) : null;

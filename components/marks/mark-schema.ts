@@ -21,4 +21,3 @@ export const marksSaveSchema = z.strictObject({
   upserts: z.array(z.strictObject({ mark: markSchema, seen: z.int().min(0) })).max(500),
   deletes: z.array(z.strictObject({ id: z.uuid(), seen: z.int().positive() })).max(500),
 });
-export type MarksSaveForm = z.infer<typeof marksSaveSchema>;

@@ -32,6 +32,14 @@ const savedMark = ({ points, severity, ...mark }: MarkDto): SavedMark => ({
   points: points.map(({ x, y }) => photoPoint(x, y)),
 });
 
+/** Before the server has answered there is nothing to lay under: an empty list would read as all marks deleted. */
+function layOver(kept: Kept, server: SavedMark[] | null): Kept {
+  if (!server) return kept;
+  const { history, known } = kept;
+  const merged = mergeServer(history.marks, known, server);
+  return { history: replaceMarks(history, merged.marks), known: merged.known };
+}
+
 interface ServerAnswer {
   saved: MarkDto[];
   deleted: string[];
@@ -55,30 +63,25 @@ export function useMarks(userId: string, photo: { id: string; revision: number }
   const keptKey = `${KEPT_FOR_UNDO}marks ${photo.id} ${photo.revision}`;
   const waitingKey = `marks ${photo.id}`;
   const url = `/api/photos/${photo.id}/marks`;
+  const server = useRef<SavedMark[] | null>(null);
   const { data, error } = useSWR<{ revision: number; marks: MarkDto[] }>(url, fetchJson, {
-    revalidateOnFocus: true,
+    onSuccess: ({ marks }) => {
+      server.current = marks.map(savedMark);
+      setKept((now) => now && layOver(now, server.current));
+    },
   });
 
-  // What was kept on the device comes first; the server's marks are laid under it as soon as they are there.
+  // What was kept on the device comes first; the server's marks are laid under it as soon as both are there.
   useEffect(() => {
     let isGone = false;
     void readDraft<Kept>(userId, keptKey).then((draft) => {
-      if (!isGone) setKept((now) => now ?? draft ?? { history: startHistory([]), known: {} });
+      if (!isGone)
+        setKept((now) => now ?? layOver(draft ?? { history: startHistory([]), known: {} }, server.current));
     });
     return () => {
       isGone = true;
     };
   }, [userId, keptKey]);
-
-  const isLoaded = kept !== null;
-  useEffect(() => {
-    if (!data || !isLoaded) return;
-    setKept((now) => {
-      if (!now) return now;
-      const merged = mergeServer(now.history.marks, now.known, data.marks.map(savedMark));
-      return { history: replaceMarks(now.history, merged.marks), known: merged.known };
-    });
-  }, [data, isLoaded]);
 
   const send = useCallback(
     async ({ history, known }: Kept) => {

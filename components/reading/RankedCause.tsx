@@ -22,7 +22,10 @@ export function RankedCause({ row, cause, onRuleOut }: Props) {
       <ReasonList because={row.because} against={row.against} />
       {onRuleOut ? (
         <div>
-          <Button onClick={() => onRuleOut(row.cause)} aria-label={`Looked at, it is not that: ${cause.name}`}>
+          <Button
+            onClick={() => onRuleOut(row.cause)}
+            aria-label={`Looked at, it is not that: ${cause.name}`}
+          >
             Looked at, it is not that
           </Button>
         </div>

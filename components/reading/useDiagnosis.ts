@@ -11,7 +11,6 @@ interface Diagnosis {
   knowledge: Knowledge | null;
   /** The newest answer; it stays while the next is computed. */
   reading: Reading | null;
-  isReading: boolean;
 }
 
 /** Reads the case in a worker, again whenever it changes. Only the newest answer is kept. */
@@ -20,7 +19,6 @@ export function useDiagnosis(garment: GarmentId, input: CaseInput): Diagnosis {
   const turn = useRef(0);
   const [knowledge, setKnowledge] = useState<Knowledge | null>(null);
   const [reading, setReading] = useState<Reading | null>(null);
-  const [isReading, setIsReading] = useState(true);
 
   useEffect(() => {
     const made = new Worker(new URL('./diagnosis.worker.ts', import.meta.url), { type: 'module' });
@@ -28,7 +26,6 @@ export function useDiagnosis(garment: GarmentId, input: CaseInput): Diagnosis {
     made.onmessage = ({ data }: MessageEvent<FromWorker>) => {
       if (data.kind === 'knowledge') return setKnowledge(data.knowledge);
       if (data.turn !== turn.current) return;
-      setIsReading(false);
       if (data.kind === 'reading') setReading(data.reading);
     };
     made.postMessage({ kind: 'open', garment } satisfies ToWorker);
@@ -40,9 +37,8 @@ export function useDiagnosis(garment: GarmentId, input: CaseInput): Diagnosis {
 
   useEffect(() => {
     turn.current += 1;
-    setIsReading(true);
     worker.current?.postMessage({ kind: 'read', turn: turn.current, input } satisfies ToWorker);
   }, [garment, input]);
 
-  return { knowledge, reading, isReading };
+  return { knowledge, reading };
 }

@@ -12,5 +12,3 @@ export function rangeWords([low, high]: readonly [number, number], unit: LengthU
   const bare = fromUnit === toUnit ? from.slice(0, from.lastIndexOf(' ')) : from;
   return `about ${bare} to ${to}`;
 }
-
-export const WORD_SHOWN = { likely: 'likely', possible: 'possible', 'less likely': 'less likely' } as const;

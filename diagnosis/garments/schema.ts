@@ -237,7 +237,6 @@ export type Dimension = z.infer<typeof dimensionSchema>;
 export type Cause = z.infer<typeof causeSchema>;
 export type Link = z.infer<typeof linkSchema>;
 export type Sign = z.infer<typeof signSchema>;
-export type SignTemplate = z.infer<typeof templateSchema>;
 export type Check = z.infer<typeof checkSchema>;
 export type Correction = z.infer<typeof correctionSchema>;
 export type ShapeNote = z.infer<typeof shapeSchema>;

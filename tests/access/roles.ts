@@ -27,7 +27,6 @@ const each = (answer: (role: Role) => Answer): Access =>
 type SignedOut = Exclude<Answer, 'open'>;
 
 export const everyone = each(() => 'open');
-export const nobody = each(() => 'missing');
 /** Lists, forms and settings: everyone has their own. */
 export const anySignedIn = (signedOut: SignedOut) =>
   each((role) => (role === 'anonymous' ? signedOut : 'open'));

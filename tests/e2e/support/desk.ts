@@ -1,4 +1,4 @@
-import { expect, type Locator, type Page } from '@playwright/test';
+import type { Locator, Page } from '@playwright/test';
 
 /** The picture on the table, as what can be drawn on. */
 export const surface = (page: Page): Locator => page.getByRole('application');
@@ -42,8 +42,4 @@ export async function saySign(page: Page, words: string, sign: string, strength:
     .click();
   await saved;
   await page.getByLabel('Find it by words').fill('');
-}
-
-export async function expectSaved(page: Page): Promise<void> {
-  await expect(page.getByRole('status').filter({ hasText: 'Saved' }).first()).toBeVisible();
 }

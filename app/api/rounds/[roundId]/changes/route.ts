@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { planSchema } from '@/components/round/round-schema';
 import { planChange } from '@/db/queries/changes';
+import { keepReading } from '@/db/queries/readings';
 import { readAmount } from '@/lib/request/read-amount';
 import { route } from '@/lib/request/route';
 import { orNotFound } from '@/lib/request/written';
@@ -10,6 +11,8 @@ export const POST = route(
   async ({ viewer, params, body: { id, amount, ...plan } }) => {
     const read = amount ? readAmount(amount, 'amount') : null;
     const planned = { ...plan, plannedMm: read?.mm ?? null, plannedTyped: read?.typed ?? null };
-    return orNotFound(await planChange(viewer, params.roundId, id, planned));
+    const change = orNotFound(await planChange(viewer, params.roundId, id, planned));
+    await keepReading(viewer, params.roundId);
+    return change;
   },
 );
