@@ -10,7 +10,11 @@ const server = vi.hoisted(() => ({ send: vi.fn<(upload: WaitingUpload) => Promis
 vi.mock('@/components/photos/send-upload', () => ({ sendUpload: server.send }));
 vi.mock('@/components/photos/prepare-photo', async () => {
   const { v7 } = await import('uuid');
-  return { makeUploadKey: () => v7(), preparePhoto: async (file: Blob) => file };
+  return {
+    makeUploadKey: () => v7(),
+    preparePhoto: async (file: Blob) => file,
+    readyToPrepare: async () => true,
+  };
 });
 
 const photo = (id: string) => ({ id }) as PhotoDto;
