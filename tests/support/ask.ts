@@ -19,7 +19,7 @@ export async function ask(path: string, session: string | null, init: RequestIni
   const headers = new Headers(init.headers);
   if (session) headers.set('cookie', `session=${session}`);
   if (init.method && init.method !== 'GET') headers.set('origin', ORIGIN);
-  const response = await fetch(new URL(path, ORIGIN), { ...init, headers, redirect: 'manual' });
+  const response = await fetch(new URL(`${ORIGIN}${path}`), { ...init, headers, redirect: 'manual' });
   const body = await response.text();
   return {
     status: response.status,
