@@ -33,7 +33,7 @@ export function CheckCard({ check, answer, side, unit, onAnswer }: Props) {
   return (
     <div className="grid gap-3 border-l-4 border-seam py-2 pl-4">
       <div>
-        <h4 className="font-bold">{check.question}</h4>
+        <h3 className="font-bold">{check.question}</h3>
         <p className="text-sm text-graphite">
           {EFFORT[check.effort]}
           {check.secondPerson ? ', easier with a second person' : ''}

@@ -27,10 +27,10 @@ export function PlannedCard({ change, correction, stops, unit, onSet, onDrop }: 
     amounts && plannedMm !== null && plannedMm > stopsIn(unit, { ...amounts, ...stops }).capRoundMm + 1e-6;
   return (
     <li className="grid gap-3 border-l-4 border-chalk bg-paper px-4 py-3">
-      <h4 className="font-bold">
+      <h3 className="font-bold">
         {correction.name}
         {sideWords(change.side)}
-      </h4>
+      </h3>
       {amounts && plannedMm !== null ? (
         <Tape
           label="How much"

@@ -15,7 +15,7 @@ export function RankedCause({ row, cause, onRuleOut }: Props) {
   return (
     <li className="grid gap-2 border-l-4 border-basting pl-4">
       <div className="flex flex-wrap items-baseline justify-between gap-x-3">
-        <h4 className="font-bold">First: {cause.name}</h4>
+        <h3 className="font-bold">First: {cause.name}</h3>
         <span className="text-sm text-graphite">{row.word}</span>
       </div>
       <p>{row.action}</p>

@@ -32,10 +32,10 @@ export function RankedCorrection({ row, correction, unit, isPlanned, onTake }: P
   return (
     <li className="grid gap-2 border-l-4 border-seam pl-4">
       <div className="flex flex-wrap items-baseline justify-between gap-x-3">
-        <h4 className="font-bold">
+        <h3 className="font-bold">
           {row.name}
           {sideWords(row.side)}
-        </h4>
+        </h3>
         <span className="text-sm text-graphite">{row.word}</span>
       </div>
       {now !== null && correction.amounts ? (

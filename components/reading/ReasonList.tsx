@@ -23,7 +23,7 @@ function Side({ title, reasons }: { title: string; reasons: Reason[] }) {
   if (reasons.length === 0) return null;
   return (
     <div>
-      <h5 className="font-bold">{title}</h5>
+      <h4 className="font-bold">{title}</h4>
       <ul className="grid gap-2">
         {reasons.map((reason) => (
           <li key={`${reason.kind} ${reason.id} ${reason.side}`} className="text-sm">

@@ -31,9 +31,9 @@ export function SignRow({ sign, severity, side, onChange }: Props) {
     >
       <div className="flex items-start justify-between gap-2">
         <div>
-          <h4 id={id} className="font-bold">
+          <h3 id={id} className="font-bold">
             {sign.name}
-          </h4>
+          </h3>
           <p className="max-w-prose text-sm text-graphite">{sign.description}</p>
         </div>
         {severity === null ? null : (
