@@ -56,7 +56,7 @@ for (const colorScheme of ['light', 'dark'] as const) {
   });
 
   test(`axe finds nothing on signed-in pages, ${colorScheme}`, async ({ page }) => {
-    test.setTimeout(180_000);
+    test.setTimeout(300_000);
     await page.emulateMedia({ colorScheme });
     await signIn(page);
     const journals = await page
