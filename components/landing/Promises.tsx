@@ -5,8 +5,9 @@ export function Promises() {
         Your photos
       </h2>
       <p className="max-w-prose">
-        Photos of bodies in half-sewn clothes are the most private thing here. Nobody sees yours but you. Place
-        and camera data are removed before a photo is kept. No page here opens them to whoever runs the site.
+        Photos of bodies in half-sewn clothes are the most private thing here. Nobody sees yours but you.
+        Place and camera data are removed before a photo is kept. No page here opens them to whoever runs the
+        site.
       </p>
       <p className="max-w-prose text-graphite">
         Ruckle fits clothes to people. It is no medical advice, and not for compression, medical or protective
