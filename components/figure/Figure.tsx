@@ -6,7 +6,7 @@ import { figureZones, landmarks, type FigureView, type ZoneAt } from '@/diagnosi
 import { figurePoint, type FigurePoint } from '@/diagnosis/figure/point';
 import type { Proportions } from '@/diagnosis/figure/proportions';
 import { drawingSpace, UNIT } from './drawing-space';
-import { BareLegs, BodyLines, BodyParts, FormLines } from './FigureBody';
+import { BareBody, BodyLines, BodyParts, FormLines } from './FigureBody';
 import { FigureTrousers } from './FigureTrousers';
 import { FigureZones } from './FigureZones';
 import { polygonPath } from './polygon-path';
@@ -25,6 +25,7 @@ type Props = {
   proportions: Proportions;
   /** Says what the drawing shows: "Front of the figure". */
   title: string;
+  /** Only the front and the back can be drawn without. */
   withTrousers?: boolean;
   highlighted?: readonly ZoneAt[];
   marks?: readonly FigureMark[];
@@ -44,6 +45,7 @@ export function Figure(props: Props) {
   const id = useId();
   const space = drawingSpace(view, proportions);
   const shared = { view, proportions, space };
+  const isDressed = withTrousers || (view !== 'front' && view !== 'back');
   const shownZones = figureZones(view, proportions).filter(({ zone, side }) =>
     highlighted.some((one) => one.zone === zone && one.side === side),
   );
@@ -58,11 +60,7 @@ export function Figure(props: Props) {
       <Fade id={`${id}-fade`} width={space.width} />
       <Ground {...shared} />
       <g mask={`url(#${id}-fade)`}>
-        <BodyParts {...shared} parts={['foot']} />
-        {withTrousers ? null : <BareLegs {...shared} />}
-        <BodyParts {...shared} parts={['torso']} />
-        {withTrousers ? <FigureTrousers {...shared} /> : null}
-        {withTrousers ? <FormLines {...shared} /> : null}
+        {isDressed ? <Dressed {...shared} /> : <BareBody {...shared} />}
         <BodyParts {...shared} parts={['arm']} />
         <BodyLines {...shared} />
       </g>
@@ -84,6 +82,16 @@ export function Figure(props: Props) {
 }
 
 type Shared = { view: FigureView; proportions: Proportions; space: ReturnType<typeof drawingSpace> };
+
+function Dressed(shared: Shared) {
+  return (
+    <>
+      <BodyParts {...shared} parts={['foot', 'torso']} />
+      <FigureTrousers {...shared} />
+      <FormLines {...shared} />
+    </>
+  );
+}
 
 /** The body is not finished above the chest: it fades, as nobody is asked for more. */
 function Fade({ id, width }: { id: string; width: number }) {

@@ -1,5 +1,11 @@
-import { bodyShapes, type BodyPart } from '@/diagnosis/figure/body';
-import { footLines, formLines, handLines, underwearOutline } from '@/diagnosis/figure/body-details';
+import { bareOutline, bodyShapes, type BodyPart } from '@/diagnosis/figure/body';
+import {
+  footLines,
+  formLines,
+  handLines,
+  kneeLines,
+  underwearOutline,
+} from '@/diagnosis/figure/body-details';
 import type { FigureView } from '@/diagnosis/figure/figure';
 import type { Proportions } from '@/diagnosis/figure/proportions';
 import { cubicPath } from '@/diagnosis/figure/svg-path';
@@ -9,7 +15,6 @@ type Props = { view: FigureView; proportions: Proportions; space: DrawingSpace }
 
 const BODY_LINE = { stroke: 'var(--graphite, #4a5360)', strokeWidth: 1.6 } as const;
 const FINE_LINE = { stroke: 'var(--graphite, #4a5360)', strokeWidth: 1, fill: 'none' } as const;
-const STANDING = new Set<FigureView>(['front', 'back']);
 
 /** Some parts of the bare figure, drawn in paper with a thinner line than the garment. */
 export function BodyParts({ view, proportions, space, parts }: Props & { parts: readonly BodyPart[] }) {
@@ -41,18 +46,32 @@ export function BodyLines({ view, proportions, space }: Props) {
   ));
 }
 
-/** What lies under the trousers when they are not drawn: the legs, plainly covered at the hip. */
-export function BareLegs({ view, proportions, space }: Props) {
-  if (!STANDING.has(view)) return null;
+/** A standing body without trousers, plainly covered at the hip. Seen from the side a figure always wears them. */
+export function BareBody({ view, proportions, space }: Props) {
+  if (view !== 'front' && view !== 'back') return null;
   return (
     <>
-      <BodyParts view={view} proportions={proportions} space={space} parts={['leg']} />
+      <path
+        d={cubicPath(bareOutline(view, proportions), space.place, true)}
+        fill="var(--paper, #fffdf8)"
+        vectorEffect="non-scaling-stroke"
+        {...BODY_LINE}
+      />
       <path
         d={cubicPath(underwearOutline(proportions), space.place, true)}
         fill="var(--cloth, #efe6d3)"
         vectorEffect="non-scaling-stroke"
         {...BODY_LINE}
       />
+      {kneeLines(view, proportions).map((segments, index) => (
+        <path
+          key={index}
+          d={cubicPath(segments, space.place)}
+          strokeLinecap="round"
+          vectorEffect="non-scaling-stroke"
+          {...FINE_LINE}
+        />
+      ))}
     </>
   );
 }

@@ -1,8 +1,7 @@
 import { armAxis } from './body';
-import { curveSegments, type CubicSegment } from './curve';
+import { curveSegments, mirrorSegments, reverseSegments, type CubicSegment } from './curve';
 import type { FigureView } from './figure';
 import { garmentRows } from './garment-front-back';
-import { mirrorPoint } from './point';
 import type { Proportions } from './proportions';
 import { levelY, standingWidths } from './standing';
 import { LEVELS } from './zone-tables';
@@ -15,15 +14,7 @@ function strokeThrough(...places: readonly Place[]): Stroke {
 }
 
 function onBothSides(strokes: readonly Stroke[]): Stroke[] {
-  const other = strokes.map((stroke) =>
-    stroke.map(({ from, control1, control2, to }) => ({
-      from: mirrorPoint(from),
-      control1: mirrorPoint(control1),
-      control2: mirrorPoint(control2),
-      to: mirrorPoint(to),
-    })),
-  );
-  return [...strokes, ...other];
+  return [...strokes, ...strokes.map(mirrorSegments)];
 }
 
 /** The lines between the fingers of a hand at rest, and the fold at the wrist. */
@@ -66,13 +57,33 @@ export function formLines(view: FigureView, proportions: Proportions): Stroke[] 
   return onBothSides([strokeThrough(at(1.0, 0.1), at(1.035, 0.3), at(1.02, 0.56), at(0.97, 0.74))]);
 }
 
-/** A plain undergarment for the figure without trousers, closed, over both hips. */
+/** A plain undergarment for the figure without trousers, closed. */
 export function underwearOutline(proportions: Proportions): Stroke {
   const w = standingWidths(proportions);
-  const left: Place[] = [
-    [0, 0.3], [0.6 * w.highHipHalf, 0.285], [w.highHipHalf - 0.012, 0.26], [w.hipHalf - 0.035, 0.55],
-    [w.hipHalf - 0.02, 0.74], [0.62 * w.hipHalf, 0.86], [0.25 * w.hipHalf, 0.99], [0.09, 1.04], [0, 1.035],
-  ]; // prettier-ignore
-  const right = left.slice(1, -1).map(([x, y]): Place => [-x, y]).reverse(); // prettier-ignore
-  return strokeThrough(...left, ...right, left[0]!);
+  const [waistSide, legSide]: Place[] = [[0.985 * w.highHipHalf, 0.31], [w.hipHalf - 0.016, 0.72]]; // prettier-ignore
+  const left = [
+    ...strokeThrough([0, 0.34], [0.5 * w.highHipHalf, 0.335], waistSide!),
+    ...strokeThrough(waistSide!, [0.5 * (w.highHipHalf + w.hipHalf) + 0.002, 0.51], legSide!),
+    ...strokeThrough(
+      legSide!,
+      [0.66 * w.hipHalf, 0.845],
+      [0.3 * w.hipHalf, 0.985],
+      [0.075, 1.055],
+      [0, 1.05],
+    ),
+  ];
+  return [...left, ...reverseSegments(mirrorSegments(left))];
+}
+
+/** The knees of the bare figure from the front, the hollows behind them from the back. */
+export function kneeLines(view: 'front' | 'back', proportions: Proportions): Stroke[] {
+  const { kneeAxis: x } = standingWidths(proportions);
+  const y = levelY(LEVELS.knee, proportions);
+  if (view === 'back') {
+    return onBothSides([strokeThrough([x - 0.1, y + 0.02], [x, y + 0.05], [x + 0.1, y + 0.02])]);
+  }
+  return onBothSides([
+    strokeThrough([x - 0.09, y - 0.06], [x - 0.1, y + 0.04], [x - 0.055, y + 0.12]),
+    strokeThrough([x + 0.09, y - 0.06], [x + 0.1, y + 0.04], [x + 0.055, y + 0.12]),
+  ]);
 }

@@ -1,12 +1,11 @@
-import { curveSegments, type CubicSegment } from './curve';
+import { curveSegments, mirrorSegments, type CubicSegment } from './curve';
 import type { FigureView } from './figure';
-import { mirrorPoint } from './point';
 import type { Proportions } from './proportions';
 import { seatedLegs } from './seated';
 import { levelY, standingWidths } from './standing';
 import { LEVELS } from './zone-tables';
 
-export type BodyPart = 'torso' | 'arm' | 'foot' | 'leg';
+export type BodyPart = 'torso' | 'arm' | 'foot';
 
 /** One closed outline of the body; later shapes lie in front of earlier ones. */
 export type BodyShape = { readonly part: BodyPart; readonly segments: readonly CubicSegment[] };
@@ -20,32 +19,28 @@ function closedCurve(places: readonly Place[]): CubicSegment[] {
   return curveSegments({ knots: wrapped.map(([x, y], v) => ({ v, x, y })) }).slice(1, count + 1);
 }
 
-function mirrored(segments: readonly CubicSegment[]): CubicSegment[] {
-  return segments.map(({ from, control1, control2, to }) => ({
-    from: mirrorPoint(from),
-    control1: mirrorPoint(control1),
-    control2: mirrorPoint(control2),
-    to: mirrorPoint(to),
-  }));
-}
-
 /** Half the width of the chest under the arms: between the waist and the hip, steadied by a constant frame. */
 function chestHalf({ hip, waist }: Proportions): number {
   return 0.16 * waist + 0.34 * hip + 0.1;
 }
 
-/** The trunk above the waist up to the neck, closed inside the garment below it. */
-function frontTorso(proportions: Proportions): CubicSegment[] {
+/** The left side of the trunk from the neck down to the waist. */
+function trunkPlaces(proportions: Proportions): Place[] {
   const waistHalf = 0.495 * proportions.waist;
   const chest = chestHalf(proportions);
   const rib = 0.5 * waistHalf + 0.5 * chest - 0.015;
-  const right: Place[] = [
+  return [
     [0.17, -2.02], [0.18, -1.86], [0.36, -1.74], [chest + 0.1, -1.6], [chest + 0.07, -1.34], [chest + 0.01, -1.1],
-    [chest - 0.005, -0.85], [rib, -0.45], [waistHalf + 0.01, -0.14], [waistHalf, 0], [waistHalf - 0.02, 0.1],
-    [waistHalf - 0.16, 0.16],
+    [chest - 0.005, -0.85], [rib, -0.45], [waistHalf + 0.01, -0.14], [waistHalf + 0.005, 0],
   ]; // prettier-ignore
-  const left = right.map(([x, y]): Place => [-x, y]).reverse();
-  return closedCurve([...right, ...left]);
+}
+
+/** The trunk above the waist, closed inside the garment below it. */
+function frontTorso(proportions: Proportions): CubicSegment[] {
+  const waistHalf = 0.495 * proportions.waist;
+  const left: Place[] = [...trunkPlaces(proportions), [waistHalf - 0.02, 0.1], [waistHalf - 0.16, 0.16]];
+  const right = left.map(([x, y]): Place => [-x, y]).reverse();
+  return closedCurve([...left, ...right]);
 }
 
 /** The middle line of the arm: shoulder, elbow and wrist, hanging clear of the hip. */
@@ -64,13 +59,15 @@ function frontArm(proportions: Proportions): CubicSegment[] {
   const { shoulder, elbow, wrist } = armAxis(proportions);
   const [sx, ex, wx] = [shoulder[0], elbow[0], wrist[0]];
   const [upper, fore] = [0.5 * sx + 0.5 * ex, 0.65 * ex + 0.35 * wx];
+  const stout = 0.7 + 0.15 * (proportions.waist + proportions.hip);
+  const arm = (axis: number, by: number, y: number): Place => [axis + by * stout, y];
   return closedCurve([
-    [sx - 0.06, -1.6], [sx + 0.1, -1.54], [sx + 0.17, -1.36], [upper + 0.155, -0.92], [ex + 0.125, -0.5],
-    [ex + 0.135, -0.34], [fore + 0.135, -0.08], [wx + 0.09, 0.27], [wx + 0.075, 0.42], [wx + 0.098, 0.54],
-    [wx + 0.115, 0.7], [wx + 0.108, 0.84], [wx + 0.085, 0.96], [wx + 0.045, 1.045], [wx, 1.05], [wx - 0.028, 0.98],
-    [wx - 0.042, 0.86], [wx - 0.06, 0.86], [wx - 0.098, 0.87], [wx - 0.125, 0.8], [wx - 0.12, 0.68], [wx - 0.1, 0.54],
-    [wx - 0.082, 0.42], [wx - 0.088, 0.26], [fore - 0.125, -0.1], [ex - 0.115, -0.4], [upper - 0.135, -0.85],
-    [sx - 0.14, -1.18], [sx - 0.16, -1.4],
+    arm(sx, -0.06, -1.6), arm(sx, 0.1, -1.54), arm(sx, 0.17, -1.36), arm(upper, 0.155, -0.92), arm(ex, 0.125, -0.5),
+    arm(ex, 0.13, -0.34), arm(fore, 0.132, -0.08), arm(wx, 0.092, 0.27), [wx + 0.077, 0.42], [wx + 0.1, 0.54],
+    [wx + 0.118, 0.7], [wx + 0.114, 0.84], [wx + 0.096, 0.965], [wx + 0.062, 1.04], [wx + 0.015, 1.06],
+    [wx - 0.028, 1.03], [wx - 0.046, 0.94], [wx - 0.05, 0.85], [wx - 0.072, 0.875], [wx - 0.106, 0.87],
+    [wx - 0.128, 0.8], [wx - 0.122, 0.68], [wx - 0.1, 0.54], [wx - 0.082, 0.42], arm(wx, -0.088, 0.26),
+    arm(fore, -0.12, -0.1), arm(ex, -0.112, -0.4), arm(upper, -0.135, -0.85), arm(sx, -0.14, -1.18), arm(sx, -0.16, -1.4),
   ]); // prettier-ignore
 }
 
@@ -84,39 +81,46 @@ function foldedArm({ waist, hip }: Proportions): CubicSegment[] {
   ]); // prettier-ignore
 }
 
-/** The bare leg on the left of the body, from the hip into the foot. */
-function frontLeg(proportions: Proportions): CubicSegment[] {
+/** The left side of a foot-to-hip outline, from the waist down the outside, round the foot and up the inside to the fork. */
+function legPlaces(view: 'front' | 'back', proportions: Proportions): Place[] {
   const w = standingWidths(proportions);
   const y = (v: number) => levelY(v, proportions);
   const { thigh, hip } = proportions;
-  const knee = 0.195 + 0.07 * (thigh - 1);
-  const calf = 0.205 + 0.08 * (thigh - 1);
+  const knee = 0.19 + 0.06 * (thigh - 1) + 0.05 * (hip - 1);
+  const calf = 0.2 + 0.07 * (thigh - 1) + 0.06 * (hip - 1);
   const calfAxis = 0.5 * w.kneeAxis + 0.5 * w.hemAxis;
-  const thighOuter = w.thighOuter - 0.02;
-  return closedCurve([
-    [0.505 * proportions.waist, 0.02], [w.hipHalf - 0.04 * hip, 0.45], [w.hipHalf - 0.015, LEVELS.hip],
-    [w.thighTop - 0.015, 1], [thighOuter, y(1.3)], [w.kneeAxis + knee + 0.04, y(1.85)], [w.kneeAxis + knee, y(2.15)],
-    [calfAxis + calf, y(2.6)], [w.hemAxis + 0.13, y(3.25)], [w.hemAxis + 0.105, y(3.58)], [w.hemAxis - 0.1, y(3.58)],
-    [w.hemAxis - 0.12, y(3.25)], [calfAxis - calf + 0.02, y(2.65)], [w.kneeAxis - knee + 0.015, y(2.2)],
-    [w.kneeAxis - knee - 0.01, y(1.9)], [0.045, y(1.3)], [0.015, 1.06], [0.002, 1], [0.001, 0.6], [0.001, 0.05],
-  ]); // prettier-ignore
+  const foot = footPlaces(view, proportions);
+  return [
+    [0.97 * w.highHipHalf, LEVELS.highHip - 0.04], [w.hipHalf - 0.015, LEVELS.hip], [w.thighTop - 0.012, 1],
+    [w.thighOuter - 0.02, y(1.3)], [w.kneeAxis + knee + 0.05, y(1.82)], [w.kneeAxis + knee, y(2.12)],
+    [w.kneeAxis + knee - 0.005, y(2.25)], [calfAxis + calf, y(2.62)], [w.hemAxis + 0.13, y(3.2)], ...foot,
+    [w.hemAxis - 0.12, y(3.2)], [calfAxis - calf + 0.02, y(2.68)], [w.kneeAxis - knee + 0.02, y(2.3)],
+    [w.kneeAxis - knee + 0.01, y(2.12)], [Math.min(w.kneeAxis - knee - 0.03, 0.12), y(1.8)], [0.03, y(1.3)], [0.012, 1.06],
+  ]; // prettier-ignore
 }
 
-function standingFoot(view: 'front' | 'back', proportions: Proportions): CubicSegment[] {
+/** The whole standing body in one outline, for a figure without trousers. */
+export function bareOutline(view: 'front' | 'back', proportions: Proportions): CubicSegment[] {
+  const left = [...trunkPlaces(proportions), ...legPlaces(view, proportions)];
+  const right = left.map(([x, y]): Place => [-x, y]).reverse();
+  return closedCurve([...left, [0, 1.02], ...right]);
+}
+
+function footPlaces(view: 'front' | 'back', proportions: Proportions): Place[] {
   const { hemAxis: x } = standingWidths(proportions);
   const y = levelY(LEVELS.hem, proportions);
   if (view === 'back') {
-    return closedCurve([
-      [x - 0.11, y - 0.14], [x - 0.105, y - 0.02], [x - 0.125, y + 0.12], [x - 0.12, y + 0.22], [x - 0.05, y + 0.265],
-      [x + 0.06, y + 0.265], [x + 0.16, y + 0.25], [x + 0.2, y + 0.2], [x + 0.17, y + 0.12], [x + 0.115, y],
-      [x + 0.105, y - 0.14],
-    ]); // prettier-ignore
+    return [
+      [x + 0.105, y - 0.14], [x + 0.112, y], [x + 0.165, y + 0.12], [x + 0.195, y + 0.2], [x + 0.155, y + 0.25],
+      [x + 0.06, y + 0.265], [x - 0.05, y + 0.265], [x - 0.115, y + 0.22], [x - 0.12, y + 0.12], [x - 0.1, y - 0.02],
+      [x - 0.105, y - 0.14],
+    ]; // prettier-ignore
   }
-  return closedCurve([
-    [x - 0.1, y - 0.14], [x - 0.105, y], [x - 0.13, y + 0.1], [x - 0.16, y + 0.2], [x - 0.165, y + 0.28],
-    [x - 0.13, y + 0.335], [x - 0.06, y + 0.35], [x + 0.03, y + 0.345], [x + 0.11, y + 0.325], [x + 0.17, y + 0.29],
-    [x + 0.195, y + 0.24], [x + 0.18, y + 0.17], [x + 0.14, y + 0.08], [x + 0.11, y - 0.02], [x + 0.105, y - 0.14],
-  ]); // prettier-ignore
+  return [
+    [x + 0.105, y - 0.14], [x + 0.11, y - 0.02], [x + 0.14, y + 0.08], [x + 0.18, y + 0.17], [x + 0.198, y + 0.24],
+    [x + 0.172, y + 0.292], [x + 0.11, y + 0.325], [x + 0.03, y + 0.345], [x - 0.06, y + 0.352], [x - 0.13, y + 0.337],
+    [x - 0.165, y + 0.28], [x - 0.158, y + 0.2], [x - 0.13, y + 0.1], [x - 0.105, y], [x - 0.1, y - 0.14],
+  ]; // prettier-ignore
 }
 
 function sideTorso({ waist, hip, front }: Proportions): CubicSegment[] {
@@ -139,7 +143,7 @@ function sideFoot(x: number, y: number): CubicSegment[] {
   ]); // prettier-ignore
 }
 
-/** The bare parts of a figure from back to front. The leg is drawn only where the figure wears no trousers. */
+/** The bare parts of a figure from back to front. */
 export function bodyShapes(view: FigureView, proportions: Proportions): BodyShape[] {
   const hemY = levelY(LEVELS.hem, proportions);
   if (view === 'left' || view === 'right') {
@@ -157,17 +161,14 @@ export function bodyShapes(view: FigureView, proportions: Proportions): BodyShap
       { part: 'arm', segments: foldedArm(proportions) },
     ];
   }
-  const leg = frontLeg(proportions);
-  const foot = standingFoot(view, proportions);
+  const foot = closedCurve(footPlaces(view, proportions));
   const arm = frontArm(proportions);
   return [
-    { part: 'leg', segments: leg },
-    { part: 'leg', segments: mirrored(leg) },
     { part: 'foot', segments: foot },
-    { part: 'foot', segments: mirrored(foot) },
+    { part: 'foot', segments: mirrorSegments(foot) },
     { part: 'torso', segments: frontTorso(proportions) },
     { part: 'arm', segments: arm },
-    { part: 'arm', segments: mirrored(arm) },
+    { part: 'arm', segments: mirrorSegments(arm) },
   ];
 }
 

@@ -1,4 +1,4 @@
-import { figurePoint, type FigurePoint } from './point';
+import { figurePoint, mirrorPoint, type FigurePoint } from './point';
 
 /** A place that a curve passes at parameter `v`; the parameters of a curve's knots rise strictly. */
 export type Knot = { readonly v: number; readonly x: number; readonly y: number };
@@ -66,6 +66,16 @@ export function curveReader(curve: Curve): (v: number) => FigurePoint {
     if (t === 1) return segments[index]!.to;
     return pointOnCubic(segments[index]!, t);
   };
+}
+
+/** The same path on the other side of the body. */
+export function mirrorSegments(segments: readonly CubicSegment[]): CubicSegment[] {
+  return segments.map(({ from, control1, control2, to }) => ({
+    from: mirrorPoint(from),
+    control1: mirrorPoint(control1),
+    control2: mirrorPoint(control2),
+    to: mirrorPoint(to),
+  }));
 }
 
 /** The same path walked the other way. */

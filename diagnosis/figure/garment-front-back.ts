@@ -1,4 +1,11 @@
-import { curveSegments, curveReader, reverseSegments, straightSegment, type CubicSegment } from './curve';
+import {
+  curveReader,
+  curveSegments,
+  mirrorSegments,
+  reverseSegments,
+  straightSegment,
+  type CubicSegment,
+} from './curve';
 import { landmark, type Garment, type Landmark, type NamedPath } from './garment';
 import { rowSegment } from './row-segment';
 import type { RowReader, Sheet } from './mesh';
@@ -33,15 +40,6 @@ export function garmentRows(view: StandingView, side: Side, proportions: Proport
   return (v) => {
     const at = rows(v);
     return (fraction) => mirrorPoint(at(fraction));
-  };
-}
-
-function mirrorSegment({ from, control1, control2, to }: CubicSegment): CubicSegment {
-  return {
-    from: mirrorPoint(from),
-    control1: mirrorPoint(control1),
-    control2: mirrorPoint(control2),
-    to: mirrorPoint(to),
   };
 }
 
@@ -81,7 +79,7 @@ function halfEdges(view: StandingView, side: Side, proportions: Proportions) {
 function garmentEdges(view: StandingView, proportions: Proportions): NamedPath[] {
   const left = halfEdges(view, 'left', proportions);
   const right = halfEdges(view, 'right', proportions);
-  const back = (segments: readonly CubicSegment[]) => reverseSegments(segments.map(mirrorSegment));
+  const back = (segments: readonly CubicSegment[]) => reverseSegments(mirrorSegments(segments));
   return [
     { name: 'waist-left', segments: left.waist },
     { name: 'side-seam-left', segments: left.sideSeam },

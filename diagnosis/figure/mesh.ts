@@ -32,11 +32,16 @@ export type Sheet = {
 const ROW_STEP_MAX = 0.07;
 const COLUMN_PARTS = 3;
 
-type Cell = { readonly region: string; readonly corners: readonly [string, string, string, string] };
-type Mesh = { readonly points: Map<string, FigurePoint>; readonly cells: Cell[] };
+type Corners = readonly [number, number, number, number];
+type Cell = { readonly region: string; readonly corners: Corners };
+/** Corners are places in `points`; `centre` holds those of the centre line by row, which both sheets share. */
+type Mesh = { readonly points: FigurePoint[]; readonly centre: Map<number, number>; readonly cells: Cell[] };
 
-function subdivide(breaks: readonly number[], partsOf: (from: number, to: number) => number) {
-  const values: { value: number; band: number; share: number }[] = [];
+/** A value along the bands: in which band it lies and how far into it. */
+type Division = { readonly value: number; readonly band: number; readonly share: number };
+
+function subdivide(breaks: readonly number[], partsOf: (from: number, to: number) => number): Division[] {
+  const values: Division[] = [];
   for (let band = 0; band + 1 < breaks.length; band += 1) {
     const [from, to] = [breaks[band]!, breaks[band + 1]!];
     const parts = partsOf(from, to);
@@ -48,51 +53,58 @@ function subdivide(breaks: readonly number[], partsOf: (from: number, to: number
   return values;
 }
 
+/** Adds the sheet's points, row by row; says which point stands at each row and column. */
+function addPoints(
+  mesh: Mesh,
+  sheet: Sheet,
+  rows: readonly Division[],
+  columns: readonly Division[],
+): number[][] {
+  return rows.map(({ value: v }, row) => {
+    const breaks = sheet.columnsAt(v);
+    const at = sheet.rowAt(v);
+    return columns.map(({ band, share }, column) => {
+      const isShared = column === 0 && sheet.joinedDownTo !== null && v <= sheet.joinedDownTo;
+      const known = isShared ? mesh.centre.get(row) : undefined;
+      if (known !== undefined) return known;
+      const place = mesh.points.push(at(breaks[band]! + (breaks[band + 1]! - breaks[band]!) * share)) - 1;
+      if (isShared) mesh.centre.set(row, place);
+      return place;
+    });
+  });
+}
+
 function addSheet(mesh: Mesh, sheet: Sheet): void {
   const rows = subdivide(sheet.rows, (from, to) => Math.ceil((to - from) / ROW_STEP_MAX - 1e-9));
   const columns = subdivide(sheet.columnsAt(0), () => COLUMN_PARTS);
-  const nameOf = (row: number, column: number) => {
-    const isShared = column === 0 && sheet.joinedDownTo !== null && rows[row]!.value <= sheet.joinedDownTo;
-    return `${isShared ? 'centre' : sheet.side}:${row}:${column}`;
-  };
-  rows.forEach(({ value: v }, row) => {
-    const breaks = sheet.columnsAt(v);
-    const at = sheet.rowAt(v);
-    columns.forEach(({ band, share }, column) => {
-      const fraction = breaks[band]! + (breaks[band + 1]! - breaks[band]!) * share;
-      mesh.points.set(nameOf(row, column), at(fraction));
-    });
-  });
+  const places = addPoints(mesh, sheet, rows, columns);
   for (let row = 0; row + 1 < rows.length; row += 1) {
     for (let column = 0; column + 1 < columns.length; column += 1) {
       const zone = sheet.zones[rows[row]!.band]![columns[column]!.band]!;
-      const ring = [
-        nameOf(row, column),
-        nameOf(row, column + 1),
-        nameOf(row + 1, column + 1),
-        nameOf(row + 1, column),
-      ] as const;
-      const corners = sheet.side === 'left' ? ring : ([ring[0], ring[3], ring[2], ring[1]] as const);
+      const [upper, lower] = [places[row]!, places[row + 1]!];
+      const [a, b, c, d] = [upper[column]!, upper[column + 1]!, lower[column + 1]!, lower[column]!];
+      const corners: Corners = sheet.side === 'left' ? [a, b, c, d] : [a, d, c, b];
       mesh.cells.push({ region: `${zone}|${sheet.isSided(zone) ? sheet.side : ''}`, corners });
     }
   }
 }
 
 /** The boundary of a connected set of cells: edges walked in both directions cancel, the rest chain to a ring. */
-function traceBoundary(cells: readonly Cell[], points: Map<string, FigurePoint>): FigurePoint[] {
-  const edges = new Map<string, { from: string; to: string }>();
+function traceBoundary(cells: readonly Cell[], points: readonly FigurePoint[]): FigurePoint[] {
+  const count = points.length;
+  const edges = new Set<number>();
   for (const { corners } of cells) {
     corners.forEach((from, index) => {
       const to = corners[(index + 1) % 4]!;
-      if (!edges.delete(`${to}>${from}`)) edges.set(`${from}>${to}`, { from, to });
+      if (!edges.delete(to * count + from)) edges.add(from * count + to);
     });
   }
-  const next = new Map([...edges.values()].map(({ from, to }) => [from, to]));
-  const start = edges.values().next().value!.from;
+  const next = new Map([...edges].map((edge) => [Math.floor(edge / count), edge % count]));
+  const [start] = next.keys();
   const ring: FigurePoint[] = [];
-  let at = start;
+  let at = start!;
   do {
-    ring.push(points.get(at)!);
+    ring.push(points[at]!);
     at = next.get(at)!;
   } while (at !== start);
   if (ring.length !== edges.size) throw new Error('A zone of the figure is in pieces: its table is wrong.');
@@ -101,7 +113,7 @@ function traceBoundary(cells: readonly Cell[], points: Map<string, FigurePoint>)
 
 /** The zones of the sheets, and the outline of all of them together, sampled at the same points. */
 export function buildZones(sheets: readonly Sheet[]): { zones: ZoneRegion[]; outline: FigurePoint[] } {
-  const mesh: Mesh = { points: new Map(), cells: [] };
+  const mesh: Mesh = { points: [], centre: new Map(), cells: [] };
   for (const sheet of sheets) addSheet(mesh, sheet);
   const byRegion = new Map<string, Cell[]>();
   for (const cell of mesh.cells) {

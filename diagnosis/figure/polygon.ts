@@ -15,14 +15,14 @@ export function polygonArea(polygon: readonly XY[]): number {
 /** Whether the polygon holds the point. Edges are half open, so that polygons which share an edge never both hold a point of it. */
 export function polygonHolds(polygon: readonly XY[], point: XY): boolean {
   let inside = false;
-  polygon.forEach((a, index) => {
-    const b = polygon[(index + 1) % polygon.length]!;
-    if (a.y > point.y === b.y > point.y) return;
+  for (let i = 0, before = polygon.length - 1; i < polygon.length; before = i, i += 1) {
+    const [a, b] = [polygon[before]!, polygon[i]!];
+    if (a.y > point.y === b.y > point.y) continue;
     // Ordered by height, so that both owners of an edge compute the same crossing to the last digit.
     const [low, high] = a.y < b.y ? [a, b] : [b, a];
     const crossing = low.x + ((point.y - low.y) / (high.y - low.y)) * (high.x - low.x);
     if (point.x < crossing) inside = !inside;
-  });
+  }
   return inside;
 }
 

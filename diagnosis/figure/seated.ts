@@ -17,14 +17,15 @@ export function seatedLegs({ height, thigh, hip }: Proportions) {
 export function seatedFrontCurve(proportions: Proportions): Curve {
   const { waist, hip, front, height } = proportions;
   const { thighTopY, kneeFrontX, hemY } = seatedLegs(proportions);
-  const lapX = 0.12 * waist + 0.31 * hip + 0.05 * front;
+  const bellyX = 0.21 * waist + 0.215 * hip + 0.1 * front;
+  const lapX = bellyX + 0.02;
   const along = (share: number) => lapX + (kneeFrontX - lapX) * share;
   return {
     knots: [
       knot(LEVELS.waist, 0.365 * waist + 0.03 * front, 0.03),
       knot(0.12, 0.385 * waist + 0.01 * hip + 0.06 * front, 0.145),
-      knot(0.42, 0.21 * waist + 0.215 * hip + 0.1 * front, Math.min(0.33, thighTopY - 0.06)),
-      knot(0.62, lapX + 0.03, thighTopY + 0.005),
+      knot(0.42, bellyX, Math.min(0.33, thighTopY - 0.08)),
+      knot(0.62, lapX + 0.02, thighTopY),
       knot(0.86, along(0.22), thighTopY + 0.005),
       knot(LEVELS.thigh, along(0.5), thighTopY - 0.005),
       knot(1.8, along(0.86), thighTopY + 0.01),
@@ -40,7 +41,7 @@ export function seatedFrontCurve(proportions: Proportions): Curve {
 export function seatedBackCurve(proportions: Proportions): Curve {
   const { waist, hip, seat, height, thigh } = proportions;
   const { kneeFrontX, hemY } = seatedLegs(proportions);
-  const calf = 0.37 + 0.15 * thigh;
+  const calf = 0.3 + 0.15 * thigh + 0.07 * hip;
   return {
     knots: [
       knot(LEVELS.waist, -0.365 * waist, -0.02),
@@ -54,7 +55,7 @@ export function seatedBackCurve(proportions: Proportions): Curve {
       knot(LEVELS.knee, kneeFrontX - calf - 0.02, 1.035),
       knot(2.4, kneeFrontX - calf + 0.02, 1.2),
       knot(3, kneeFrontX - calf - 0.025, 1 + 0.66 * height),
-      knot(LEVELS.hem, kneeFrontX - 0.51 - 0.06 * thigh, hemY),
+      knot(LEVELS.hem, kneeFrontX - 0.42 - 0.06 * thigh - 0.09 * hip, hemY),
     ],
   };
 }

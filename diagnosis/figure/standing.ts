@@ -19,16 +19,17 @@ export function sideLift(side: Side, { hipHigherSide }: Proportions): number {
 /** Half widths and leg axes seen from the front or the back, as distances from the centre line. */
 export function standingWidths(proportions: Proportions) {
   const { hip, waist, thigh, legLine } = proportions;
+  // Two thighs side by side are never wider than the hips: cloth hangs straight down from the widest place.
   const hipHalf = 0.662 * hip;
   const waistHalf = 0.525 * waist;
-  const legWidth = 0.635 * thigh * (0.6 + 0.4 * hip);
-  const axis = 0.325 + 0.17 * (hip - 1) + 0.1 * (thigh - 1);
-  const kneeHalf = 0.258 + 0.12 * (thigh - 1);
-  const hemHalf = 0.25 + 0.06 * (thigh - 1);
+  const legWidth = Math.min(0.635 * (0.35 + 0.65 * thigh) * (0.55 + 0.45 * hip), hipHalf);
+  const axis = 0.325 + 0.13 * (hip - 1) + 0.06 * (thigh - 1);
+  const kneeHalf = 0.258 + 0.1 * (thigh - 1) + 0.08 * (hip - 1);
+  const hemHalf = 0.25 + 0.05 * (thigh - 1) + 0.09 * (hip - 1);
   return {
     hipHalf,
     waistHalf,
-    highHipHalf: 0.52 * waistHalf + 0.53 * hipHalf,
+    highHipHalf: 0.45 * waistHalf + 0.55 * hipHalf + 0.014,
     thighTop: 0.5 * hipHalf + 0.5 * (0.03 + legWidth),
     thighOuter: 0.32 * hipHalf + 0.68 * (0.035 + 0.95 * legWidth),
     kneeHalf,
@@ -46,13 +47,13 @@ export function sideSeamCurve(side: Side, proportions: Proportions): Curve {
   return {
     knots: [
       knot(LEVELS.waist, w.waistHalf, y(0)),
-      knot(0.12, 0.9 * w.waistHalf + 0.1 * w.highHipHalf + 0.006, y(0.12)),
+      knot(0.12, 0.8 * w.waistHalf + 0.2 * w.highHipHalf + 0.002, y(0.12)),
       knot(LEVELS.highHip, w.highHipHalf, y(LEVELS.highHip)),
       knot(LEVELS.hip, w.hipHalf, y(LEVELS.hip)),
       knot(LEVELS.crotch, w.thighTop, 1),
       knot(LEVELS.thigh, w.thighOuter, y(LEVELS.thigh)),
       knot(LEVELS.knee, w.kneeAxis + w.kneeHalf, y(LEVELS.knee)),
-      knot(LEVELS.calf, 0.62 * w.kneeAxis + 0.38 * w.hemAxis + 0.256, y(LEVELS.calf)),
+      knot(LEVELS.calf, 0.62 * (w.kneeAxis + w.kneeHalf) + 0.38 * (w.hemAxis + w.hemHalf), y(LEVELS.calf)),
       knot(LEVELS.hem, w.hemAxis + w.hemHalf, y(LEVELS.hem)),
     ],
   };
@@ -69,7 +70,7 @@ export function inseamCurve(proportions: Proportions): Curve {
       knot(1.1, Math.min(0.016, kneeInner * 0.5), y(1.1)),
       knot(LEVELS.thigh, Math.min(0.034, kneeInner * 0.8), y(LEVELS.thigh)),
       knot(LEVELS.knee, kneeInner, y(LEVELS.knee)),
-      knot(LEVELS.calf, Math.max(0.02, 0.62 * w.kneeAxis + 0.38 * w.hemAxis - 0.252), y(LEVELS.calf)),
+      knot(LEVELS.calf, 0.62 * kneeInner + 0.38 * (w.hemAxis - w.hemHalf), y(LEVELS.calf)),
       knot(LEVELS.hem, w.hemAxis - w.hemHalf, y(LEVELS.hem)),
     ],
   };
@@ -87,9 +88,9 @@ export function frontEdgeCurve(proportions: Proportions): Curve {
       knot(LEVELS.hip, 0.06 * waist + 0.345 * hip + 0.055 * front, LEVELS.hip),
       knot(LEVELS.crotch, 0.25 * hip + 0.12 * thigh + 0.01 * front, 1),
       knot(LEVELS.thigh, 0.1 * hip + 0.245 * thigh, y(LEVELS.thigh)),
-      knot(LEVELS.knee, 0.1 + 0.155 * thigh, y(LEVELS.knee)),
-      knot(LEVELS.calf, 0.165 + 0.05 * thigh, y(LEVELS.calf)),
-      knot(LEVELS.hem, 0.155 + 0.035 * thigh, y(LEVELS.hem)),
+      knot(LEVELS.knee, 0.04 + 0.155 * thigh + 0.06 * hip, y(LEVELS.knee)),
+      knot(LEVELS.calf, 0.095 + 0.06 * thigh + 0.06 * hip, y(LEVELS.calf)),
+      knot(LEVELS.hem, 0.1 + 0.035 * thigh + 0.055 * hip, y(LEVELS.hem)),
     ],
   };
 }
@@ -107,9 +108,9 @@ export function backEdgeCurve(proportions: Proportions): Curve {
       knot(0.9, -0.38 * hip - 0.11 * thigh - 0.06 * seat, 0.9),
       knot(1.12, -0.14 * hip - 0.275 * thigh - 0.02 * seat, y(1.12)),
       knot(1.5, -0.06 * hip - 0.295 * thigh, y(1.5)),
-      knot(LEVELS.knee, -0.185 - 0.12 * thigh, y(LEVELS.knee)),
-      knot(LEVELS.calf, -0.215 - 0.11 * thigh, y(LEVELS.calf)),
-      knot(LEVELS.hem, -0.255 - 0.06 * thigh, y(LEVELS.hem)),
+      knot(LEVELS.knee, -0.115 - 0.12 * thigh - 0.07 * hip, y(LEVELS.knee)),
+      knot(LEVELS.calf, -0.145 - 0.11 * thigh - 0.07 * hip, y(LEVELS.calf)),
+      knot(LEVELS.hem, -0.175 - 0.06 * thigh - 0.08 * hip, y(LEVELS.hem)),
     ],
   };
 }

@@ -69,16 +69,16 @@ export function inflated(mask: Field, depth: number): Field {
   const small = shrunk(mask, SHRINK);
   const { width, height, data: inside } = small;
   const u = new Float32Array(width * height);
+  const places: number[] = [];
+  for (let y = 1; y < height - 1; y += 1) {
+    for (let x = 1; x < width - 1; x += 1) if (inside[y * width + x]! >= 0.5) places.push(y * width + x);
+  }
   for (let sweep = 0; sweep < SWEEPS; sweep += 1) {
-    for (let y = 1; y < height - 1; y += 1) {
-      for (let x = 1; x < width - 1; x += 1) {
-        const i = y * width + x;
-        if (inside[i]! < 0.5) continue;
-        // No wall at the upper frame: a body that leaves the picture stays round there.
-        const above = y === 1 ? u[i + width]! : u[i - width]!;
-        const settled = (u[i - 1]! + u[i + 1]! + above + u[i + width]! + 1) / 4;
-        u[i] = Math.max(0, u[i]! + OVER_RELAXATION * (settled - u[i]!));
-      }
+    for (const i of places) {
+      // No wall at the upper frame: a body that leaves the picture stays round there.
+      const above = i < 2 * width ? u[i + width]! : u[i - width]!;
+      const settled = (u[i - 1]! + u[i + 1]! + above + u[i + width]! + 1) / 4;
+      u[i] = Math.max(0, u[i]! + OVER_RELAXATION * (settled - u[i]!));
     }
   }
   for (let x = 0; x < width; x += 1) u[x] = u[width + x]!;

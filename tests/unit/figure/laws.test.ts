@@ -12,6 +12,7 @@ import { mirrorPoint, type FigurePoint } from '@/diagnosis/figure/point';
 import { crossesItself, polygonArea, polygonHolds } from '@/diagnosis/figure/polygon';
 import { mirrorProportions } from '@/diagnosis/figure/proportions';
 import { sideSeamCurve } from '@/diagnosis/figure/standing';
+import { buildZones } from '@/diagnosis/figure/mesh';
 import { anyProportions } from './arbitrary';
 
 const VIEWS: FigureView[] = ['front', 'back', 'left', 'right', 'seated'];
@@ -31,8 +32,7 @@ describe.each(VIEWS)('the zones of the %s view', (view) => {
       const shares = fc.array(fc.tuple(share, share), { minLength: 12, maxLength: 12 });
       fc.assert(
         fc.property(anyProportions, shares, (proportions, places) => {
-          const zones = figureZones(view, proportions);
-          const garment = garmentPolygon(view, proportions);
+          const { zones, outline: garment } = buildZones(figureGarment(view, proportions).sheets);
           const whole = polygonArea(garment);
           const sum = zones.reduce((total, { polygon }) => total + polygonArea(polygon), 0);
           expect(Math.abs(sum - whole) / whole).toBeLessThan(1e-6);
