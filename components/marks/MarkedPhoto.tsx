@@ -8,14 +8,16 @@ import type { PhotoDto } from '@/db/queries/photos';
 import { ContestedMarks } from './ContestedMarks';
 import { MarkCanvas } from './MarkCanvas';
 import { MarkList } from './MarkList';
-import { addMark, editMark, removeMark } from './model/history';
-import { newMark } from './useDrawing';
+import { addMark, editMark, removeMark, startHistory } from './model/history';
+import { newMark } from './model/mark';
 import { useMarks } from './useMarks';
 
 interface Props {
   userId: string;
   photo: PhotoDto;
 }
+
+const NOTHING_YET = startHistory([]);
 
 /** One photo with its marks: drawn on it, and listed beside it. */
 export function MarkedPhoto({ userId, photo }: Props) {
@@ -34,7 +36,7 @@ export function MarkedPhoto({ userId, photo }: Props) {
     <div className="grid gap-3">
       <MarkCanvas
         photo={src}
-        history={history ?? { marks: [], past: [], future: [] }}
+        history={history ?? NOTHING_YET}
         act={act}
         selected={selected}
         onSelect={setSelected}
@@ -51,7 +53,7 @@ export function MarkedPhoto({ userId, photo }: Props) {
           act((now) => addMark(now, mark));
           setSelected(mark.id);
         }}
-        onEdit={(markId, edit) => act((now) => editMark(now, markId, edit))}
+        onEdit={(markId, edit, run) => act((now) => editMark(now, markId, edit, run))}
         onDelete={(markId) => {
           act((now) => removeMark(now, markId));
           setSelected(null);
