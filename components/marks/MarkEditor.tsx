@@ -5,6 +5,7 @@ import { Choice } from '@/components/ui/Choice';
 import { SelectField } from '@/components/ui/SelectField';
 import { TextField } from '@/components/ui/TextField';
 import { useState } from 'react';
+import { NOTE_MAX } from './mark-limits-schema';
 import {
   changeKind,
   type Mark,
@@ -13,7 +14,6 @@ import {
   type MarkSide,
   moveMark,
   movePoint,
-  NOTE_MAX,
   photoPoint,
 } from './model/mark';
 import { KIND_WORDS } from './model/mark-text';

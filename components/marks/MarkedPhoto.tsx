@@ -11,6 +11,7 @@ import { MarkList } from './MarkList';
 import { addMark, editMark, removeMark, startHistory } from './model/history';
 import { newMark } from './model/mark';
 import { useMarks } from './useMarks';
+import { useWaitingMarks } from './useWaitingMarks';
 
 interface Props {
   userId: string;
@@ -23,6 +24,7 @@ const NOTHING_YET = startHistory([]);
 export function MarkedPhoto({ userId, photo }: Props) {
   const { id, revision, widthPx, heightPx, view, isMirrored } = photo;
   const { marks, history, saveState, conflicts, act, settle } = useMarks(userId, photo);
+  const elsewhere = useWaitingMarks(userId, id);
   const [selected, setSelected] = useState<string | null>(null);
   const alt = `${VIEW_WORDS[view]}${isMirrored ? ', in a mirror' : ''}`;
   const src = {
@@ -43,6 +45,9 @@ export function MarkedPhoto({ userId, photo }: Props) {
         isReadOnly={history === null}
       />
       <SaveLine state={saveState} />
+      {elsewhere > 0 ? (
+        <p className="text-sm text-graphite">On this phone only: {elsewhere} waiting on other photos.</p>
+      ) : null}
       <ContestedMarks marks={marks} conflicts={conflicts} onSettle={settle} />
       <MarkList
         marks={marks}

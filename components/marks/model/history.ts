@@ -1,4 +1,5 @@
-import { inOrder, isSameMark, type Mark, MARKS_MAX } from './mark';
+import { MARKS_MAX } from '../mark-limits-schema';
+import { inOrder, isSameMark, type Mark } from './mark';
 
 /** One mark before and after a step; null where it was not there. */
 export interface MarkStep {

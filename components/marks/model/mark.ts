@@ -12,11 +12,6 @@ export type MarkKind = (typeof MARK_KINDS)[number];
 export type MarkSide = 'left' | 'right' | 'both';
 export type MarkSeverity = 1 | 2 | 3;
 
-/** What a photo holds of one author at most, and what a mark holds. */
-export const MARKS_MAX = 500;
-export const POINTS_MAX = 400;
-export const NOTE_MAX = 400;
-
 export interface Mark {
   id: string;
   kind: MarkKind;

@@ -1,4 +1,5 @@
-import { type PhotoPoint, photoPoint, POINTS_MAX } from './mark';
+import { POINTS_MAX } from '../mark-limits-schema';
+import { type PhotoPoint, photoPoint } from './mark';
 import { simplify } from './simplify';
 
 interface Pixel {

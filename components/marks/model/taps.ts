@@ -1,4 +1,5 @@
-import { type MarkKind, type PhotoPoint, POINTS_MAX } from './mark';
+import { POINTS_MAX } from '../mark-limits-schema';
+import type { MarkKind, PhotoPoint } from './mark';
 
 /** Points that have been set one by one; the line is made when `isDone`. */
 export interface Taps {
