@@ -2,6 +2,7 @@ import { sendJson } from '@/components/net/send';
 import { KEPT_FOR_UNDO, readDraft, writeDraft } from '@/components/offline/drafts';
 import type { SaveState } from '@/components/round/useEvidence';
 import { type KeptMarks, layOver, startKept } from './kept-marks';
+import { holdPhoto } from './photo-lock';
 import { answerOf, type ServerAnswer } from './mark-answers';
 import { type MarkHistory, replaceMarks } from './model/history';
 import {
@@ -53,6 +54,7 @@ export class MarkKeeper {
   #timer: ReturnType<typeof setTimeout> | undefined;
   #sending: Promise<void> | null = null;
   #isOpen = false;
+  #release = () => {};
 
   constructor(readonly options: Options) {}
 
@@ -62,15 +64,21 @@ export class MarkKeeper {
     return () => void this.#listeners.delete(listener);
   };
 
-  /** Reads what the device keeps, once; from then on everything is sent. */
+  /** Reads what the device keeps, once. */
+  async load(): Promise<void> {
+    if (this.#state.kept) return;
+    const draft = await readDraft<KeptMarks>(this.options.userId, this.#keptKey);
+    if (!this.#state.kept) void this.#put(layOver(draft ?? startKept(), this.#server));
+  }
+
+  /** From now on what is done is sent, at once or as soon as it can be. */
   async open(): Promise<void> {
+    if (this.#isOpen) return;
     this.#isOpen = true;
+    this.#release = holdPhoto(this.options.photo.id);
     window.addEventListener('online', this.#sendSoon);
     document.addEventListener('visibilitychange', this.#whenHidden);
-    if (this.#state.kept) return this.#schedule(0);
-    const draft = await readDraft<KeptMarks>(this.options.userId, this.#keptKey);
-    if (this.#state.kept) return;
-    this.#put(layOver(draft ?? startKept(), this.#server));
+    await this.load();
     this.#schedule(0);
   }
 
@@ -80,7 +88,7 @@ export class MarkKeeper {
     clearTimeout(this.#timer);
     window.removeEventListener('online', this.#sendSoon);
     document.removeEventListener('visibilitychange', this.#whenHidden);
-    void this.flush();
+    void this.flush().finally(this.#release);
   }
 
   /** Lays what the server holds under what was done here. */

@@ -1,6 +1,7 @@
 'use client';
 import { useEffect, useState } from 'react';
 import { listDrafts } from '@/components/offline/drafts';
+import { ifNobodyHolds } from './photo-lock';
 import { MarkKeeper, WAITING, type WaitingMarks } from './mark-keeper';
 
 const RETRY_MS = 30_000;
@@ -11,10 +12,11 @@ const waitingOn = async (userId: string, photoId: string) =>
 /** Sends what waits on photos that are not on the table. What is contested there waits until its photo is opened. */
 async function sendWaiting(userId: string, photoId: string): Promise<number> {
   for (const { rest: id, draft } of await waitingOn(userId, photoId)) {
-    const keeper = new MarkKeeper({ userId, photo: { id, revision: draft.revision } });
-    await keeper.open();
-    await keeper.flush();
-    keeper.close();
+    await ifNobodyHolds(id, async () => {
+      const keeper = new MarkKeeper({ userId, photo: { id, revision: draft.revision } });
+      await keeper.load();
+      await keeper.flush();
+    });
   }
   const left = await waitingOn(userId, photoId);
   return left.reduce((sum, { draft }) => sum + draft.count, 0);
