@@ -1,6 +1,6 @@
 'use client';
 import { useState } from 'react';
-import { MarkShape } from '@/components/marks/MarkShape';
+import { PHOTO_INKS, PhotoMark } from '@/components/marks/PhotoMark';
 import { markText } from '@/components/marks/model/mark-text';
 import { type MarkSeverity, photoPoint } from '@/components/marks/model/mark';
 import { PhotoImage } from '@/components/photos/PhotoImage';
@@ -13,6 +13,9 @@ interface Side {
   number: number;
   photos: MarkedPhotoDto[];
 }
+
+/** The width that marks are drawn for; the pane shows them larger or smaller with the photo. */
+const PANE_PX = 500;
 
 /** The same view of two rounds next to each other, with the marks of both. */
 export function PhotoPairs({ before, after }: { before: Side; after: Side }) {
@@ -63,6 +66,7 @@ function Pane({ number, view, photo }: { number: number; view: View; photo: Mark
     severity: Math.min(3, Math.max(1, mark.severity)) as MarkSeverity,
     points: mark.points.map(({ x, y }) => photoPoint(x, y)),
   }));
+  const paneHeightPx = (PANE_PX * photo.heightPx) / photo.widthPx;
   return (
     <figure className="grid content-start gap-2">
       <span className="relative block">
@@ -75,18 +79,12 @@ function Pane({ number, view, photo }: { number: number; view: View; photo: Mark
           heightPx={photo.heightPx}
         />
         <svg
-          viewBox={`0 0 ${photo.widthPx} ${photo.heightPx}`}
+          viewBox={`0 0 ${PANE_PX} ${paneHeightPx}`}
           aria-hidden
-          className="absolute inset-0 h-full w-full"
+          className={`absolute inset-0 h-full w-full ${PHOTO_INKS}`}
         >
           {marks.map((mark) => (
-            <MarkShape
-              key={mark.id}
-              mark={mark}
-              widthPx={photo.widthPx}
-              heightPx={photo.heightPx}
-              unit={photo.widthPx / 500}
-            />
+            <PhotoMark key={mark.id} mark={mark} widthPx={PANE_PX} heightPx={paneHeightPx} />
           ))}
         </svg>
       </span>

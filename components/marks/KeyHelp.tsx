@@ -4,13 +4,15 @@ import { Button } from '@/components/ui/Button';
 
 const KEYS = [
   ['1 to 6', 'tight line, slack fold, gap, pooling, tilt, pin'],
-  ['0', 'look and choose'],
-  ['Arrows', 'move the cross, or the chosen mark'],
-  ['Shift and arrows', 'the same in small steps'],
-  ['Enter', 'set an end; a second time makes the line'],
+  ['7', 'look and choose'],
+  ['Arrows', 'move the cross, or the chosen mark, by a pixel'],
+  ['Shift and arrows', 'the same by ten pixels'],
+  ['Enter', 'set a point; twice in one place ends the line; when looking, choose the mark at the cross'],
   ['Escape', 'let go'],
   ['Delete', 'delete the chosen mark'],
   ['Ctrl Z, Ctrl Shift Z', 'undo, redo'],
+  ['+ and −', 'nearer, farther'],
+  ['0', 'the whole photo'],
 ] as const;
 
 export function KeyHelp({ isOpen, onClose }: { isOpen: boolean; onClose: () => void }) {

@@ -1,18 +1,27 @@
 'use client';
-import { useEffect, useRef, useState } from 'react';
+import { type MouseEvent, useRef, useState } from 'react';
 import { v7 } from 'uuid';
+import { DrawingAids } from './DrawingAids';
 import { KeyHelp } from './KeyHelp';
+import { MarkBar } from './MarkBar';
 import { MarkHandles } from './MarkHandles';
-import { MarkShape } from './MarkShape';
+import { MarkLayer } from './MarkLayer';
 import { MarkToolbar } from './MarkToolbar';
+import { MARKS_MAX } from './mark-limits-schema';
+import { markAt } from './model/hit-test';
 import { addMark, editMark, type MarkHistory, redo, removeMark, undo } from './model/history';
-import type { Mark, PhotoPoint } from './model/mark';
+import { type Mark, type MarkSeverity, moveMark, newMark, type PhotoPoint } from './model/mark';
 import { markText } from './model/mark-text';
-import { newMark, type Tool, useDrawing } from './useDrawing';
+import { type CanvasPhoto, PhotoSurface } from './PhotoSurface';
+import { TapBar } from './TapBar';
+import type { Tool } from './tool';
+import { pointOf, useDrawing } from './useDrawing';
 import { useKeyDrawing } from './useKeyDrawing';
+import { useTaps } from './useTaps';
+import { useViewport } from './useViewport';
 
 interface Props {
-  photo: { src: string; srcSet: string; widthPx: number; heightPx: number; alt: string };
+  photo: CanvasPhoto;
   history: MarkHistory;
   act: (step: (history: MarkHistory) => MarkHistory) => void;
   selected: string | null;
@@ -20,165 +29,140 @@ interface Props {
   isReadOnly: boolean;
 }
 
-const ZOOM_MAX = 6;
-
-/** Pixels of the master that one pixel of the screen takes, kept up to date as the surface changes its size. */
-function useUnit(widthPx: number, zoom: number) {
-  const surface = useRef<SVGSVGElement | null>(null);
-  const [unit, setUnit] = useState(widthPx / 400);
-  useEffect(() => {
-    const element = surface.current;
-    if (!element) return;
-    const measure = () => setUnit(widthPx / Math.max(1, element.getBoundingClientRect().width));
-    const observer = new ResizeObserver(measure);
-    observer.observe(element);
-    measure();
-    return () => observer.disconnect();
-  }, [widthPx, zoom]);
-  return { surface, unit };
-}
-
 /** A photo to draw on. Everything that drawing does, keys and the list beside it do too. */
 export function MarkCanvas({ photo, history, act, selected, onSelect, isReadOnly }: Props) {
-  const { widthPx, heightPx } = photo;
   const [tool, setTool] = useState<Tool>('look');
-  const [zoom, setZoom] = useState(1);
-  const [moving, setMoving] = useState<Mark | null>(null);
+  const [nextSeverity, setNextSeverity] = useState<MarkSeverity>(2);
   const [isHelp, setHelp] = useState(false);
-  const { surface, unit } = useUnit(widthPx, zoom);
-  const ink = useRef<SVGPathElement | null>(null);
+  const [said, say] = useState('');
+  const surface = useRef<SVGSVGElement | null>(null);
+  const wet = useRef<HTMLCanvasElement | null>(null);
+  const {
+    scroller,
+    photo: photoRef,
+    size,
+    zoom,
+    zoomBy,
+    zoomOut,
+  } = useViewport(photo.widthPx, photo.heightPx);
   const { marks } = history;
   const chosen = marks.find(({ id }) => id === selected) ?? null;
+  const isLooking = tool === 'look';
 
-  const onDrawn = (points: PhotoPoint[]) => {
+  const edit = (change: (mark: Mark) => Mark, run?: string) =>
+    chosen && act((now) => editMark(now, chosen.id, change, run));
+  const draw = (points: PhotoPoint[]) => {
     if (tool === 'look') return;
-    const id = v7();
-    act((now) => addMark(now, newMark(id, tool, 2, points)));
-    onSelect(id);
+    if (marks.length >= MARKS_MAX) return say(`A photo holds at most ${MARKS_MAX} marks.`);
+    const mark = newMark(v7(), tool, nextSeverity, points);
+    act((now) => addMark(now, mark));
+    onSelect(mark.id);
+    say(`Drawn: ${markText(mark)}`);
   };
-  const onTool = (next: Tool) => {
+  const taps = useTaps({ tool, size, onLine: draw, say });
+  const chooseTool = (next: Tool) => {
     setTool(next);
-    drawing.forgetTap();
+    taps.forget();
     if (next !== 'look') onSelect(null);
   };
-  const onDelete = (id: string) => {
-    act((now) => removeMark(now, id));
+  const choose = (at: PhotoPoint) => {
+    const found = markAt(marks, at, size);
+    onSelect(found?.id ?? null);
+    say(found ? `Chosen: ${markText(found)}` : 'No mark here');
+  };
+  const remove = () => {
+    if (!chosen) return;
+    act((now) => removeMark(now, chosen.id));
+    onSelect(null);
+    say(`Deleted: ${markText(chosen)}`);
+  };
+  const letGo = () => {
+    taps.forget();
     onSelect(null);
   };
-  const drawing = useDrawing({ surface, ink, tool, widthPx, heightPx, onDrawn });
+  const drawing = useDrawing({
+    surface,
+    wet,
+    isOn: !isReadOnly && !isLooking,
+    onLine: (points) => {
+      taps.forget();
+      draw(points);
+    },
+    onTap: taps.set,
+  });
   const keys = useKeyDrawing({
     tool,
-    selected: chosen,
-    onTool,
-    onDrawn,
-    onDelete,
-    onSelect,
-    onEdit: (id, edit) => act((now) => editMark(now, id, edit)),
+    size,
+    hasSelected: chosen !== null,
+    onTool: chooseTool,
+    onSet: isLooking ? choose : taps.set,
+    onNudge: (dx, dy) => edit((mark) => moveMark(mark, dx, dy), 'nudge'),
+    onDelete: remove,
+    onLetGo: letGo,
     onUndo: () => act(undo),
     onRedo: () => act(redo),
+    onZoom: (factor) => (factor === 0 ? zoomOut() : zoomBy(factor)),
     onHelp: () => setHelp(true),
+    say,
   });
-  const dot = (point: PhotoPoint | null, shape: 'cross' | 'dot') =>
-    point ? <Cross x={point.x * widthPx} y={point.y * heightPx} unit={unit} isDot={shape === 'dot'} /> : null;
+  const onClick = (event: MouseEvent<SVGSVGElement>) => {
+    const at = isLooking && surface.current ? pointOf(surface.current, event) : null;
+    if (at) choose(at);
+  };
+  const pixels = { widthPx: size.width, heightPx: size.height };
 
   return (
-    <div className="grid gap-2">
-      <div className="max-h-[80vh] overflow-auto bg-weave" tabIndex={-1}>
-        <div
-          className="relative mx-auto"
-          style={{ width: `${zoom * 100}%`, aspectRatio: `${widthPx} / ${heightPx}` }}
+    <div className="grid gap-2 lg:grid-cols-[auto_minmax(0,1fr)] lg:gap-x-3">
+      <div className="grid min-w-0 content-start gap-1 lg:col-start-2 lg:row-start-1">
+        <PhotoSurface
+          photo={photo}
+          scrollerRef={scroller}
+          photoRef={photoRef}
+          surfaceRef={surface}
+          wetRef={wet}
+          size={size}
+          zoom={zoom}
+          isDrawing={!isLooking}
+          events={isReadOnly ? {} : { tabIndex: 0, onClick, onKeyDown: keys.onKeyDown, ...drawing }}
         >
-          <img
-            src={photo.src}
-            srcSet={photo.srcSet}
-            sizes={`(min-width: 64rem) ${Math.round(50 * zoom)}vw, ${Math.round(100 * zoom)}vw`}
-            width={widthPx}
-            height={heightPx}
-            alt={photo.alt}
-            draggable={false}
-            className="absolute inset-0 h-full w-full select-none"
-          />
-          <svg
-            ref={surface}
-            role="application"
-            aria-label={`${photo.alt}. Draw with the keys: press question mark to hear them.`}
-            tabIndex={isReadOnly ? -1 : 0}
-            viewBox={`0 0 ${widthPx} ${heightPx}`}
-            className={
-              tool === 'look'
-                ? 'absolute inset-0 h-full w-full'
-                : 'absolute inset-0 h-full w-full cursor-crosshair touch-none'
-            }
-            onKeyDown={isReadOnly ? undefined : keys.onKeyDown}
-            {...(isReadOnly ? {} : drawing.handlers)}
-          >
-            {marks.map((mark) =>
-              mark.id === selected ? null : (
-                <g
-                  key={mark.id}
-                  onClick={() => tool === 'look' && onSelect(mark.id)}
-                  className={tool === 'look' ? 'cursor-pointer' : ''}
-                >
-                  <title>{markText(mark)}</title>
-                  <polyline
-                    points={mark.points.map(({ x, y }) => `${x * widthPx},${y * heightPx}`).join(' ')}
-                    fill="none"
-                    stroke="transparent"
-                    strokeWidth={28 * unit}
-                    strokeLinecap="round"
-                  />
-                  <MarkShape mark={mark} widthPx={widthPx} heightPx={heightPx} unit={unit} />
-                </g>
-              ),
-            )}
-            {chosen && !isReadOnly ? (
-              <MarkHandles
-                mark={moving ?? chosen}
-                surface={surface}
-                widthPx={widthPx}
-                heightPx={heightPx}
-                unit={unit}
-                onMoving={setMoving}
-                onMoved={(moved) => act((now) => editMark(now, moved.id, () => moved))}
-              />
-            ) : null}
-            <path
-              ref={ink}
-              fill="none"
-              stroke="#0b4f7a"
-              strokeWidth={3.5 * unit}
-              strokeLinecap="round"
-              strokeLinejoin="round"
+          <MarkLayer marks={marks} exceptId={selected} {...pixels} />
+          {chosen ? (
+            <MarkHandles
+              mark={chosen}
+              surface={surface}
+              isHeld={isLooking && !isReadOnly}
+              onMoved={({ id, points }) => act((now) => editMark(now, id, (mark) => ({ ...mark, points })))}
+              {...pixels}
             />
-            {dot(drawing.firstTap ?? keys.start, 'dot')}
-            {dot(keys.cross, 'cross')}
-          </svg>
-        </div>
+          ) : null}
+          <DrawingAids points={taps.points} cross={keys.cross} {...pixels} />
+        </PhotoSurface>
+        <TapBar count={taps.points.length} onEnd={taps.end} onTakeBack={taps.takeBack} />
+        {chosen && !isReadOnly && taps.points.length === 0 ? (
+          <MarkBar mark={chosen} onEdit={edit} onDelete={remove} onLetGo={letGo} />
+        ) : null}
       </div>
       {isReadOnly ? null : (
         <MarkToolbar
           tool={tool}
-          onTool={onTool}
+          onTool={chooseTool}
+          severity={chosen?.severity ?? nextSeverity}
+          onSeverity={(severity) => {
+            setNextSeverity(severity);
+            edit((mark) => ({ ...mark, severity }));
+          }}
           canUndo={history.past.length > 0}
           canRedo={history.future.length > 0}
           onUndo={() => act(undo)}
           onRedo={() => act(redo)}
-          onZoom={(by) => setZoom((now) => Math.min(ZOOM_MAX, Math.max(1, now * by)))}
+          onZoom={zoomBy}
+          onHelp={() => setHelp(true)}
         />
       )}
+      <p role="status" className="sr-only">
+        {said}
+      </p>
       <KeyHelp isOpen={isHelp} onClose={() => setHelp(false)} />
     </div>
-  );
-}
-
-function Cross({ x, y, unit, isDot }: { x: number; y: number; unit: number; isDot: boolean }) {
-  const arm = 14 * unit;
-  const d = isDot ? '' : `M${x - arm} ${y}H${x + arm}M${x} ${y - arm}V${y + arm}`;
-  return (
-    <g fill="none" pointerEvents="none">
-      <path d={d} stroke="#10141c" strokeWidth={5 * unit} />
-      <path d={d} stroke="#ffffff" strokeWidth={2 * unit} />
-      <circle cx={x} cy={y} r={6 * unit} fill="#ffffffaa" stroke="#10141c" strokeWidth={2 * unit} />
-    </g>
   );
 }

@@ -4,12 +4,24 @@ import { Button } from '@/components/ui/Button';
 import { Choice } from '@/components/ui/Choice';
 import { SelectField } from '@/components/ui/SelectField';
 import { TextField } from '@/components/ui/TextField';
-import { type Mark, MARK_KINDS, type MarkKind, type MarkSide, moveMark } from './model/mark';
+import { useState } from 'react';
+import { NOTE_MAX } from './mark-limits-schema';
+import {
+  changeKind,
+  type Mark,
+  MARK_KINDS,
+  type MarkKind,
+  type MarkSide,
+  moveMark,
+  movePoint,
+  photoPoint,
+} from './model/mark';
 import { KIND_WORDS } from './model/mark-text';
 
 interface Props {
   mark: Mark;
-  onEdit: (edit: (mark: Mark) => Mark) => void;
+  /** @param run edits in a row with the same name are one step back */
+  onEdit: (edit: (mark: Mark) => Mark, run?: string) => void;
   onDelete: () => void;
 }
 
@@ -39,7 +51,7 @@ export function MarkEditor({ mark, onEdit, onDelete }: Props) {
       <SelectField
         label="What it is"
         value={mark.kind}
-        onChange={(event) => onEdit((now) => ({ ...now, kind: event.target.value as MarkKind }))}
+        onChange={(event) => onEdit((now) => changeKind(now, event.target.value as MarkKind))}
       >
         {MARK_KINDS.map((kind) => (
           <option key={kind} value={kind}>
@@ -61,25 +73,55 @@ export function MarkEditor({ mark, onEdit, onDelete }: Props) {
       />
       <TextField
         label="Note"
-        maxLength={400}
+        maxLength={NOTE_MAX}
         value={mark.note}
-        onChange={(event) => onEdit((now) => ({ ...now, note: event.target.value }))}
+        onChange={(event) => onEdit((now) => ({ ...now, note: event.target.value }), 'note')}
       />
-      <div role="group" aria-label="Move it" className="flex flex-wrap gap-2">
-        {NUDGES.map(({ label, Icon, dx, dy }) => (
-          <Button
-            key={label}
-            aria-label={`Move it ${label}`}
-            onClick={() => onEdit((now) => moveMark(now, dx, dy))}
-          >
-            <Icon aria-hidden size={20} />
-          </Button>
-        ))}
+      <MoveIt key={mark.id} mark={mark} onEdit={onEdit} />
+      <div>
         <Button look="danger" onClick={onDelete}>
           <Trash2 aria-hidden size={20} />
           Delete
         </Button>
       </div>
+    </div>
+  );
+}
+
+const partWords = (index: number, count: number) =>
+  index === 0 ? 'The first end' : index === count - 1 ? 'The last end' : `Bend ${index} of ${count - 2}`;
+
+/** The whole mark, or one point of it, moved by buttons. */
+function MoveIt({ mark, onEdit }: Pick<Props, 'mark' | 'onEdit'>) {
+  const [part, setPart] = useState('whole');
+  const count = mark.points.length;
+  const at = mark.points[Number(part)];
+  const move = (dx: number, dy: number) =>
+    onEdit(
+      (now) => (at ? movePoint(now, Number(part), photoPoint(at.x + dx, at.y + dy)) : moveMark(now, dx, dy)),
+      `move ${part}`,
+    );
+  return (
+    <div role="group" aria-label="Move it" className="flex flex-wrap items-end gap-2">
+      {count > 1 ? (
+        <SelectField
+          label="Move"
+          value={at ? part : 'whole'}
+          onChange={(event) => setPart(event.target.value)}
+        >
+          <option value="whole">The whole mark</option>
+          {mark.points.map((_, index) => (
+            <option key={index} value={index}>
+              {partWords(index, count)}
+            </option>
+          ))}
+        </SelectField>
+      ) : null}
+      {NUDGES.map(({ label, Icon, dx, dy }) => (
+        <Button key={label} aria-label={`Move it ${label}`} onClick={() => move(dx, dy)}>
+          <Icon aria-hidden size={20} />
+        </Button>
+      ))}
     </div>
   );
 }

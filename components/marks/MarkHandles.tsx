@@ -1,7 +1,8 @@
 'use client';
-import { type PointerEvent, type RefObject, useRef } from 'react';
+import { type PointerEvent, type RefObject, useRef, useState } from 'react';
 import { type Mark, moveMark, movePoint, type PhotoPoint } from './model/mark';
-import { MarkShape } from './MarkShape';
+import { markText } from './model/mark-text';
+import { PhotoMark } from './PhotoMark';
 import { pointOf } from './useDrawing';
 
 interface Props {
@@ -9,55 +10,70 @@ interface Props {
   surface: RefObject<SVGSVGElement | null>;
   widthPx: number;
   heightPx: number;
-  unit: number;
+  /** While something is being drawn a line may begin where another ends, so the handles let it through. */
+  isHeld: boolean;
   onMoved: (mark: Mark) => void;
-  /** What is shown while it is being moved. */
-  onMoving: (mark: Mark | null) => void;
 }
 
-/** The mark in hand: dragged whole by its line, or by one of its ends. Arrow keys do the same. */
-export function MarkHandles({ mark, surface, widthPx, heightPx, unit, onMoved, onMoving }: Props) {
+/** More bends than these are moved with the whole line; a handle on each would hide it. */
+const HANDLES_MAX = 8;
+
+const handlesOf = ({ points }: Mark): number[] =>
+  points.length <= HANDLES_MAX ? points.map((_, i) => i) : [0, points.length - 1];
+
+/** The mark in hand: moved whole by its line, or by one of its points. Arrow keys and the list beside the photo do the same. */
+export function MarkHandles({ mark, surface, widthPx, heightPx, isHeld, onMoved }: Props) {
   const grip = useRef<{ from: PhotoPoint; index: number | null; moved: Mark } | null>(null);
+  const [moved, setMoved] = useState<Mark | null>(null);
+  const shown = moved ?? mark;
   const grab = (event: PointerEvent<SVGElement>, index: number | null) => {
-    if (!surface.current) return;
-    event.stopPropagation();
-    event.currentTarget.setPointerCapture(event.pointerId);
-    grip.current = { from: pointOf(surface.current, event), index, moved: mark };
+    const from = surface.current && pointOf(surface.current, event);
+    if (!from || event.button !== 0) return;
+    event.currentTarget.setPointerCapture?.(event.pointerId);
+    grip.current = { from, index, moved: mark };
   };
   const drag = (event: PointerEvent<SVGElement>) => {
     const held = grip.current;
-    if (!held || !surface.current) return;
-    const to = pointOf(surface.current, event);
+    const to = surface.current && pointOf(surface.current, event);
+    if (!held || !to) return;
     held.moved =
       held.index === null
         ? moveMark(mark, to.x - held.from.x, to.y - held.from.y)
         : movePoint(mark, held.index, to);
-    onMoving(held.moved);
+    setMoved(held.moved);
+  };
+  const letGo = () => {
+    grip.current = null;
+    setMoved(null);
   };
   const drop = () => {
-    const held = grip.current;
-    grip.current = null;
-    onMoving(null);
-    if (held) onMoved(held.moved);
+    if (grip.current) onMoved(grip.current.moved);
+    letGo();
   };
-  const moves = { onPointerMove: drag, onPointerUp: drop, onPointerCancel: drop };
-  const ends = mark.points.length === 1 ? [0] : [0, mark.points.length - 1];
+  const moves = {
+    onPointerMove: drag,
+    onPointerUp: drop,
+    onPointerCancel: letGo,
+    // A click that ends a move is not a choice of what lies beneath.
+    onClick: (event: { stopPropagation: () => void }) => event.stopPropagation(),
+  };
   return (
-    <g className="touch-none">
+    <g className="touch-none" pointerEvents={isHeld ? undefined : 'none'}>
       <g className="cursor-move" onPointerDown={(event) => grab(event, null)} {...moves}>
-        <MarkShape mark={mark} widthPx={widthPx} heightPx={heightPx} unit={unit} isSelected />
+        <PhotoMark mark={shown} widthPx={widthPx} heightPx={heightPx} label={markText(shown)} isSelected />
       </g>
-      {ends.map((index) => {
-        const point = mark.points[index];
-        return point ? (
+      {handlesOf(shown).map((index) => {
+        const point = shown.points[index];
+        return point && isHeld ? (
           <circle
             key={index}
             cx={point.x * widthPx}
             cy={point.y * heightPx}
-            r={13 * unit}
-            fill="#ffffff88"
-            stroke="#10141c"
-            strokeWidth={3 * unit}
+            r={14}
+            fill="#fffdf6"
+            fillOpacity={0.6}
+            stroke="#10151c"
+            strokeWidth={3}
             className="cursor-grab"
             onPointerDown={(event) => grab(event, index)}
             {...moves}

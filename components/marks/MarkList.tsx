@@ -13,7 +13,7 @@ interface Props {
   selected: string | null;
   onSelect: (id: string | null) => void;
   onAdd: (kind: MarkKind, points: PhotoPoint[]) => void;
-  onEdit: (id: string, edit: (mark: Mark) => Mark) => void;
+  onEdit: (id: string, edit: (mark: Mark) => Mark, run?: string) => void;
   onDelete: (id: string) => void;
 }
 
@@ -22,7 +22,7 @@ export function MarkList({ marks, selected, onSelect, onAdd, onEdit, onDelete }:
   return (
     <div className="grid gap-2">
       {marks.length === 0 ? (
-        <p className="text-graphite">No mark on this photo yet. Draw along a line, or tap its two ends.</p>
+        <p className="text-graphite">No mark on this photo yet. Draw along a line, or tap its points.</p>
       ) : null}
       <ul className="grid gap-1">
         {marks.map((mark) => (
@@ -38,7 +38,7 @@ export function MarkList({ marks, selected, onSelect, onAdd, onEdit, onDelete }:
             {mark.id === selected ? (
               <MarkEditor
                 mark={mark}
-                onEdit={(edit) => onEdit(mark.id, edit)}
+                onEdit={(edit, run) => onEdit(mark.id, edit, run)}
                 onDelete={() => onDelete(mark.id)}
               />
             ) : null}

@@ -1,64 +1,45 @@
 'use client';
-import { Eye, Redo2, Undo2, ZoomIn, ZoomOut } from 'lucide-react';
+import { MousePointer2, Redo2, Undo2, ZoomIn, ZoomOut } from 'lucide-react';
 import { ToggleGroup } from 'radix-ui';
 import type { ReactNode } from 'react';
-import { markStrokes } from './shapes';
-import { MARK_KINDS, type MarkKind } from './model/mark';
+import { KindIcon } from './KindIcon';
+import { MARK_KINDS, type MarkSeverity } from './model/mark';
 import { KIND_WORDS } from './model/mark-text';
-import type { Tool } from './useDrawing';
+import { StrengthPicker } from './StrengthPicker';
+import type { Tool } from './tool';
+import { STEP } from './useViewport';
 
 interface Props {
   tool: Tool;
   onTool: (tool: Tool) => void;
+  /** Of the chosen mark, or of the next one. */
+  severity: MarkSeverity;
+  onSeverity: (severity: MarkSeverity) => void;
   canUndo: boolean;
   canRedo: boolean;
   onUndo: () => void;
   onRedo: () => void;
   onZoom: (by: number) => void;
-}
-
-const ICON_POINTS: Record<MarkKind, { x: number; y: number }[]> = {
-  tight: [{ x: 6, y: 22 }, { x: 24, y: 8 }],
-  slack: [{ x: 5, y: 20 }, { x: 25, y: 10 }],
-  gap: [{ x: 6, y: 9 }, { x: 24, y: 9 }],
-  pooling: [{ x: 5, y: 15 }, { x: 25, y: 15 }],
-  tilt: [{ x: 5, y: 18 }, { x: 25, y: 12 }],
-  pin: [{ x: 10, y: 10 }],
-}; // prettier-ignore
-
-function KindIcon({ kind }: { kind: MarkKind }) {
-  return (
-    <svg viewBox="0 0 30 30" width="30" height="30" aria-hidden fill="none" stroke="currentColor">
-      {markStrokes(kind, ICON_POINTS[kind], 1, 0.55).map(({ d, dash }, i) => (
-        <path
-          key={i}
-          d={d}
-          strokeWidth="2.2"
-          strokeDasharray={dash}
-          strokeLinecap="round"
-          strokeLinejoin="round"
-        />
-      ))}
-    </svg>
-  );
+  onHelp: () => void;
 }
 
 const CELL =
-  'flex min-h-12 min-w-14 flex-col items-center justify-center rounded-md px-1 leading-tight data-[state=on]:bg-ink data-[state=on]:text-cloth';
+  'flex min-h-12 min-w-11 flex-1 flex-col items-center justify-center rounded-md px-0.5 leading-tight data-[state=on]:bg-ink data-[state=on]:text-cloth lg:flex-none lg:min-w-16';
 
-/** What the hand holds: the eye, or one of the six marks; beside it the way back and the glass. */
-export function MarkToolbar({ tool, onTool, canUndo, canRedo, onUndo, onRedo, onZoom }: Props) {
+/** What the hand holds: the six marks or the eye, how strong; the way back, and the glass. Under the thumb on a phone, beside the photo on a desk. */
+export function MarkToolbar(props: Props) {
+  const { tool, onTool, severity, onSeverity } = props;
   return (
-    <div className="flex flex-wrap items-center gap-x-4 gap-y-1">
+    <div className="grid gap-1 bg-cloth py-1 lg:content-start lg:gap-3">
       <ToggleGroup.Root
         type="single"
         value={tool}
         onValueChange={(value) => value && onTool(value as Tool)}
         aria-label="Draw"
-        className="flex flex-wrap gap-1"
+        className="flex gap-0.5 lg:flex-col"
       >
         <ToggleGroup.Item value="look" className={CELL} aria-label="Look and choose">
-          <Eye aria-hidden size={24} />
+          <MousePointer2 aria-hidden size={24} />
           <span className="text-sm">Look</span>
         </ToggleGroup.Item>
         {MARK_KINDS.map((kind) => (
@@ -68,19 +49,29 @@ export function MarkToolbar({ tool, onTool, canUndo, canRedo, onUndo, onRedo, on
           </ToggleGroup.Item>
         ))}
       </ToggleGroup.Root>
-      <div className="flex gap-1">
-        <IconButton label="Undo" isOff={!canUndo} onClick={onUndo}>
-          <Undo2 aria-hidden size={22} />
-        </IconButton>
-        <IconButton label="Redo" isOff={!canRedo} onClick={onRedo}>
-          <Redo2 aria-hidden size={22} />
-        </IconButton>
-        <IconButton label="Nearer" onClick={() => onZoom(1.5)}>
-          <ZoomIn aria-hidden size={22} />
-        </IconButton>
-        <IconButton label="Farther" onClick={() => onZoom(1 / 1.5)}>
-          <ZoomOut aria-hidden size={22} />
-        </IconButton>
+      <div className="flex items-center justify-between gap-1 lg:flex-col">
+        <StrengthPicker severity={severity} onSeverity={onSeverity} />
+        <div className="flex lg:grid lg:grid-cols-2">
+          <IconButton label="Undo" isOff={!props.canUndo} onClick={props.onUndo}>
+            <Undo2 aria-hidden size={22} />
+          </IconButton>
+          <IconButton label="Redo" isOff={!props.canRedo} onClick={props.onRedo}>
+            <Redo2 aria-hidden size={22} />
+          </IconButton>
+          <IconButton label="Nearer" onClick={() => props.onZoom(STEP)}>
+            <ZoomIn aria-hidden size={22} />
+          </IconButton>
+          <IconButton label="Farther" onClick={() => props.onZoom(1 / STEP)}>
+            <ZoomOut aria-hidden size={22} />
+          </IconButton>
+        </div>
+        <button
+          type="button"
+          onClick={props.onHelp}
+          className="hidden min-h-11 text-sm text-chalk underline underline-offset-4 lg:inline-block"
+        >
+          Keys
+        </button>
       </div>
     </div>
   );
@@ -93,7 +84,7 @@ function IconButton(props: { label: string; isOff?: boolean; onClick: () => void
       aria-label={props.label}
       disabled={props.isOff}
       onClick={props.onClick}
-      className="inline-flex size-12 items-center justify-center rounded-md disabled:opacity-40"
+      className="inline-flex size-11 items-center justify-center rounded-md disabled:opacity-40"
     >
       {props.children}
     </button>

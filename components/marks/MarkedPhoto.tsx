@@ -8,19 +8,23 @@ import type { PhotoDto } from '@/db/queries/photos';
 import { ContestedMarks } from './ContestedMarks';
 import { MarkCanvas } from './MarkCanvas';
 import { MarkList } from './MarkList';
-import { addMark, editMark, removeMark } from './model/history';
-import { newMark } from './useDrawing';
+import { addMark, editMark, removeMark, startHistory } from './model/history';
+import { newMark } from './model/mark';
 import { useMarks } from './useMarks';
+import { useWaitingMarks } from './useWaitingMarks';
 
 interface Props {
   userId: string;
   photo: PhotoDto;
 }
 
+const NOTHING_YET = startHistory([]);
+
 /** One photo with its marks: drawn on it, and listed beside it. */
 export function MarkedPhoto({ userId, photo }: Props) {
   const { id, revision, widthPx, heightPx, view, isMirrored } = photo;
   const { marks, history, saveState, conflicts, act, settle } = useMarks(userId, photo);
+  const elsewhere = useWaitingMarks(userId, id);
   const [selected, setSelected] = useState<string | null>(null);
   const alt = `${VIEW_WORDS[view]}${isMirrored ? ', in a mirror' : ''}`;
   const src = {
@@ -34,13 +38,16 @@ export function MarkedPhoto({ userId, photo }: Props) {
     <div className="grid gap-3">
       <MarkCanvas
         photo={src}
-        history={history ?? { marks: [], past: [], future: [] }}
+        history={history ?? NOTHING_YET}
         act={act}
         selected={selected}
         onSelect={setSelected}
         isReadOnly={history === null}
       />
       <SaveLine state={saveState} />
+      {elsewhere > 0 ? (
+        <p className="text-sm text-graphite">On this phone only: {elsewhere} waiting on other photos.</p>
+      ) : null}
       <ContestedMarks marks={marks} conflicts={conflicts} onSettle={settle} />
       <MarkList
         marks={marks}
@@ -51,7 +58,7 @@ export function MarkedPhoto({ userId, photo }: Props) {
           act((now) => addMark(now, mark));
           setSelected(mark.id);
         }}
-        onEdit={(markId, edit) => act((now) => editMark(now, markId, edit))}
+        onEdit={(markId, edit, run) => act((now) => editMark(now, markId, edit, run))}
         onDelete={(markId) => {
           act((now) => removeMark(now, markId));
           setSelected(null);

@@ -1,110 +1,109 @@
 'use client';
-import { type PointerEvent, type RefObject, useRef, useState } from 'react';
-import { type Mark, type MarkKind, type PhotoPoint, photoPoint } from './model/mark';
-import { simplify } from './model/simplify';
-
-export type Tool = MarkKind | 'look';
+import { type PointerEvent, type RefObject, useEffect, useRef } from 'react';
+import { type Ink, inkOn } from './ink';
+import { type PhotoPoint, photoPoint } from './model/mark';
+import { isTap, lineOf } from './model/stroke';
 
 interface Options {
+  /** What is drawn on: covers the photo whatever the zoom. */
   surface: RefObject<SVGSVGElement | null>;
-  ink: RefObject<SVGPathElement | null>;
-  tool: Tool;
-  widthPx: number;
-  heightPx: number;
-  onDrawn: (points: PhotoPoint[]) => void;
+  /** What the wet ink lies on: covers the part of the photo that is in sight. */
+  wet: RefObject<HTMLCanvasElement | null>;
+  isOn: boolean;
+  onLine: (points: PhotoPoint[]) => void;
+  onTap: (point: PhotoPoint) => void;
 }
-
-const TAP_PX = 8;
-const TOLERANCE_PX = 1.5;
 
 interface Stroke {
   pointerId: number;
-  points: { x: number; y: number }[];
+  /** Pixels from the upper left of the photo. */
+  pixels: { x: number; y: number }[];
+  photo: DOMRect;
+  ink: Ink;
+  stop: () => void;
 }
 
-/** Where an event lies on the photo, whatever the zoom. */
-export function pointOf(surface: SVGSVGElement, event: { clientX: number; clientY: number }): PhotoPoint {
-  const box = surface.getBoundingClientRect();
-  return photoPoint((event.clientX - box.left) / box.width, (event.clientY - box.top) / box.height);
+/** Where an event lies on the photo, whatever the zoom; null while the photo has no size. */
+export function pointOf(
+  surface: SVGSVGElement,
+  event: { clientX: number; clientY: number },
+): PhotoPoint | null {
+  const { left, top, width, height } = surface.getBoundingClientRect();
+  if (width === 0 || height === 0) return null;
+  return photoPoint((event.clientX - left) / width, (event.clientY - top) / height);
 }
+
+/** The earliest word of a moving pointer that this browser gives. */
+const movesEarly = () => ('onpointerrawupdate' in window ? 'pointerrawupdate' : 'pointermove');
+
+const eachOf = (event: globalThis.PointerEvent) => {
+  const all = event.getCoalescedEvents?.() ?? [];
+  return all.length > 0 ? all : [event];
+};
 
 /**
- * Draws with finger, pen or mouse: a stroke is a line, two taps are its ends, one tap is a pin. Ink goes straight into the path
- * element, past React, so that it follows the pointer within the frame.
+ * Draws with finger, pen or mouse: a stroke is a line, a touch without a way is a tap. While a stroke lasts nothing is measured
+ * and nothing of the page is drawn again.
  */
-export function useDrawing({ surface, ink, tool, widthPx, heightPx, onDrawn }: Options) {
+export function useDrawing({ surface, wet, isOn, onLine, onTap }: Options) {
   const stroke = useRef<Stroke | null>(null);
   const hasPen = useRef(false);
-  const [firstTap, setFirstTap] = useState<PhotoPoint | null>(null);
 
-  const clear = () => {
+  const drop = () => {
+    stroke.current?.stop();
+    stroke.current?.ink.end();
     stroke.current = null;
-    ink.current?.setAttribute('d', '');
   };
+  useEffect(() => drop, []);
 
-  const tapped = (point: PhotoPoint) => {
-    if (tool === 'pin') return onDrawn([point]);
-    if (!firstTap) return setFirstTap(point);
-    setFirstTap(null);
-    onDrawn([firstTap, point]);
+  const begin = (event: PointerEvent<SVGSVGElement>) => {
+    const [element, canvas] = [surface.current, wet.current];
+    if (!element || !canvas) return;
+    const photo = element.getBoundingClientRect();
+    const { left, top } = canvas.getBoundingClientRect();
+    if (photo.width === 0 || photo.height === 0) return;
+    const ink = inkOn(canvas);
+    const pixels: Stroke['pixels'] = [];
+    const add = (events: readonly { clientX: number; clientY: number }[]) => {
+      for (const { clientX, clientY } of events)
+        pixels.push({ x: clientX - photo.left, y: clientY - photo.top });
+      ink.extend(events.map(({ clientX, clientY }) => ({ x: clientX - left, y: clientY - top })));
+    };
+    const move = (moved: Event) => {
+      if (moved instanceof PointerEvent && moved.pointerId === event.pointerId) add(eachOf(moved));
+    };
+    const name = movesEarly();
+    element.addEventListener(name, move);
+    element.setPointerCapture?.(event.pointerId);
+    const stop = () => element.removeEventListener(name, move);
+    ink.begin();
+    stroke.current = { pointerId: event.pointerId, pixels, photo, ink, stop };
+    add([event]);
   };
 
   const onPointerDown = (event: PointerEvent<SVGSVGElement>) => {
-    if (tool === 'look' || event.button !== 0) return;
     if (event.pointerType === 'pen') hasPen.current = true;
-    // Once a pen was seen, a finger is the hand that holds it. A second finger ends a stroke: it was a pinch.
+    if (!isOn || event.button !== 0) return;
+    // Once a pen was seen, a finger is the hand that holds it. A second finger makes a pinch of what was a stroke.
     if (event.pointerType === 'touch' && hasPen.current) return;
-    if (stroke.current) return clear();
-    event.currentTarget.setPointerCapture(event.pointerId);
-    stroke.current = { pointerId: event.pointerId, points: [pointOf(event.currentTarget, event)] };
-  };
-
-  const onPointerMove = (event: PointerEvent<SVGSVGElement>) => {
-    const now = stroke.current;
-    if (!now || now.pointerId !== event.pointerId || !surface.current) return;
-    for (const one of event.nativeEvent.getCoalescedEvents?.() ?? [event.nativeEvent]) {
-      now.points.push(pointOf(surface.current, one));
-    }
-    ink.current?.setAttribute(
-      'd',
-      now.points.map(({ x, y }, i) => `${i === 0 ? 'M' : 'L'}${x * widthPx} ${y * heightPx}`).join(''),
-    );
+    if (stroke.current) return drop();
+    begin(event);
   };
 
   const onPointerUp = (event: PointerEvent<SVGSVGElement>) => {
     const now = stroke.current;
     if (!now || now.pointerId !== event.pointerId) return;
-    clear();
-    const box = event.currentTarget.getBoundingClientRect();
-    const onScreen = now.points.map(({ x, y }) => ({ x: x * box.width, y: y * box.height }));
-    const start = onScreen[0]!;
-    const reach = Math.max(...onScreen.map(({ x, y }) => Math.hypot(x - start.x, y - start.y)));
-    const first = now.points[0]!;
-    if (reach < TAP_PX) return tapped(photoPoint(first.x, first.y));
-    setFirstTap(null);
-    const line = simplify(onScreen, TOLERANCE_PX).map(({ x, y }) =>
-      photoPoint(x / box.width, y / box.height),
-    );
-    onDrawn(tool === 'pin' ? line.slice(0, 1) : line.slice(0, 400));
+    drop();
+    const { pixels, photo } = now;
+    pixels.push({ x: event.clientX - photo.left, y: event.clientY - photo.top });
+    const [first] = pixels;
+    if (!first || isTap(pixels)) return onTap(photoPoint((first?.x ?? 0) / photo.width, (first?.y ?? 0) / photo.height)); // prettier-ignore
+    onLine(lineOf(pixels, photo));
   };
 
-  return {
-    firstTap,
-    forgetTap: () => setFirstTap(null),
-    handlers: { onPointerDown, onPointerMove, onPointerUp, onPointerCancel: clear },
+  const onPointerCancel = (event: PointerEvent<SVGSVGElement>) => {
+    if (stroke.current?.pointerId === event.pointerId) drop();
   };
+
+  return { onPointerDown, onPointerUp, onPointerCancel };
 }
-
-export const newMark = (
-  id: string,
-  kind: MarkKind,
-  severity: Mark['severity'],
-  points: PhotoPoint[],
-): Mark => ({
-  id,
-  kind,
-  severity,
-  side: 'both',
-  points,
-  note: '',
-});

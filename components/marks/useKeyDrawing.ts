@@ -1,19 +1,27 @@
 'use client';
 import { type KeyboardEvent, useState } from 'react';
-import { type Mark, MARK_KINDS, moveMark, type PhotoPoint, photoPoint } from './model/mark';
-import type { Tool } from './useDrawing';
+import { MARK_KINDS, type PhotoPoint, photoPoint } from './model/mark';
+import { placeWords } from './model/place-words';
+import type { Tool } from './tool';
 
 interface Options {
   tool: Tool;
-  selected: Mark | null;
+  /** The photo's size on the screen, in pixels: a step of a key is one of them. */
+  size: { width: number; height: number };
+  hasSelected: boolean;
   onTool: (tool: Tool) => void;
-  onDrawn: (points: PhotoPoint[]) => void;
-  onEdit: (id: string, edit: (mark: Mark) => Mark) => void;
-  onDelete: (id: string) => void;
-  onSelect: (id: string | null) => void;
+  /** Sets a point there, or chooses what lies there when nothing is being drawn. */
+  onSet: (at: PhotoPoint) => void;
+  /** Moves the chosen mark, by fractions of the photo. */
+  onNudge: (dx: number, dy: number) => void;
+  onDelete: () => void;
+  onLetGo: () => void;
   onUndo: () => void;
   onRedo: () => void;
+  /** Nearer above 1, farther below; 0 is the whole photo. */
+  onZoom: (factor: number) => void;
   onHelp: () => void;
+  say: (words: string) => void;
 }
 
 const ARROWS: Record<string, [number, number]> = {
@@ -22,52 +30,50 @@ const ARROWS: Record<string, [number, number]> = {
   ArrowUp: [0, -1],
   ArrowDown: [0, 1],
 };
-const STEP = 0.02;
-const FINE = 0.002;
+const COARSE = 10;
+const ZOOMS: Record<string, number> = { '+': 1.5, '=': 1.5, '-': 1 / 1.5, '0': 0 };
 
-/** The keys of the photo. Arrows move the cross, or the chosen mark; Enter sets an end; the second Enter makes the line. */
+/** The keys of the photo: arrows move a cross, Enter sets points with it, twice in one place ends the line. */
 export function useKeyDrawing(options: Options) {
-  const { tool, selected } = options;
+  const { tool, size, hasSelected } = options;
   const [cross, setCross] = useState<PhotoPoint | null>(null);
-  const [start, setStart] = useState<PhotoPoint | null>(null);
 
-  const setEnd = () => {
-    if (!cross || tool === 'look') return;
-    if (tool === 'pin') return options.onDrawn([cross]);
-    if (!start) return setStart(cross);
-    setStart(null);
-    options.onDrawn([start, cross]);
+  const arrow = ([x, y]: [number, number], isCoarse: boolean) => {
+    const by = isCoarse ? COARSE : 1;
+    const [dx, dy] = [(x * by) / size.width, (y * by) / size.height];
+    if (tool === 'look' && hasSelected) return options.onNudge(dx, dy);
+    const now = cross ? photoPoint(cross.x + dx, cross.y + dy) : photoPoint(0.5, 0.5);
+    setCross(now);
+    options.say(`Cross at the ${placeWords(now)}`);
   };
   const leave = () => {
-    setStart(null);
     setCross(null);
-    options.onSelect(null);
-  };
-  const arrow = ([x, y]: [number, number], isFine: boolean) => {
-    const by = isFine ? FINE : STEP;
-    if (tool === 'look' && selected)
-      return options.onEdit(selected.id, (mark) => moveMark(mark, x * by, y * by));
-    setCross((now) => (now ? photoPoint(now.x + x * by, now.y + y * by) : photoPoint(0.5, 0.5)));
+    options.onLetGo();
   };
 
-  const onKeyDown = (event: KeyboardEvent) => {
-    const act = (): boolean => {
-      const direction = ARROWS[event.key];
-      if (direction) return (arrow(direction, event.shiftKey), true);
-      if ((event.ctrlKey || event.metaKey) && event.key.toLowerCase() === 'z')
-        return ((event.shiftKey ? options.onRedo : options.onUndo)(), true);
-      if (event.ctrlKey || event.metaKey || event.altKey) return false;
-      const kind = MARK_KINDS[Number(event.key) - 1];
-      if (kind) return (options.onTool(kind), true);
-      if (event.key === '0') return (options.onTool('look'), true);
-      if (event.key === 'Enter') return (setEnd(), true);
-      if (event.key === 'Escape') return (leave(), true);
-      if (event.key === '?') return (options.onHelp(), true);
-      if ((event.key === 'Delete' || event.key === 'Backspace') && selected)
-        return (options.onDelete(selected.id), true);
-      return false;
-    };
-    if (act()) event.preventDefault();
+  const withCtrl = (event: KeyboardEvent): boolean => {
+    const key = event.key.toLowerCase();
+    if (key === 'y') return (options.onRedo(), true);
+    if (key !== 'z') return false;
+    return ((event.shiftKey ? options.onRedo : options.onUndo)(), true);
   };
-  return { cross, start, onKeyDown };
+  const act = (event: KeyboardEvent): boolean => {
+    if (event.ctrlKey || event.metaKey) return withCtrl(event);
+    if (event.altKey) return false;
+    const [direction, zoom] = [ARROWS[event.key], ZOOMS[event.key]];
+    if (direction) return (arrow(direction, event.shiftKey), true);
+    if (zoom !== undefined) return (options.onZoom(zoom), true);
+    const kind = MARK_KINDS[Number(event.key) - 1];
+    if (kind) return (options.onTool(kind), true);
+    if (event.key === '7') return (options.onTool('look'), true);
+    if (event.key === 'Enter' && cross) return (options.onSet(cross), true);
+    if (event.key === 'Escape') return (leave(), true);
+    if (event.key === '?') return (options.onHelp(), true);
+    if ((event.key === 'Delete' || event.key === 'Backspace') && hasSelected) return (options.onDelete(), true); // prettier-ignore
+    return false;
+  };
+  const onKeyDown = (event: KeyboardEvent) => {
+    if (act(event)) event.preventDefault();
+  };
+  return { cross, onKeyDown };
 }

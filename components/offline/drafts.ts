@@ -34,6 +34,14 @@ export async function writeDraft(userId: string, key: string, draft: unknown): P
   else await db.put(STORE, draft, key);
 }
 
+/** All drafts whose key begins so, with the rest of their keys. */
+export async function listDrafts<T>(userId: string, prefix: string): Promise<{ rest: string; draft: T }[]> {
+  const range = IDBKeyRange.bound(prefix, `${prefix}\uffff`);
+  const db = await database(userId);
+  const [keys, drafts] = await Promise.all([db.getAllKeys(STORE, range), db.getAll(STORE, range)]);
+  return keys.map((key, i) => ({ rest: String(key).slice(prefix.length), draft: drafts[i] as T }));
+}
+
 export async function countDrafts(userId: string): Promise<number> {
   const keys = await (await database(userId)).getAllKeys(STORE);
   return keys.filter((key) => !String(key).startsWith(KEPT_FOR_UNDO)).length;

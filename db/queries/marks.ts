@@ -1,13 +1,13 @@
 import 'server-only';
-import { and, asc, count, eq, inArray, sql } from 'drizzle-orm';
+import { and, asc, eq, inArray, sql } from 'drizzle-orm';
+import { MARKS_MAX } from '@/components/marks/mark-limits-schema';
 import { db, type Executor } from '../client';
 import { marks } from '../schema/marks';
 import { photos } from '../schema/photos';
 import { recordAudit } from './audit';
+import { judgeMarks } from './judge-marks';
 import type { Viewer } from './viewer';
 import { photoIsKept, roundFittableBy, roundIds, roundVisibleTo } from './visible-to';
-
-const MARKS_MAX = 500;
 
 const COLUMNS = {
   id: marks.id,
@@ -45,12 +45,11 @@ export async function findOwnMarks(viewer: Viewer, photoId: string) {
   return { revision: photo.revision, marks: await ownMarks(db(), viewer, photoId) };
 }
 
+const ownedBy = (viewer: Viewer, photoId: string) =>
+  and(eq(marks.photoId, photoId), eq(marks.authorId, viewer.userId));
+
 const ownMarks = (tx: Executor, viewer: Viewer, photoId: string) =>
-  tx
-    .select(COLUMNS)
-    .from(marks)
-    .where(and(eq(marks.photoId, photoId), eq(marks.authorId, viewer.userId)))
-    .orderBy(asc(marks.id));
+  tx.select(COLUMNS).from(marks).where(ownedBy(viewer, photoId)).orderBy(asc(marks.id));
 
 export type MarkDto = Awaited<ReturnType<typeof ownMarks>>[number];
 
@@ -65,66 +64,32 @@ export type MarkSaving =
   | { kind: 'other-revision'; revision: number }
   | { kind: 'too-many' };
 
-const ofAuthor = (viewer: Viewer, photoId: string, id: string) =>
-  and(eq(marks.id, id), eq(marks.photoId, photoId), eq(marks.authorId, viewer.userId));
+const SENT = {
+  kind: sql`excluded.kind`,
+  severity: sql`excluded.severity`,
+  side: sql`excluded.side`,
+  points: sql`excluded.points`,
+  note: sql`excluded.note`,
+};
 
-async function saveOne(
-  tx: Executor,
-  viewer: Viewer,
-  photoId: string,
-  { mark: { id, ...drawn }, seen }: MarkBatchInput['upserts'][number],
-  answer: MarkAnswerDto,
-): Promise<void> {
-  const [now] = await tx
-    .select(COLUMNS)
-    .from(marks)
-    .where(ofAuthor(viewer, photoId, id))
-    .for('update');
-  if (!now && seen === 0) {
-    const [made] = await tx
-      .insert(marks)
-      .values({ id, photoId, authorId: viewer.userId, ...drawn })
-      .onConflictDoNothing()
-      .returning(COLUMNS);
-    if (made) answer.saved.push(made);
-    else answer.conflicts.push({ id, theirs: null });
-    return;
-  }
-  if (now?.version !== seen) {
-    answer.conflicts.push({ id, theirs: now ?? null });
-    return;
-  }
-  const [written] = await tx
-    .update(marks)
-    .set({ ...drawn, version: sql`${marks.version} + 1`, updatedAt: sql`now()` })
-    .where(ofAuthor(viewer, photoId, id))
+/** Writes them in one statement. An id that stands on another photo or with another author is left alone and not given back. */
+async function writeMarks(tx: Executor, viewer: Viewer, photoId: string, drawn: MarkInput[]) {
+  if (drawn.length === 0) return [];
+  return tx
+    .insert(marks)
+    .values(drawn.map((mark) => ({ photoId, authorId: viewer.userId, ...mark })))
+    .onConflictDoUpdate({
+      target: marks.id,
+      set: { ...SENT, version: sql`${marks.version} + 1`, updatedAt: sql`now()` },
+      setWhere: ownedBy(viewer, photoId)!,
+    })
     .returning(COLUMNS);
-  if (written) answer.saved.push(written);
-}
-
-async function deleteOne(
-  tx: Executor,
-  viewer: Viewer,
-  photoId: string,
-  { id, seen }: MarkBatchInput['deletes'][number],
-  answer: MarkAnswerDto,
-): Promise<void> {
-  const [now] = await tx
-    .select(COLUMNS)
-    .from(marks)
-    .where(ofAuthor(viewer, photoId, id))
-    .for('update');
-  if (now && now.version !== seen) {
-    answer.conflicts.push({ id, theirs: now });
-    return;
-  }
-  if (now) await tx.delete(marks).where(ofAuthor(viewer, photoId, id));
-  answer.deleted.push(id);
 }
 
 /**
  * Saves a batch into the viewer's own layer: adding never conflicts; a mark that has changed since it was seen comes back with
- * what stands there, and the rest is saved. Sent again, a batch changes nothing but the versions.
+ * what stands there, and the rest is saved. Sent again, a batch changes nothing. The photo's row is held meanwhile, so that
+ * two batches go one after the other.
  */
 export async function saveMarks(viewer: Viewer, photoId: string, batch: MarkBatchInput): Promise<MarkSaving> {
   return db().transaction(async (tx): Promise<MarkSaving> => {
@@ -137,18 +102,23 @@ export async function saveMarks(viewer: Viewer, photoId: string, batch: MarkBatc
       .for('update');
     if (!photo) return { kind: 'missing' };
     if (photo.revision !== batch.revision) return { kind: 'other-revision', revision: photo.revision };
-    const answer: MarkAnswerDto = { saved: [], deleted: [], conflicts: [] };
-    for (const gone of batch.deletes) await deleteOne(tx, viewer, photoId, gone, answer);
-    const [held] = await tx
-      .select({ marks: count() })
-      .from(marks)
-      .where(and(eq(marks.photoId, photoId), eq(marks.authorId, viewer.userId)));
-    const added = batch.upserts.filter(({ seen }) => seen === 0).length;
-    if ((held?.marks ?? 0) + added > MARKS_MAX) return { kind: 'too-many' };
-    for (const upsert of batch.upserts) await saveOne(tx, viewer, photoId, upsert, answer);
-    if (answer.saved.length + answer.deleted.length > 0) {
+    const judged = judgeMarks(await ownMarks(tx, viewer, photoId), batch);
+    if (judged.countAfter > MARKS_MAX) return { kind: 'too-many' };
+    if (judged.toDelete.length > 0)
+      await tx.delete(marks).where(and(ownedBy(viewer, photoId), inArray(marks.id, judged.toDelete)));
+    const written = await writeMarks(tx, viewer, photoId, judged.toWrite);
+    if (written.length + judged.toDelete.length > 0) {
       await recordAudit(tx, { actorId: viewer.userId, verb: 'update', objectKind: 'photo-marks', objectId: photoId, fields: ['marks'] }); // prettier-ignore
     }
-    return { kind: 'done', answer };
+    const done = new Set(written.map(({ id }) => id));
+    const taken = judged.toWrite.filter(({ id }) => !done.has(id)).map(({ id }) => ({ id, theirs: null }));
+    return {
+      kind: 'done',
+      answer: {
+        saved: [...judged.standing, ...written],
+        deleted: judged.deleted,
+        conflicts: [...judged.conflicts, ...taken],
+      },
+    };
   });
 }

@@ -1,4 +1,5 @@
-import type { Mark, MarkKind, PhotoPoint } from './mark';
+import type { Mark, MarkKind } from './mark';
+import { placeWords } from './place-words';
 
 export const KIND_WORDS: Record<MarkKind, string> = {
   tight: 'Tight line',
@@ -11,14 +12,7 @@ export const KIND_WORDS: Record<MarkKind, string> = {
 export const SEVERITY_WORDS = { 1: 'faint', 2: 'clear', 3: 'pulling' } as const;
 const SIDE_WORDS = { left: 'your left', right: 'your right', both: '' } as const;
 
-/** A place on the photo in nine words, as one would point at it. */
-function placeWords({ x, y }: PhotoPoint): string {
-  const row = y < 1 / 3 ? 'upper' : y < 2 / 3 ? 'middle' : 'lower';
-  const column = x < 1 / 3 ? 'left' : x < 2 / 3 ? 'centre' : 'right';
-  return `${row} ${column}`;
-}
-
-/** A mark in words, for ears, search and print: "Tight line, clear, your left, from the middle centre to the upper left of the photo". */
+/** A mark in words, for ears, search and print: "Tight line, clear, your left, from the middle to the upper left of the photo". */
 export function markText(mark: Mark): string {
   const first = mark.points[0];
   const last = mark.points.at(-1);

@@ -3,7 +3,8 @@ interface Point {
   y: number;
 }
 
-function distanceToChord({ x, y }: Point, a: Point, b: Point): number {
+/** From a point to the nearest spot of the chord from a to b, in their unit. */
+export function distanceToChord({ x, y }: Point, a: Point, b: Point): number {
   const length = Math.hypot(b.x - a.x, b.y - a.y);
   if (length === 0) return Math.hypot(x - a.x, y - a.y);
   const along = Math.min(1, Math.max(0, ((x - a.x) * (b.x - a.x) + (y - a.y) * (b.y - a.y)) / length ** 2));
