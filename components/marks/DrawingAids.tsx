@@ -27,7 +27,9 @@ export function DrawingAids({ points, cross, widthPx, heightPx }: Props) {
 function Cross({ x, y }: { x: number; y: number }) {
   const mark = useRef<SVGGElement | null>(null);
   // A cross that keys have moved out of sight takes the photo along.
-  useEffect(() => mark.current?.scrollIntoView?.({ block: 'nearest', inline: 'nearest' }), [x, y]);
+  useEffect(() => {
+    mark.current?.scrollIntoView?.({ block: 'nearest', inline: 'nearest' });
+  }, [x, y]);
   const arms = `M${x - 18} ${y}H${x + 18}M${x} ${y - 18}V${y + 18}`;
   return (
     <g ref={mark}>

@@ -15,13 +15,24 @@ const KEYS = [
   ['0', 'the whole photo'],
 ] as const;
 
-export function KeyHelp({ isOpen, onClose }: { isOpen: boolean; onClose: () => void }) {
+interface Props {
+  isOpen: boolean;
+  onClose: () => void;
+  /** Gone from sight: the focus goes back to the photo. */
+  onClosed: () => void;
+}
+
+export function KeyHelp({ isOpen, onClose, onClosed }: Props) {
   return (
     <Dialog.Root open={isOpen} onOpenChange={(open) => !open && onClose()}>
       <Dialog.Portal>
         <Dialog.Overlay className="fixed inset-0 z-40 bg-black/50" />
         <Dialog.Content
           aria-describedby={undefined}
+          onCloseAutoFocus={(event) => {
+            event.preventDefault();
+            onClosed();
+          }}
           className="fixed inset-x-4 top-10 z-50 mx-auto grid max-w-lg gap-4 bg-paper p-6 shadow-lifted"
         >
           <Dialog.Title className="text-lg font-bold">Keys on the photo</Dialog.Title>

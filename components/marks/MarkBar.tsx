@@ -24,7 +24,7 @@ export function MarkBar({ mark, onEdit, onDelete, onLetGo }: Props) {
     <div role="group" aria-label="The chosen mark" className="flex flex-wrap items-center gap-1 bg-paper p-1">
       <select
         aria-label="Kind of the chosen mark"
-        className={`${FIELD} max-w-36 flex-1`}
+        className={`${FIELD} min-w-36 flex-1 md:max-w-48`}
         value={mark.kind}
         onChange={(event) => onEdit((now) => changeKind(now, event.target.value as MarkKind))}
       >
@@ -34,24 +34,6 @@ export function MarkBar({ mark, onEdit, onDelete, onLetGo }: Props) {
           </option>
         ))}
       </select>
-      <ToggleGroup.Root
-        type="single"
-        value={mark.side}
-        onValueChange={(side) => side && onEdit((now) => ({ ...now, side: side as MarkSide }))}
-        aria-label="Leg of the chosen mark"
-        className="flex"
-      >
-        {SIDES.map(({ value, label, short }) => (
-          <ToggleGroup.Item
-            key={value}
-            value={value}
-            aria-label={label}
-            className="min-h-11 min-w-12 rounded-md px-1.5 text-sm data-[state=on]:bg-ink data-[state=on]:text-cloth"
-          >
-            {short}
-          </ToggleGroup.Item>
-        ))}
-      </ToggleGroup.Root>
       <button
         type="button"
         aria-label="Delete the chosen mark"
@@ -68,6 +50,24 @@ export function MarkBar({ mark, onEdit, onDelete, onLetGo }: Props) {
       >
         <X aria-hidden size={22} />
       </button>
+      <ToggleGroup.Root
+        type="single"
+        value={mark.side}
+        onValueChange={(side) => side && onEdit((now) => ({ ...now, side: side as MarkSide }))}
+        aria-label="Leg of the chosen mark"
+        className="flex flex-1 md:flex-none md:order-first"
+      >
+        {SIDES.map(({ value, label, short }) => (
+          <ToggleGroup.Item
+            key={value}
+            value={value}
+            aria-label={label}
+            className="min-h-11 min-w-12 flex-1 rounded-md px-2 text-sm data-[state=on]:bg-ink data-[state=on]:text-cloth"
+          >
+            {short}
+          </ToggleGroup.Item>
+        ))}
+      </ToggleGroup.Root>
     </div>
   );
 }

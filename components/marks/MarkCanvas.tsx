@@ -12,6 +12,7 @@ import { markAt } from './model/hit-test';
 import { addMark, editMark, type MarkHistory, redo, removeMark, undo } from './model/history';
 import { type Mark, type MarkSeverity, moveMark, newMark, type PhotoPoint } from './model/mark';
 import { markText } from './model/mark-text';
+import { KEY_AGAIN_PX, TAP_AGAIN_PX } from './model/taps';
 import { type CanvasPhoto, PhotoSurface } from './PhotoSurface';
 import { TapBar } from './TapBar';
 import type { Tool } from './tool';
@@ -88,14 +89,14 @@ export function MarkCanvas({ photo, history, act, selected, onSelect, isReadOnly
       taps.forget();
       draw(points);
     },
-    onTap: taps.set,
+    onTap: (at) => taps.set(at, TAP_AGAIN_PX),
   });
   const keys = useKeyDrawing({
     tool,
     size,
     hasSelected: chosen !== null,
     onTool: chooseTool,
-    onSet: isLooking ? choose : taps.set,
+    onSet: (at) => (isLooking ? choose(at) : taps.set(at, KEY_AGAIN_PX)),
     onNudge: (dx, dy) => edit((mark) => moveMark(mark, dx, dy), 'nudge'),
     onDelete: remove,
     onLetGo: letGo,
@@ -162,7 +163,7 @@ export function MarkCanvas({ photo, history, act, selected, onSelect, isReadOnly
       <p role="status" className="sr-only">
         {said}
       </p>
-      <KeyHelp isOpen={isHelp} onClose={() => setHelp(false)} />
+      <KeyHelp isOpen={isHelp} onClose={() => setHelp(false)} onClosed={() => surface.current?.focus()} />
     </div>
   );
 }

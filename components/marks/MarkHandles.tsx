@@ -18,6 +18,9 @@ interface Props {
 /** More bends than these are moved with the whole line; a handle on each would hide it. */
 const HANDLES_MAX = 8;
 
+/** Pixels around a point within which it is held. */
+const HOLD_PX = 18;
+
 const handlesOf = ({ points }: Mark): number[] =>
   points.length <= HANDLES_MAX ? points.map((_, i) => i) : [0, points.length - 1];
 
@@ -65,19 +68,17 @@ export function MarkHandles({ mark, surface, widthPx, heightPx, isHeld, onMoved 
       {handlesOf(shown).map((index) => {
         const point = shown.points[index];
         return point && isHeld ? (
-          <circle
-            key={index}
-            cx={point.x * widthPx}
-            cy={point.y * heightPx}
-            r={14}
-            fill="#fffdf6"
-            fillOpacity={0.6}
-            stroke="#10151c"
-            strokeWidth={3}
-            className="cursor-grab"
-            onPointerDown={(event) => grab(event, index)}
-            {...moves}
-          />
+          <g key={index} className="cursor-grab" onPointerDown={(event) => grab(event, index)} {...moves}>
+            <circle cx={point.x * widthPx} cy={point.y * heightPx} r={HOLD_PX} fill="transparent" />
+            <circle
+              cx={point.x * widthPx}
+              cy={point.y * heightPx}
+              r={7}
+              fill="#fffdf6"
+              stroke="#10151c"
+              strokeWidth={3}
+            />
+          </g>
         ) : null;
       })}
     </g>

@@ -1,5 +1,5 @@
 'use client';
-import { MousePointer2, Redo2, Undo2, ZoomIn, ZoomOut } from 'lucide-react';
+import { Keyboard, MousePointer2, Redo2, Undo2, ZoomIn, ZoomOut } from 'lucide-react';
 import { ToggleGroup } from 'radix-ui';
 import type { ReactNode } from 'react';
 import { KindIcon } from './KindIcon';
@@ -24,19 +24,19 @@ interface Props {
 }
 
 const CELL =
-  'flex min-h-12 min-w-11 flex-1 flex-col items-center justify-center rounded-md px-0.5 leading-tight data-[state=on]:bg-ink data-[state=on]:text-cloth lg:flex-none lg:min-w-16';
+  'flex min-h-12 min-w-11 flex-col items-center justify-center rounded-md leading-tight data-[state=on]:bg-ink data-[state=on]:text-cloth lg:col-span-2';
 
 /** What the hand holds: the six marks or the eye, how strong; the way back, and the glass. Under the thumb on a phone, beside the photo on a desk. */
 export function MarkToolbar(props: Props) {
   const { tool, onTool, severity, onSeverity } = props;
   return (
-    <div className="grid gap-1 bg-cloth py-1 lg:content-start lg:gap-3">
+    <div className="grid grid-cols-5 gap-0.5 bg-cloth py-1 lg:w-22 lg:grid-cols-2 lg:content-start">
       <ToggleGroup.Root
         type="single"
         value={tool}
         onValueChange={(value) => value && onTool(value as Tool)}
         aria-label="Draw"
-        className="flex gap-0.5 lg:flex-col"
+        className="contents"
       >
         <ToggleGroup.Item value="look" className={CELL} aria-label="Look and choose">
           <MousePointer2 aria-hidden size={24} />
@@ -49,30 +49,22 @@ export function MarkToolbar(props: Props) {
           </ToggleGroup.Item>
         ))}
       </ToggleGroup.Root>
-      <div className="flex items-center justify-between gap-1 lg:flex-col">
-        <StrengthPicker severity={severity} onSeverity={onSeverity} />
-        <div className="flex lg:grid lg:grid-cols-2">
-          <IconButton label="Undo" isOff={!props.canUndo} onClick={props.onUndo}>
-            <Undo2 aria-hidden size={22} />
-          </IconButton>
-          <IconButton label="Redo" isOff={!props.canRedo} onClick={props.onRedo}>
-            <Redo2 aria-hidden size={22} />
-          </IconButton>
-          <IconButton label="Nearer" onClick={() => props.onZoom(STEP)}>
-            <ZoomIn aria-hidden size={22} />
-          </IconButton>
-          <IconButton label="Farther" onClick={() => props.onZoom(1 / STEP)}>
-            <ZoomOut aria-hidden size={22} />
-          </IconButton>
-        </div>
-        <button
-          type="button"
-          onClick={props.onHelp}
-          className="hidden min-h-11 text-sm text-chalk underline underline-offset-4 lg:inline-block"
-        >
-          Keys
-        </button>
-      </div>
+      <IconButton label="Undo" isOff={!props.canUndo} onClick={props.onUndo}>
+        <Undo2 aria-hidden size={22} />
+      </IconButton>
+      <IconButton label="Redo" isOff={!props.canRedo} onClick={props.onRedo}>
+        <Redo2 aria-hidden size={22} />
+      </IconButton>
+      <IconButton label="Keys of the photo" onClick={props.onHelp}>
+        <Keyboard aria-hidden size={22} />
+      </IconButton>
+      <StrengthPicker severity={severity} onSeverity={onSeverity} />
+      <IconButton label="Nearer" onClick={() => props.onZoom(STEP)}>
+        <ZoomIn aria-hidden size={22} />
+      </IconButton>
+      <IconButton label="Farther" onClick={() => props.onZoom(1 / STEP)}>
+        <ZoomOut aria-hidden size={22} />
+      </IconButton>
     </div>
   );
 }
@@ -84,7 +76,7 @@ function IconButton(props: { label: string; isOff?: boolean; onClick: () => void
       aria-label={props.label}
       disabled={props.isOff}
       onClick={props.onClick}
-      className="inline-flex size-11 items-center justify-center rounded-md disabled:opacity-40"
+      className="inline-flex min-h-11 min-w-11 items-center justify-center rounded-md disabled:opacity-40"
     >
       {props.children}
     </button>

@@ -18,13 +18,13 @@ export function StrengthPicker({ severity, onSeverity }: Props) {
       value={String(severity)}
       onValueChange={(value) => value && onSeverity(Number(value) as MarkSeverity)}
       aria-label="How strong"
-      className="flex"
+      className="col-span-3 grid grid-cols-3 lg:col-span-2 lg:grid-cols-1"
     >
       {([1, 2, 3] as const).map((one) => (
         <ToggleGroup.Item
           key={one}
           value={String(one)}
-          className="grid min-h-11 min-w-14 place-content-center gap-1 rounded-md px-1 text-sm leading-none data-[state=on]:bg-ink data-[state=on]:text-cloth"
+          className="grid min-h-11 grid-cols-[3.2rem] place-content-center gap-1 rounded-md text-sm leading-none data-[state=on]:bg-ink data-[state=on]:text-cloth"
         >
           <span className="flex h-2 items-center">
             <span className={`w-full bg-current ${LINES[one]}`} />

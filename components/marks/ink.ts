@@ -5,10 +5,28 @@ interface Pixel {
 }
 
 /** Edge and ink, as in the shapes of marks: the light edge shows on dark cloth, the dark ink on light. */
-const PASSES = [
-  { colour: '#fffdf6', widthPx: 7 },
-  { colour: '#10151c', widthPx: 3 },
-] as const;
+const EDGE = { colour: '#fffdf6', widthPx: 7 };
+const INK = { colour: '#10151c', widthPx: 3 };
+/** So much of the line is inked again, because the edge of a new piece lies over the end of the old one. */
+const AGAIN_PX = 10;
+
+function draw(context: CanvasRenderingContext2D, line: readonly Pixel[], { colour, widthPx }: typeof INK) {
+  context.beginPath();
+  for (const { x, y } of line) context.lineTo(x, y);
+  context.strokeStyle = colour;
+  context.lineWidth = widthPx;
+  context.stroke();
+}
+
+/** The end of a line, at least so many pixels of it. */
+function endOf(line: readonly Pixel[], lengthPx: number): Pixel[] {
+  let from = line.length - 1;
+  for (let length = 0; from > 0 && length < lengthPx; from -= 1) {
+    const [a, b] = [line[from - 1]!, line[from]!];
+    length += Math.hypot(b.x - a.x, b.y - a.y);
+  }
+  return line.slice(Math.max(0, from));
+}
 
 /** Wet ink: each piece is drawn as it comes, so that its cost does not grow with the stroke. */
 export interface Ink {
@@ -34,18 +52,13 @@ export function inkOn(canvas: HTMLCanvasElement): Ink {
     },
     extend: (pixels) => {
       const line = [...tail, ...pixels];
-      // Two points are drawn again, so that the edge of the new piece does not lie on the ink of the old one.
-      tail = line.slice(-3);
-      if (!context || line.length < 2) return;
-      context.lineCap = 'round';
-      context.lineJoin = 'round';
-      for (const { colour, widthPx } of PASSES) {
-        context.beginPath();
-        for (const { x, y } of line) context.lineTo(x, y);
-        context.strokeStyle = colour;
-        context.lineWidth = widthPx;
-        context.stroke();
+      if (context && line.length > 1) {
+        context.lineCap = 'round';
+        context.lineJoin = 'round';
+        draw(context, line.slice(Math.max(0, tail.length - 1)), EDGE);
+        draw(context, line, INK);
       }
+      tail = endOf(line, AGAIN_PX);
     },
     end: () => {
       tail = [];

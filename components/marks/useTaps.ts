@@ -21,9 +21,9 @@ export function useTaps({ tool, size, onLine, say }: Options) {
     if (points.length > 1) onLine(points);
     forget();
   };
-  const set = (at: PhotoPoint) => {
+  const set = (at: PhotoPoint, againPx: number) => {
     if (tool === 'look') return;
-    const now = tapAt(points, at, tool, size);
+    const now = tapAt(points, at, tool, size, againPx);
     if (now.isDone) {
       forget();
       return onLine(now.points);
