@@ -1,6 +1,6 @@
 import type { Sign } from '../../schema';
 import { causeLink, link, sign } from '../build';
-import { LEVEL, mark, SLANTING, UPRIGHT } from '../templates';
+import { mark, SLANTING, UPRIGHT } from '../templates';
 import { BACK_AND_SIDES, FRONT_AND_SIDES, STANDING } from './shared';
 
 /** The leg from fork to knee. */
