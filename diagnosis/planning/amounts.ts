@@ -69,16 +69,26 @@ function takenBackPerMm(correction: Correction, other: Correction): number {
   return ratios.every((ratio) => ratio > 0) ? Math.min(...ratios) : 0;
 }
 
+/** Whether somebody put a length on what is served: a fold pinned, a gap measured, a tape against the paper. */
+function isMeasured({ layout: { index }, fitting }: Outlook, serves: readonly Tail[]): boolean {
+  const served = (id: string) => serves.some(({ dimension }) => index.dimensions.get(id) === dimension);
+  const pinned = fitting.tests.some(({ check, amountMm }) => {
+    const { amountTo } = index.knowledge.checks[index.checks.get(check)!]!;
+    return amountMm !== null && amountTo !== null && served(amountTo.dimension);
+  });
+  return pinned || fitting.measured.some(({ terms }) => terms.some(({ dimension }) => served(dimension)));
+}
+
 /**
  * The amount proposed for this round: the smaller of the first amount and two thirds of the estimate, the whole estimate
- * once it is firm and not from marks alone (take the amount from the toile, not from a table: trousers:TF053); never past a cap.
+ * once somebody measured it and it is firm (take the amount from the toile, not from a table: trousers:TF053); never past a cap.
  */
 export function amountsOf(outlook: Outlook, correction: Correction, serves: readonly Tail[], limits: Limits) {
   const amounts = correction.amounts!;
   const estimate = estimateOf(outlook, correction, serves);
   const [lowMm, highMm] = estimate.rangeMm;
   const firm =
-    !outlook.marksAlone &&
+    isMeasured(outlook, serves) &&
     estimate.probability >= LIKELY_FROM &&
     highMm - lowMm <= FIRM_SHARE * estimate.meanMm;
   const wantedMm = firm ? estimate.meanMm : Math.min(limits.firstMm, FIRST_SHARE * estimate.meanMm);

@@ -69,7 +69,7 @@ test('pages with the demo on them', async ({ page }) => {
 });
 
 test('pages with nothing on them', async ({ page }) => {
-  await signUp(page, 'Nora');
+  await signUp(page, 'nora');
   await lookAtAll(page, {
     'rail-empty': '/journals',
     'wearers-empty': '/wearers',
@@ -79,7 +79,7 @@ test('pages with nothing on them', async ({ page }) => {
 
 test('pages with much on them', async ({ page }) => {
   const sql = postgres(process.env.ADMIN_DATABASE_URL ?? '', { max: 1 });
-  const { journalId } = await fillRail(sql, await signUp(page, 'Wilhelmina'));
+  const { journalId } = await fillRail(sql, await signUp(page, 'wilhelmina'));
   await sql.end();
   await page.goto(`/journals/${journalId}/rounds/12`);
   const picture = await phoneJpeg(1);
