@@ -4,6 +4,8 @@ import { JournalActions } from '@/components/journal/JournalActions';
 import { Ledger } from '@/components/journal/Ledger';
 import { ledgerRows } from '@/components/journal/ledger-rows';
 import { RoundTickets } from '@/components/journal/RoundTickets';
+import { journalSettling } from '@/components/settling/journal-settling';
+import { Settling } from '@/components/settling/Settling';
 import { PageHead } from '@/components/ui/PageHead';
 import { Section } from '@/components/ui/Section';
 import { findDesk } from '@/db/queries/desk';
@@ -28,6 +30,9 @@ export default async function JournalPage({ params }: PageProps<'/journals/[jour
       <div className="grid gap-10">
         <Section title="Rounds">
           <RoundTickets journalId={id} tickets={journal.tickets} />
+        </Section>
+        <Section title="The settling">
+          <Settling {...journalSettling(desk)} />
         </Section>
         <Section title="The ledger">
           <Ledger rows={ledgerRows(journal.garment, desk?.rounds ?? [])} unit={viewer.unit} />
