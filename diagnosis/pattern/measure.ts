@@ -92,5 +92,5 @@ function dartLength(piece: Piece, dart: string): number {
 
 function middleLength(piece: Piece, top: number, foot: number): number {
   const inside = piece.folds.filter(({ upper }) => upper.y > top && upper.y < foot);
-  return foot - top - sum(inside.map(({ upper, lower }) => distance(upper, lower)));
+  return foot - top - sum(inside.map(({ amountMm }) => amountMm));
 }

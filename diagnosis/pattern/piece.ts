@@ -12,11 +12,13 @@ export interface Part {
   readonly start?: string;
 }
 
-/** A wedge folded away inside a piece, nothing at both ends. */
+/** A wedge folded away (or, with a negative amount, let in) inside a piece, nothing at both ends. */
 export interface Fold {
   readonly from: XY;
   readonly to: XY;
-  /** The widest place: what lies between these two is folded away. */
+  /** Millimetres that the middle loses. */
+  readonly amountMm: number;
+  /** The widest place, above and below. */
   readonly upper: XY;
   readonly lower: XY;
 }

@@ -45,8 +45,8 @@ function onLeg(operate: (piece: Piece, args: Parallel) => Outcome, piece: Piece,
   return { before: piece, piece: twice.piece, declared, drawn: once.drawn };
 }
 
-const wedge = (piece: Piece, amountMm: number): Hinged => ({
-  hinge: { edge: 'side', y: aboveHip(piece) },
+const wedge = (piece: Piece, amountMm: number, y: number): Hinged => ({
+  hinge: { edge: 'side', y },
   target: 'centre',
   moves: 'centre-waist',
   amountMm,
@@ -85,9 +85,13 @@ const tuckAcross = (run: ChainStep['run'], where: string): Chain =>
     muslin: ['Fold out half of {amount} deep, so that {amount} of cloth is gone, and stitch across.'],
   });
 
-const raise = (piece: 'front' | 'back', sign: 1 | -1): ChainStep => ({
+const raise = (
+  piece: 'front' | 'back',
+  sign: 1 | -1,
+  operator: ChainStep['operator'] = 'raise-waist-taper',
+): ChainStep => ({
   piece,
-  operator: 'raise-waist-taper',
+  operator,
   perMm: 1,
   run: (one, mm) => raiseCentre(one, sign * mm),
   paper: [
@@ -100,11 +104,14 @@ const raise = (piece: 'front' | 'back', sign: 1 | -1): ChainStep => ({
     : {}),
 });
 
-const hinged = (piece: 'front' | 'back', opens: boolean): ChainStep => ({
+/** Over the fullest part of the seat, a hand's breadth of the hip line. */
+const acrossSeat = (piece: Piece) => markOf(piece, 'hip').y - 5;
+
+const hinged = (piece: 'front' | 'back', opens: boolean, level = aboveHip): ChainStep => ({
   piece,
   operator: opens ? 'hinged-spread' : 'hinged-overlap',
   perMm: 1,
-  run: (one, mm) => (opens ? hingedSpread : hingedOverlap)(one, wedge(one, mm)),
+  run: (one, mm) => (opens ? hingedSpread : hingedOverlap)(one, wedge(one, mm, level(one))),
   paper: [
     `Draw a line from centre ${piece}, square to it, to the stitching line of the side a little above the hip.`,
     'Cut from the centre to that line and stop there; snip the allowance from the other side, so that the paper hinges on the stitching line.',
@@ -131,6 +138,25 @@ const side = (sign: 1 | -1): Chain =>
     ],
   });
 
+const forkLevel = (sign: 1 | -1): Chain => [
+  ...onBoth({
+    operator: 'reshape-curve',
+    run: (piece, mm) => moveFork(piece, 0, sign * mm),
+    paper: [
+      `Mark the crotch point {amount} ${sign > 0 ? 'lower' : 'higher'}.`,
+      `Draw the curve from the notch to the mark, ${sign > 0 ? 'deeper' : 'shallower'} all along.`,
+    ],
+  }),
+  ...onBoth({
+    operator: 'extend-point',
+    run: (piece, mm) => moveFork(piece, sign * mm, 0),
+    paper: [
+      `Move that point ${sign > 0 ? 'out by {amount}, so that the stride stays' : 'in by {amount}'}.`,
+      'Draw the inseam from it to nothing at the knee.',
+    ],
+  }).map((step) => ({ ...step, perMm: WIDEN })),
+];
+
 /** Paper for the lengths of the body: depth, rises, the side of the waist. */
 export const depthChains: Readonly<Record<string, Chain>> = {
   'lengthen-depth': spreadAcross(
@@ -144,29 +170,15 @@ export const depthChains: Readonly<Record<string, Chain>> = {
   'raise-centre-back': [raise('back', 1)],
   'wedge-into-back': [hinged('back', true)],
   'pin-out-back-fold': [hinged('back', false)],
+  'overlap-wedge-in-back': [hinged('back', false, acrossSeat)],
+  'tip-waist-forward': [raise('front', -1, 'lower-waist-taper'), raise('back', 1)],
   'raise-centre-front': [raise('front', 1)],
   'lower-centre-front': [raise('front', -1)],
   'wedge-into-front': [hinged('front', true)],
   'raise-side-waist': side(1),
   'lower-side-waist': side(-1),
-  'lower-crotch-level': [
-    ...onBoth({
-      operator: 'reshape-curve',
-      run: (piece, mm) => moveFork(piece, 0, mm),
-      paper: [
-        'Mark the crotch point {amount} lower.',
-        'Draw the curve from the notch to the mark, deeper all along.',
-      ],
-    }),
-    ...onBoth({
-      operator: 'extend-point',
-      run: (piece, mm) => moveFork(piece, mm, 0),
-      paper: [
-        'Move the lowered point out by {amount}, so that the stride stays.',
-        'Draw the inseam from it to nothing at the knee.',
-      ],
-    }).map((step) => ({ ...step, perMm: WIDEN })),
-  ],
+  'lower-crotch-level': forkLevel(1),
+  'raise-crotch-level': forkLevel(-1),
   'lengthen-leg': spreadAcross((piece, mm) => onLeg(parallelSpread, piece, mm), LOWER_LEG),
   'shorten-leg': tuckAcross((piece, mm) => onLeg(parallelTuck, piece, mm), LOWER_LEG),
 };

@@ -1,5 +1,6 @@
 import { extendPoint, reshapeCurve, slopeHem } from '../operators/fork';
-import { calfBothEdges, foldAcross, kneeBothEdges, shiftKnee, shiftLeg, swingLeg } from '../operators/leg';
+import { kneeBothEdges, shiftKnee, shiftLeg, swingLeg } from '../operators/leg';
+import { calfBothEdges, foldAcross, hemBothEdges, shiftKneeLine, shiftSide } from '../operators/lower-leg';
 import type { Outcome } from '../operators/outcome';
 import { pivotCentre } from '../operators/waist';
 import type { Piece } from '../piece';
@@ -84,8 +85,50 @@ const fourEdges = (run: Leg, sign: 1 | -1, place: string, ends: string): Chain =
     muslin: ['Stitch inseam and side seam on the new lines, both by the same amount.'],
   });
 
-const fold = (operator: ChainStep['operator'], level: string, paper: readonly string[]): Chain => [
-  { piece: 'back', operator, perMm: 1, run: (one, mm) => foldAcross(one, level, mm), paper },
+const fold = (
+  operator: ChainStep['operator'],
+  level: string,
+  sign: 1 | -1,
+  paper: readonly string[],
+): Chain => [
+  { piece: 'back', operator, perMm: 1, run: (one, mm) => foldAcross(one, level, sign * mm), paper },
+];
+
+const kneeLine = (sign: 1 | -1): Chain =>
+  bothSeams('shift-knee-line', (piece, mm) => shiftKneeLine(piece, sign * mm), [
+    `Mark the knee line {amount} ${sign > 0 ? 'lower' : 'higher'} on both seams, as wide as it was.`,
+    'Draw both seams through the marks, to nothing at mid-thigh and hem.',
+  ]);
+
+const sideForward = (sign: 1 | -1): Chain =>
+  (['front', 'back'] as const).map((piece) => {
+    const gains = (piece === 'back') === sign > 0;
+    return {
+      piece,
+      operator: 'shift-seam',
+      perMm: 1,
+      run: (one, mm) => shiftSide(one, gains ? mm : -mm),
+      paper: [
+        `Mark {amount} ${gains ? 'outside' : 'inside'} the side edge at the hem.`,
+        'Draw the side from there to nothing at the knee.',
+      ],
+    };
+  });
+
+const hem = (sign: 1 | -1): Chain => [
+  {
+    piece: 'back',
+    operator: 'slope-hem',
+    perMm: 1,
+    run: (piece, mm) => slopeHem(piece, sign * mm),
+    paper: [
+      `Mark {amount} ${sign > 0 ? 'below' : 'above'} the hem of the back, in its middle.`,
+      'Draw the hem through the mark to nothing at both seams; cut its facing to the same line.',
+    ],
+    muslin: [
+      `Chalk the hem ${sign > 0 ? 'lower' : 'higher'} behind, to nothing at the seams, and turn it up on the chalk.`,
+    ],
+  },
 ];
 
 /** Paper for the fork, the slopes and the leg. */
@@ -102,7 +145,7 @@ export const forkAndLegChains: Readonly<Record<string, Chain>> = {
   'less-back-slope': slope('back', 1),
   'more-front-slope': slope('front', 1),
   'less-front-slope': slope('front', -1),
-  'shape-under-seat': fold('shaped-seam', 'thigh', [
+  'shape-under-seat': fold('shaped-seam', 'thigh', 1, [
     'Draw the fold across the back under the seat: {amount} wide in the middle, nothing at the stitching lines of side and inseam.',
     'Draw a line down the middle of the back leg and cut along it to the fold; it becomes a seam.',
     'Lap the fold shut in each half, hinged on its own seam line, and draw the new seam curved where the halves bend apart.',
@@ -116,22 +159,28 @@ export const forkAndLegChains: Readonly<Record<string, Chain>> = {
   'let-out-calf': fourEdges(calfBothEdges, 1, 'at the calf', 'to nothing at the knee and half of it at the hem'),
   'let-out-knee': fourEdges(kneeBothEdges, 1, 'at the knee', 'to nothing at mid-thigh and calf'),
   'take-in-knee': fourEdges(kneeBothEdges, -1, 'at the knee', 'to nothing at mid-thigh and calf'),
-  'shorten-behind-knee': fold('hinged-overlap', 'knee', [
+  'shorten-behind-knee': fold('hinged-overlap', 'knee', 1, [
     'Draw a wedge across the back at the knee: {amount} wide in the middle, nothing at the stitching lines of side and inseam.',
     'Lap it shut from the middle, hinged at both seams; press the paper flat and ease what stands up into the seams.',
     'Walk both seams: they measure as before.',
   ]),
-  'lower-hem-behind': [
-    {
-      piece: 'back',
-      operator: 'slope-hem',
-      perMm: 1,
-      run: slopeHem,
-      paper: [
-        'Mark {amount} below the hem of the back, in its middle.',
-        'Draw the hem through the mark to nothing at both seams; cut its facing to the same line.',
-      ],
-      muslin: ['Chalk the hem lower behind, to nothing at the seams, and turn it up on the chalk.'],
-    },
-  ],
+  'lengthen-under-seat': fold('shaped-seam', 'thigh', -1, [
+    'Draw a line across the back under the seat, and one down the middle of the back leg, which becomes a seam.',
+    'Cut both; in each half spread the cross line from the new seam, {amount} in all there, hinged on the stitching line of side or inseam.',
+    'Draw the new seam smooth; side and inseam measure as before.',
+  ]),
+  'lengthen-behind-knee': fold('hinged-spread', 'knee', -1, [
+    'Draw a line across the back at the knee, between the stitching lines of side and inseam.',
+    'Open it by {amount} in the middle, hinged at both seams; let the paper bubble and ease what stands up.',
+    'Walk both seams: they measure as before.',
+  ]),
+  'take-in-calf': fourEdges(calfBothEdges, -1, 'at the calf', 'to nothing at the knee and half of it at the hem'),
+  'let-out-hem': fourEdges(hemBothEdges, 1, 'at the hem', 'to nothing at the knee'),
+  'take-in-hem': fourEdges(hemBothEdges, -1, 'at the hem', 'to nothing at the knee'),
+  'lower-knee-line': kneeLine(1),
+  'raise-knee-line': kneeLine(-1),
+  'bring-side-seam-forward': sideForward(1),
+  'bring-side-seam-back': sideForward(-1),
+  'lower-hem-behind': hem(1),
+  'level-hem': hem(-1),
 }; // prettier-ignore

@@ -79,6 +79,51 @@ const spread = (piece: 'front' | 'back'): ChainStep => ({
   muslin: ['Slash from waist to hem and let a strip in, {amount} wide between its seams.'],
 });
 
+const tuck = (piece: 'front' | 'back'): ChainStep => ({
+  piece,
+  operator: 'parallel-tuck',
+  perMm: 1,
+  run: (one, mm) => parallelTuck(one, lengthwise(one, mm)),
+  paper: [
+    'Draw two lines beside the grain line from waist to hem, {amount} apart.',
+    'Fold the one onto the other and tape; draw a new grain line in the middle.',
+  ],
+  muslin: ['Stitch a long tuck beside the crease that takes {amount} of cloth.'],
+});
+
+const band = (sign: 1 | -1): Chain => [
+  {
+    piece: 'waistband',
+    operator: 'contour-band',
+    // The amount is round; each half of the band takes half of it.
+    perMm: 0.5,
+    run: (one, mm) => contourBand(one, sign * mm),
+    paper: [
+      'Slash the band at four places from its top edge to the stitching line of the lower edge.',
+      sign > 0
+        ? 'Lap each slash alike, so that the top edge of this half is {amount} shorter in all.'
+        : 'Spread each slash alike, so that the top edge of this half is {amount} longer in all.',
+      'Run both edges smooth; the lower edge measures as before.',
+    ],
+  },
+];
+
+const backInseam = (sign: 1 | -1): Chain => [
+  {
+    piece: 'back',
+    operator: taper(sign),
+    perMm: 1,
+    run: (one, mm) => thighAtInseam(one, sign * mm),
+    paper: edgeSteps(
+      sign,
+      'of the inseam, 60 mm below the crotch point',
+      'at the point and 275 mm down',
+      false,
+    ),
+    muslin: seamOnMuslin(sign),
+  },
+];
+
 const dartStep = (operator: ChainStep['operator'], run: ChainStep['run'], paper: string[]): ChainStep => ({
   piece: 'back',
   operator,
@@ -114,60 +159,26 @@ export const widthChains: Readonly<Record<string, Chain>> = {
   'take-in-centre-back': [centreBack(-1)],
   'spread-back': [spread('back')],
   'spread-front': [spread('front')],
-  'narrow-front': [
-    {
-      piece: 'front',
-      operator: 'parallel-tuck',
-      perMm: 1,
-      run: (one, mm) => parallelTuck(one, lengthwise(one, mm)),
-      paper: [
-        'Draw two lines beside the crease from waist to hem, {amount} apart.',
-        'Fold the one onto the other and tape; draw a new grain line in the middle.',
-      ],
-      muslin: ['Stitch a long tuck beside the crease that takes {amount} of cloth.'],
-    },
-  ],
+  'narrow-front': [tuck('front')],
+  'narrow-back': [tuck('back')],
   'round-out-side': side(1),
   'flatten-side': side(-1),
   'let-out-waist-front': [waist('front', 1)],
   'take-in-waist-front': [waist('front', -1)],
   'let-out-waist-back': [waist('back', 1)],
+  'take-in-waist-back': [waist('back', -1)],
   'deepen-back-dart': [
-    dartStep(
-      'resize-dart',
-      (one, mm) => resizeDart(one, { dart: 'dart-1', along: 'waist', amountMm: mm }),
-      [
-        'Mark half of {amount} beyond each leg of the dart at the waist.',
-        'Draw both legs from there to the old point, fold the dart shut and draw its cap with the waist.',
-      ],
-    ),
+    dartStep('resize-dart', (one, mm) => resizeDart(one, { dart: 'dart-1', along: 'waist', amountMm: mm }), [
+      'Mark half of {amount} beyond each leg of the dart at the waist.',
+      'Draw both legs from there to the old point, fold the dart shut and draw its cap with the waist.',
+    ]),
   ],
   'lengthen-back-dart': dartPoint(1),
   'shorten-back-dart': dartPoint(-1),
-  'contour-waistband': [
-    {
-      piece: 'waistband',
-      operator: 'contour-band',
-      // The amount is round; each half of the band takes half of it.
-      perMm: 0.5,
-      run: contourBand,
-      paper: [
-        'Slash the band at four places from its top edge to the stitching line of the lower edge.',
-        'Lap each slash alike, so that the top edge of this half is {amount} shorter in all.',
-        'Run both edges smooth; the lower edge measures as before.',
-      ],
-    },
-  ],
+  'contour-waistband': band(1),
+  'straighten-waistband': band(-1),
   'let-out-thigh-side': sides(1, thighAtSide, 'a little below the fork', 'at the hip notch and the knee'),
   'take-in-thigh-side': sides(-1, thighAtSide, 'a little below the fork', 'at the hip notch and the knee'),
-  'take-in-back-inseam': [
-    {
-      piece: 'back',
-      operator: 'take-in-taper',
-      perMm: 1,
-      run: (one, mm) => thighAtInseam(one, -mm),
-      paper: edgeSteps(-1, 'of the inseam, 60 mm below the crotch point', 'at the point and 275 mm down', false),
-      muslin: seamOnMuslin(-1),
-    },
-  ],
-}; // prettier-ignore
+  'let-out-back-inseam': backInseam(1),
+  'take-in-back-inseam': backInseam(-1),
+};

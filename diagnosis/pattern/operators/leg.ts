@@ -1,19 +1,19 @@
-import { xy, type XY } from '../geometry/xy';
-import { stationPoint, withPoint } from '../cut';
+import { xy } from '../geometry/xy';
+import { withPoint } from '../cut';
 import { markOf, pointOf, type Piece } from '../piece';
 import { move, stretch } from './move';
 import { changes, edge, keeps, type Declared, type Outcome } from './outcome';
 
 /** The outline named where a level passes side and inseam: `side-<level>` and `inseam-<level>`. */
-const atLevel = (piece: Piece, level: string, edges: readonly string[] = ['side', 'inseam']): Piece =>
+export const atLevel = (piece: Piece, level: string, edges: readonly string[] = ['side', 'inseam']): Piece =>
   edges.reduce(
     (named, name) => withPoint(named, `${name}-${level}`, { edge: name, y: markOf(piece, level).y }),
     piece,
   );
 
-const width = (level: string) => ({ of: 'width', level }) as const;
-const HEM = edge('hem');
-const reach = (point: string, from: string): Declared['measure'] => ({
+export const width = (level: string) => ({ of: 'width', level }) as const;
+export const HEM = edge('hem');
+export const reach = (point: string, from: string): Declared['measure'] => ({
   of: 'offset',
   point,
   from,
@@ -103,25 +103,6 @@ export function kneeBothEdges(piece: Piece, amountMm: number): Outcome {
   });
 }
 
-/** Let out (+) or take in both edges at the calf, to nothing at the knee and half as much at the hem. */
-export function calfBothEdges(piece: Piece, amountMm: number): Outcome {
-  return move(atLevel(piece, 'calf'), {
-    stretches: [
-      stretch('knee-in', 'inseam-calf', [0, 1], 'smooth', 'height'),
-      stretch('inseam-calf', 'hem-in', [1, 0.5], 'smooth', 'height'),
-      stretch('hem-in', 'hem-out', [0.5, -0.5], 'line'),
-      stretch('hem-out', 'side-calf', [-0.5, -1], 'smooth', 'height'),
-      stretch('side-calf', 'knee-out', [-1, 0], 'smooth', 'height'),
-    ],
-    by: xy(amountMm, 0),
-    declared: [
-      changes('the calf', width('calf'), 2 * amountMm),
-      changes('the hem', HEM, amountMm),
-      keeps('the knee', width('knee')),
-    ],
-  });
-}
-
 /** Swing the leg toward the inseam (+) or the side at the hem, in a straight line from the thigh. */
 export function swingLeg(piece: Piece, amountMm: number): Outcome {
   return move(atLevel(piece, 'thigh'), {
@@ -182,22 +163,4 @@ export function shiftLeg(piece: Piece, amountMm: number): Outcome {
       keeps('the hem', HEM),
     ],
   });
-}
-
-/** Fold a wedge out of the middle at a level, nothing at side and inseam; what is folded is shaped away by a seam or with the iron. */
-export function foldAcross(piece: Piece, level: string, amountMm: number): Outcome {
-  const y = markOf(piece, level).y;
-  const [from, to] = ['side', 'inseam'].map((name) => stationPoint(piece, { edge: name, y })) as [XY, XY];
-  const x = (from.x + to.x) / 2;
-  const fold = { from, to, upper: xy(x, y - amountMm / 2), lower: xy(x, y + amountMm / 2) };
-  return {
-    before: piece,
-    piece: { ...piece, folds: [...piece.folds, fold] },
-    declared: [
-      changes('the middle of the leg', { of: 'middle', from: 'hip', to: 'calf' }, -amountMm),
-      keeps('the side', edge('side')),
-      keeps('the inseam', edge('inseam')),
-    ],
-    drawn: { fold: [from, fold.upper, to, fold.lower] },
-  };
 }
