@@ -26,6 +26,7 @@ const PRACTICE = {
   /** The back inseam is drafted shorter and stretched on (usual 3–10). */
   inseamEase: 6,
   thighBelowFork: 25,
+  thighBelowPoint: 10,
   abdomenBelowWaist: 85,
   allowance: 15,
 } as const;
@@ -137,7 +138,7 @@ const ALLOWANCES = Object.fromEntries(
   ]),
 );
 
-function assemble(id: 'front' | 'back', corners: Corners, frame: Frame): Piece {
+function assemble(id: 'front' | 'back', corners: Corners, frame: Frame, thighY: number): Piece {
   const { levels } = frame;
   const dart = id === 'front' ? PRACTICE.frontDart : PRACTICE.backDart;
   const { parts, point } = waistWithDart(corners, {
@@ -154,7 +155,7 @@ function assemble(id: 'front' | 'back', corners: Corners, frame: Frame): Piece {
       hip: at(levels.hip),
       'low-seat': at((levels.hip + levels.fork) / 2),
       crotch: at(levels.fork),
-      thigh: at(levels.fork + PRACTICE.thighBelowFork),
+      thigh: at(thighY),
       'mid-thigh': at((levels.fork + levels.knee) / 2),
       knee: at(levels.knee),
       calf: at(levels.knee + (levels.hem - levels.knee) / 3),
@@ -175,5 +176,14 @@ function assemble(id: 'front' | 'back', corners: Corners, frame: Frame): Piece {
 export function draftTrousers(measures: BlockMeasures): { front: Piece; back: Piece } {
   const frame = frameOf(measures);
   const front = frontCorners(frame);
-  return { front: assemble('front', front, frame), back: assemble('back', backCorners(frame, front), frame) };
+  const back = backCorners(frame, front);
+  // Both pieces share one thigh line, which must pass the inseam of the back below its dropped point.
+  const thighY = Math.max(
+    frame.levels.fork + PRACTICE.thighBelowFork,
+    back.crotchPoint.y + PRACTICE.thighBelowPoint,
+  );
+  return {
+    front: assemble('front', front, frame, thighY),
+    back: assemble('back', back, frame, thighY),
+  };
 }

@@ -31,6 +31,8 @@ const CALF_HEIGHT =
   'A straight line from knee to hem passes this block at a third of the way down: a third of the amount, not a half.';
 const SHAPING_MOVES = 'The taper of the lower leg moves with the knee.';
 
+const TRUED =
+  'The side is trued across the gap or the fold, and a tenth of the amount is gained or lost in its round.';
 const FRONT_SEAM = 'centre front, waist to notch';
 const BACK_SEAM = 'centre back, waist to notch';
 const OVER_FRONT = 'width over the front';
@@ -53,6 +55,8 @@ const SIDE_HEIGHTS = { 'side waist above the fork': SIDE_KEPT, 'side waist above
 const KNEE_LINE = { calf: SHAPING_MOVES };
 
 export const DIFFERENCES: Differences = {
+  'lengthen-depth': { 'round of the side above the hip': TRUED },
+  'shorten-depth': { [OVER_FRONT]: TRUED },
   'raise-centre-back': { 'lean of centre back': RAISED_ALONG, 'length of the back dart': DART_STAYS },
   'wedge-into-back': WEDGE,
   'pin-out-back-fold': WEDGE,
@@ -69,7 +73,6 @@ export const DIFFERENCES: Differences = {
     'side waist above the fork': SIDE_TURNED,
     'side waist above the hem': SIDE_TURNED,
     'lean of centre front': LEAN_FOLLOWS,
-    [OVER_FRONT]: LEAN_FOLLOWS,
   },
   'raise-side-waist': {
     'front waist': WAIST_ASLANT,

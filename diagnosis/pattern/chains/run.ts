@@ -2,6 +2,7 @@ import type { Block } from '../blocks/block';
 import { read } from '../measure';
 import type { Declared, Drawn } from '../operators/outcome';
 import type { Piece } from '../piece';
+import { trueAll } from '../truing';
 import type { Chain, ChainStep } from './chain';
 
 /** What was declared of one measure, and what the geometry did. All mm. */
@@ -13,6 +14,7 @@ export interface Proved {
   readonly holds: boolean;
 }
 
+/** A step done: proved as the operator left it, then trued. */
 export interface DoneStep {
   readonly step: ChainStep;
   readonly amountMm: number;
@@ -35,14 +37,14 @@ const prove = (before: Piece, after: Piece, { name, measure, byMm, withinMm }: D
 };
 
 function doStep(piece: Piece, step: ChainStep, amountMm: number): DoneStep {
-  const { before, piece: after, drawn, declared } = step.run(piece, amountMm);
+  const { before, piece: changed, drawn, declared } = step.run(piece, amountMm);
   return {
     step,
     amountMm,
     before: piece,
-    after,
+    after: trueAll(changed),
     drawn,
-    proved: declared.map((one) => prove(before, after, one)),
+    proved: declared.map((one) => prove(before, changed, one)),
   };
 }
 

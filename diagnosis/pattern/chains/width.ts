@@ -5,7 +5,7 @@ import { hipAtSide, thighAtInseam, thighAtSide } from '../operators/leg';
 import type { Outcome } from '../operators/outcome';
 import { parallelSpread, parallelTuck, type Parallel } from '../operators/parallel';
 import { centreSeam, waistAtSide } from '../operators/waist';
-import { pointOf, type Piece } from '../piece';
+import { hasPoint, pointOf, type Piece } from '../piece';
 import type { Chain, ChainStep } from './chain';
 import { onBoth } from './depth';
 
@@ -57,10 +57,11 @@ const centreBack = (sign: 1 | -1): ChainStep => ({
   muslin: seamOnMuslin(sign),
 });
 
+const BESIDE_DART_MM = 8;
 /** A plumb line on the inner side of the dart, through waist and hem. */
 const lengthwise = (piece: Piece, amountMm: number): Parallel => ({
   axis: 'x',
-  at: pointOf(piece, 'hem-in').x * 0.2,
+  at: hasPoint(piece, 'dart-1-in') ? pointOf(piece, 'dart-1-in').x + BESIDE_DART_MM : 0,
   edges: ['waist', 'hem'],
   moves: 'centre-waist',
   amountMm,

@@ -25,3 +25,7 @@ export function turn(a: XY, centre: XY, angle: number): XY {
   const [sin, cos] = [Math.sin(angle), Math.cos(angle)];
   return { x: centre.x + x * cos - y * sin, y: centre.y + x * sin + y * cos };
 }
+
+/** The angle between two directions, degrees, 0–180. */
+export const angleBetween = (a: XY, b: XY): number =>
+  (Math.atan2(Math.abs(cross(a, b)), dot(a, b)) * 180) / Math.PI;
