@@ -102,6 +102,9 @@ export function parameterAtLength(cubic: Cubic, mm: number): number {
   return solve((t) => lengthOf(cubic, 0, t) - mm, 0, 1, mm / whole);
 }
 
+/** A root is found when the function is this small: far below what is measured, whatever its unit. */
+const CLOSE = 1e-11;
+
 /** A root of a function that changes sign between `low` and `high`, by false position held inside a bisection. */
 export function solve(f: (t: number) => number, low: number, high: number, guess = (low + high) / 2): number {
   let [a, b, t] = [low, high, guess];
@@ -111,7 +114,7 @@ export function solve(f: (t: number) => number, low: number, high: number, guess
   const rises = fb > fa;
   for (let step = 0; step < 100; step++) {
     const ft = f(t);
-    if (ft === 0 || b - a < 1e-14 * Math.max(1, Math.abs(t))) return t;
+    if (Math.abs(ft) < CLOSE || b - a < 1e-14 * Math.max(1, Math.abs(t))) return t;
     if (ft > 0 === rises) [b, fb] = [t, ft];
     else [a, fa] = [t, ft];
     const secant = a - (fa * (b - a)) / (fb - fa);

@@ -7,6 +7,8 @@ import { parallelSpread, parallelTuck } from './parallel';
 /** Slashes that share the change, so that the band bends evenly. */
 const SLASHES = 4;
 
+const all = <T>(some: readonly T[] = [], more: readonly T[] = []): T[] => [...some, ...more];
+
 /**
  * Curve a half band more (+) or less: slashed from the top edge to the stitching line of the lower edge at four places, each
  * overlapped (or spread) by a quarter of the amount. The top edge changes by exactly the amount, the lower not at all.
@@ -24,7 +26,13 @@ export function contourBand(piece: Piece, amountMm: number): Outcome {
       amountMm: Math.abs(amountMm) / SLASHES,
     } as const;
     const one = slash(bent.piece, args);
-    bent = { ...one, drawn: index === 0 ? one.drawn : bent.drawn };
+    bent = {
+      ...one,
+      drawn: {
+        slashes: all(bent.drawn.slashes, one.drawn.slashes),
+        hinges: all(bent.drawn.hinges, one.drawn.hinges),
+      },
+    };
   }
   return {
     ...bent,

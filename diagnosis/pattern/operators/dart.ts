@@ -86,7 +86,7 @@ export function moveDartPoint(piece: Piece, { dart, amountMm }: { dart: string; 
       keeps('the intake of the dart', { of: 'intake', dart }),
       keeps('the waist', edge('waist')),
     ],
-    drawn: { slash: [point, moved] },
+    drawn: { slashes: [[point, moved]] },
   };
 }
 
@@ -124,7 +124,7 @@ export function rotateDart(piece: Piece, { dart, to }: { dart: string; to: Stati
     before: piece,
     piece: { ...cut, parts },
     declared: kept.map((name) => keeps(`the ${name}`, edge(name))),
-    drawn: { slash: [target.cubic.from, point], hinge: point },
+    drawn: { slashes: [[target.cubic.from, point]], hinges: [point] },
   };
 }
 

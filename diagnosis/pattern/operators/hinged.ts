@@ -112,7 +112,7 @@ export function hingedSpread(piece: Piece, args: Hinged): Outcome {
     before: piece,
     piece: { ...turned, parts },
     declared: declare(piece, args),
-    drawn: { slash: [slash, hinge], hinge },
+    drawn: { slashes: [[slash, hinge]], hinges: [hinge] },
   };
 }
 
@@ -150,6 +150,10 @@ export function hingedOverlap(piece: Piece, args: Hinged): Outcome {
     before: piece,
     piece: turned,
     declared: declare(piece, { ...args, amountMm: -amountMm }),
-    drawn: { slash: [lips[0], hingePoint], hinge: hingePoint, fold: [lips[0], hingePoint, lips[1]] },
+    drawn: {
+      slashes: [[lips[0], hingePoint]],
+      hinges: [hingePoint],
+      folds: [[lips[0], hingePoint, lips[1]]],
+    },
   };
 }

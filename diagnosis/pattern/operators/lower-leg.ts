@@ -60,8 +60,9 @@ export function shiftKneeLine(piece: Piece, amountMm: number): Outcome {
       ),
       keeps('the knee', width('knee')),
       keeps('the hem', HEM),
-      keeps('the side', edge('side'), 1.5),
-      keeps('the inseam', edge('inseam'), 1.5),
+      // A steep taper is a little longer or shorter for a knee at another height; the walk names it.
+      keeps('the side', edge('side'), 3),
+      keeps('the inseam', edge('inseam'), 3),
     ],
   });
 }
@@ -103,6 +104,6 @@ export function foldAcross(piece: Piece, level: string, amountMm: number): Outco
       keeps('the side', edge('side')),
       keeps('the inseam', edge('inseam')),
     ],
-    drawn: { fold: [from, fold.upper, to, fold.lower] },
+    drawn: { folds: [[from, fold.upper, to, fold.lower]] },
   };
 }

@@ -13,10 +13,10 @@ export interface Declared {
 
 /** What is drawn beside the outline: where to cut or fold, and round which point. */
 export interface Drawn {
-  readonly slash?: readonly [XY, XY];
-  readonly hinge?: XY;
-  /** Ends of the strip that is folded away. */
-  readonly fold?: readonly XY[];
+  readonly slashes?: readonly (readonly [XY, XY])[];
+  readonly hinges?: readonly XY[];
+  /** Corners of what is folded away, in the order of its outline. */
+  readonly folds?: readonly (readonly XY[])[];
 }
 
 export interface Outcome {

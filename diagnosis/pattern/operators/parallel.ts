@@ -99,7 +99,7 @@ export function parallelSpread(piece: Piece, args: Parallel): Outcome {
     before: piece,
     piece: bridged(moved),
     declared: declare(piece, args, 0.01),
-    drawn: { slash: line(piece, args) },
+    drawn: { slashes: [line(piece, args)] },
   };
 }
 
@@ -127,8 +127,11 @@ export function parallelTuck(piece: Piece, args: Parallel): Outcome {
     before: piece,
     piece: joined(tucked.piece, tucked.joints),
     // Seams that run aslant lose a little more or less than the strip is wide.
-    declared: declare(piece, { ...args, amountMm: -args.amountMm }, 0.08 * args.amountMm),
-    drawn: { slash: line(piece, args), fold: [...line(piece, args), ...line(piece, { ...args, at: far })] },
+    declared: declare(piece, { ...args, amountMm: -args.amountMm }, 0.12 * args.amountMm),
+    drawn: {
+      slashes: [line(piece, args)],
+      folds: [[...line(piece, args), ...line(piece, { ...args, at: far }).reverse()]],
+    },
   };
 }
 

@@ -57,7 +57,8 @@ export function pivotCentre(piece: Piece, amountMm: number): Outcome {
     declared: [
       changes('the lean of the centre at the waist', lean, amountMm),
       keeps('the side, hip to waist', SIDE),
-      keeps('the waist', edge('waist'), 0.5),
+      // The side slides a little to keep its length, and the waist with it.
+      keeps('the waist', edge('waist'), 1),
       keeps('the hip', { of: 'width', level: 'hip' }),
     ],
   };
