@@ -7,7 +7,7 @@ type Range = { from: number; to: number };
 export const LEVEL: Range = { from: 70, to: 110 };
 /** Along the leg, within 20 degrees of plumb. */
 export const UPRIGHT: Range = { from: -20, to: 20 };
-/** Going up it leans to the side seam (in side views: to the front). */
+/** Going up it leans to the side seam (in side views: to the back). */
 export const RISES_OUT: Range = { from: 100, to: 165 };
 /** Going down it leans to the side seam (in side views: to the back). */
 export const FALLS_OUT: Range = { from: 15, to: 80 };

@@ -24,7 +24,8 @@ export const lookAlikes: LookAlikeGroup[] = [
       { check: 'shake-the-leg', outcomes: [{ outcome: 'leave', shows: [more('calf-girth')] }], goOn: 'stay' },
       { check: 'lift-band-all-round', outcomes: [{ outcome: 'both-clear', shows: [less('crotch-depth')] }], goOn: 'do-not-clear' },
       { check: 'lift-band-behind', outcomes: [{ outcome: 'clear', shows: [less('back-rise'), less('back-slope')] }], goOn: 'do-not-clear' },
-      { check: 'pinch-back-thigh', outcomes: [{ outcome: 'clears', shows: [less('back-thigh')] }] },
+      { check: 'pinch-back-thigh', outcomes: [{ outcome: 'clears', shows: [less('back-thigh')] }], goOn: 'stays' },
+      { check: 'hand-below-seat', outcomes: [{ outcome: 'hollow', shows: [more('back-curve')] }] },
     ],
   },
   {
@@ -41,7 +42,8 @@ export const lookAlikes: LookAlikeGroup[] = [
     name: 'low crotch in stretch',
     case: { ...signs('fork-hangs-low'), cloth: { kind: 'knit', stretchPercent: 40 } },
     steps: [
-      { check: 'pull-legs-up', outcomes: [{ outcome: 'drops-back', shows: [more('front-thigh'), more('back-thigh')] }, { outcome: 'stays-loose', shows: [less('crotch-depth')] }] },
+      { check: 'pull-legs-up', outcomes: [{ outcome: 'drops-back', shows: [more('front-thigh'), more('back-thigh')] }, { outcome: 'stays-loose', shows: [less('crotch-depth')] }], goOn: 'drops-back' },
+      { check: 'open-side-of-leg', outcomes: [{ outcome: 'rises', shows: [more('front-thigh'), more('back-thigh')] }] },
     ],
   },
   {
@@ -50,7 +52,8 @@ export const lookAlikes: LookAlikeGroup[] = [
     case: signs('waist-gapes-behind'),
     steps: [
       { check: 'sit-and-mark-band', outcomes: [{ outcome: 'over-15-mm', shows: [more('back-rise')] }], goOn: 'up-to-15-mm' },
-      { check: 'gap-standing-and-sitting', outcomes: [{ outcome: 'same', shows: [less('waist-back')] }] },
+      { check: 'gap-standing-and-sitting', outcomes: [{ outcome: 'same', shows: [less('waist-back')] }], goOn: 'same' },
+      { check: 'band-edges', outcomes: [{ outcome: 'top-edge-off', shows: [more('waistband-contour')] }] },
     ],
   },
   {
@@ -67,7 +70,9 @@ export const lookAlikes: LookAlikeGroup[] = [
     name: 'seat drawn into the cleft',
     case: signs('seat-drawn-in-at-centre-back'),
     steps: [
-      { check: 'slide-band-down-behind', outcomes: [{ outcome: 'relief', shows: [more('back-rise')] }, { outcome: 'no-relief', shows: [more('back-extension'), more('hip-back')] }] },
+      { check: 'slide-band-down-behind', outcomes: [{ outcome: 'relief', shows: [more('back-rise')] }, { outcome: 'no-relief', shows: [more('back-extension'), more('hip-back')] }], goOn: 'no-relief' },
+      { check: 'hip-lines-or-smooth', outcomes: [{ outcome: 'lines', shows: [more('hip-back')] }, { outcome: 'smooth', shows: [more('back-extension')] }], goOn: 'smooth' },
+      { check: 'worse-only-sitting', outcomes: [{ outcome: 'only-sitting', shows: [more('back-slope')] }] },
     ],
   },
   {
@@ -77,7 +82,7 @@ export const lookAlikes: LookAlikeGroup[] = [
     steps: [
       { check: 'elastic-at-waist', outcomes: [{ outcome: 'gone', shows: [less('waist-front')] }], goOn: 'stays' },
       { check: 'pin-fold-at-centre-front', outcomes: [{ outcome: 'clear', shows: [less('front-rise')] }, { outcome: 'runs-past', shows: [less('crotch-depth')] }], goOn: 'no' },
-      { check: 'pinch-sides-at-hip', outcomes: [{ outcome: 'a-fold', shows: [less('hip-front')] }] },
+      { check: 'pinch-front-hip', outcomes: [{ outcome: 'clears', shows: [less('hip-front')] }] },
     ],
   },
   {
@@ -107,7 +112,7 @@ export const lookAlikes: LookAlikeGroup[] = [
     row: 11,
     name: 'the side seam off plumb',
     case: signs('side-seam-swings-forward'),
-    steps: [{ check: 'grain-plumb', outcomes: [{ outcome: 'spirals', shows: [cause('off-grain')] }, { outcome: 'plumb', shows: [more('hip-front')] }] }],
+    steps: [{ check: 'grain-plumb', outcomes: [{ outcome: 'spirals', shows: [cause('off-grain')] }, { outcome: 'both-lean', shows: [more('side-rise')] }, { outcome: 'plumb', shows: [more('hip-front')] }] }],
   },
   {
     row: 12,
@@ -117,6 +122,7 @@ export const lookAlikes: LookAlikeGroup[] = [
       signs: [{ sign: 'one-side-waist-low', severity: 2, side: 'left' }],
     },
     steps: [
+      { check: 'empty-pockets', outcomes: [{ outcome: 'gone', shows: [cause('layers-or-pocket-contents')] }], goOn: 'still-there' },
       { check: 'card-under-heel', outcomes: [{ outcome: 'clears', shows: [less('side-rise')] }], goOn: 'stays' },
       { check: 'inside-out', outcomes: [{ outcome: 'changes-side', shows: [cause('not-sewn-as-planned')] }] },
     ],
@@ -126,7 +132,7 @@ export const lookAlikes: LookAlikeGroup[] = [
     name: 'a hem long standing, short sitting',
     case: signs('hem-folds-on-shoe'),
     steps: [
-      { check: 'shake-the-leg', outcomes: [{ outcome: 'leave', shows: [more('calf-girth')] }, { outcome: 'stay', shows: [less('leg-length')] }] },
+      { check: 'stand-up-again', outcomes: [{ outcome: 'stays-up', shows: [more('calf-girth'), more('hem-width')] }, { outcome: 'crawls-then-falls', shows: [more('back-extension')] }, { outcome: 'falls', shows: [less('leg-length')] }] },
     ],
   },
   {
