@@ -50,9 +50,7 @@ export function RecordTable({ piece, rows, by, unit }: Props) {
           {rows.map((row) => (
             <tr key={row.id}>
               <td className={CELL}>after {row.round}</td>
-              <td className={CELL}>
-                <time dateTime={row.date}>{row.date}</time>
-              </td>
+              <td className={CELL}>{row.date ? <time dateTime={row.date}>{row.date}</time> : null}</td>
               <th scope="row" className={`${CELL} font-bold`}>
                 {row.name}
                 <span className="block font-normal text-graphite">{SIDE_WORDS[row.side]}</span>

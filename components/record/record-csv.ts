@@ -16,7 +16,7 @@ export function recordCsv(rows: readonly RecordRow[], by: string, unit: LengthUn
     const amountMm = row.isMade ? row.madeMm : row.plannedMm;
     return [
       String(row.round),
-      row.date,
+      row.date ?? '',
       row.pieces.map((piece) => PIECE_NAMES[piece]).join(' and '),
       row.name,
       row.side,

@@ -11,8 +11,8 @@ import { sizeFactors } from '@/diagnosis/size';
 export interface RecordRow {
   id: string;
   round: number;
-  /** Day that it was made on the paper, or (planned) that the round was worn. */
-  date: string;
+  /** Day that it was made on the paper, or (planned) that the round was worn; null where nobody wrote it down. */
+  date: string | null;
   correction: string;
   name: string;
   side: Side;
@@ -60,7 +60,7 @@ export function recordRows(desk: DeskDto): RecordRow[] {
       return {
         id: change.id,
         round: number,
-        date: (change.madeAt ?? wornOn).slice(0, 10),
+        date: (change.madeAt ?? wornOn)?.slice(0, 10) ?? null,
         correction: known?.id ?? change.correction,
         name: known?.name ?? change.correction,
         side: change.side,
