@@ -4,6 +4,7 @@ import { plannedKey } from '@/components/reading/ReadingPanel';
 import type { ChangeFact } from '@/db/queries/round-facts';
 import type { Knowledge } from '@/diagnosis/garments/schema';
 import type { Reading } from '@/diagnosis/reading';
+import type { CaseInput } from '@/diagnosis/case-schema';
 import type { LengthUnit } from '@/diagnosis/units/parse-amount';
 import { PlannedCard } from './PlannedCard';
 
@@ -13,6 +14,7 @@ interface Props {
   reading: Reading | null;
   plan: ChangeFact[];
   problem: string | null;
+  fitted: Pick<CaseInput, 'body' | 'cloth'>;
   unit: LengthUnit;
   onSet: (id: string, edit: { plannedMm?: number; reason?: string }) => void;
   onDrop: (id: string) => void;
@@ -25,7 +27,17 @@ const MUSLIN_WORDS = {
 } as const;
 
 /** What is changed before the next round, and what was left out of it and why. */
-export function PlanPanel({ journalId, knowledge, reading, plan, problem, unit, onSet, onDrop }: Props) {
+export function PlanPanel({
+  journalId,
+  knowledge,
+  reading,
+  plan,
+  problem,
+  fitted,
+  unit,
+  onSet,
+  onDrop,
+}: Props) {
   const isMade = plan.some((change) => change.madeAt !== null);
   const rowOf = (change: ChangeFact) =>
     reading?.corrections.find(
@@ -59,6 +71,7 @@ export function PlanPanel({ journalId, knowledge, reading, plan, problem, unit, 
                 change={change}
                 correction={correction}
                 stops={stopsOf(change)}
+                fitted={fitted}
                 unit={unit}
                 onSet={(edit) => onSet(change.id, edit)}
                 onDrop={() => onDrop(change.id)}

@@ -7,6 +7,9 @@ import type { ChangeFact } from '@/db/queries/round-facts';
 import type { Correction } from '@/diagnosis/garments/schema';
 import type { LengthUnit } from '@/diagnosis/units/parse-amount';
 import { sideWords } from '@/components/reading/words';
+import { PieceChangeView } from '@/components/pattern/PieceChangeView';
+import { Disclosure } from '@/components/ui/Disclosure';
+import type { CaseInput } from '@/diagnosis/case-schema';
 import { HowTo } from './HowTo';
 
 interface Props {
@@ -14,13 +17,15 @@ interface Props {
   correction: Correction;
   /** The table's amounts for this body; those of the reading where it has them. */
   stops: { firstMm: number; capRoundMm: number; capTotalMm: number } | null;
+  /** What the block that stands in for the pattern is drafted to. */
+  fitted: Pick<CaseInput, 'body' | 'cloth'>;
   unit: LengthUnit;
   onSet: (edit: { plannedMm?: number; reason?: string }) => void;
   onDrop: () => void;
 }
 
 /** One change of the plan: how much, of what, and how it is done on the paper. */
-export function PlannedCard({ change, correction, stops, unit, onSet, onDrop }: Props) {
+export function PlannedCard({ change, correction, stops, fitted, unit, onSet, onDrop }: Props) {
   const { amounts } = correction;
   const { plannedMm } = change;
   const isPast =
@@ -50,6 +55,19 @@ export function PlannedCard({ change, correction, stops, unit, onSet, onDrop }: 
           maxLength={400}
           onChange={(event) => onSet({ reason: event.target.value })}
         />
+      ) : null}
+      {amounts && plannedMm !== null ? (
+        <Disclosure summary="On the pattern piece">
+          <PieceChangeView
+            correction={correction.id}
+            name={correction.name}
+            amountMm={plannedMm}
+            side={change.side}
+            unit={unit}
+            body={fitted.body}
+            cloth={fitted.cloth}
+          />
+        </Disclosure>
       ) : null}
       <HowTo correction={correction} />
       <div>

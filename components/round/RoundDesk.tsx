@@ -115,6 +115,7 @@ export function RoundDesk({ desk, number, photos, userId, unit }: Props) {
               reading={reading}
               plan={planning.plan}
               problem={planning.problem}
+              fitted={input}
               unit={unit}
               onSet={planning.set}
               onDrop={(id) => void planning.drop(id)}

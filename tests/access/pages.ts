@@ -25,6 +25,7 @@ export const PAGE_ROWS: PageRow[] = [
   page('(studio)/journals/new', () => '/journals/new', own),
   page('(studio)/journals/[journalId]', ({ journalId }) => `/journals/${journalId}`, readers),
   page('(studio)/journals/[journalId]/compare', ({ journalId }) => `/journals/${journalId}/compare`, readers),
+  page('(studio)/journals/[journalId]/record', ({ journalId }) => `/journals/${journalId}/record`, readers),
   page('(studio)/journals/[journalId]/rounds/new', ({ journalId }) => `/journals/${journalId}/rounds/new`, owner),
   page('(studio)/journals/[journalId]/rounds/[number]', ({ journalId }) => `/journals/${journalId}/rounds/1`, readers),
 ]; // prettier-ignore

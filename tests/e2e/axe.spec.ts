@@ -69,6 +69,7 @@ for (const colorScheme of ['light', 'dark'] as const) {
       `${journal}/rounds/2`,
       `${journal}/rounds/new`,
       `${journal}/compare`,
+      `${journal}/record`,
     ];
     for (const path of [...SIGNED_IN, ...deep]) {
       await page.goto(path);

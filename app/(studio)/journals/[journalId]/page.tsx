@@ -6,6 +6,7 @@ import { ledgerRows } from '@/components/journal/ledger-rows';
 import { RoundTickets } from '@/components/journal/RoundTickets';
 import { journalSettling } from '@/components/settling/journal-settling';
 import { Settling } from '@/components/settling/Settling';
+import { LinkButton } from '@/components/ui/LinkButton';
 import { PageHead } from '@/components/ui/PageHead';
 import { Section } from '@/components/ui/Section';
 import { findDesk } from '@/db/queries/desk';
@@ -36,6 +37,7 @@ export default async function JournalPage({ params }: PageProps<'/journals/[jour
         </Section>
         <Section title="The ledger">
           <Ledger rows={ledgerRows(journal.garment, desk?.rounds ?? [])} unit={viewer.unit} />
+          {desk ? <LinkButton href={`/journals/${id}/record`}>The record, piece by piece</LinkButton> : null}
         </Section>
       </div>
     </>
