@@ -1,4 +1,4 @@
-import type { CaseInput } from './case-schema';
+import type { Body, CaseInput } from './case-schema';
 import type { Basis } from './garments/schema';
 
 type Side = 'left' | 'right' | 'both';
@@ -78,6 +78,17 @@ const changesOf = (round: RoundFacts) =>
       ...(madeMm === null ? {} : { amountMm: madeMm, ...(basis === null ? {} : { basis }) }),
     }));
 
+/** The girths that size a body, as a case names them; what was not measured is left out. */
+export function bodyOf({ hip, waist, thigh, knee, calf }: WearerFacts['body']): Partial<Body> {
+  return {
+    ...(hip === undefined ? {} : { hipMm: hip }),
+    ...(waist === undefined ? {} : { waistMm: waist }),
+    ...(thigh === undefined ? {} : { thighMm: thigh }),
+    ...(knee === undefined ? {} : { kneeMm: knee }),
+    ...(calf === undefined ? {} : { calfMm: calf }),
+  };
+}
+
 const HISTORY_MAX = 24;
 
 /**
@@ -88,18 +99,11 @@ const HISTORY_MAX = 24;
 export function caseFromRounds(garment: string, wearer: WearerFacts, rounds: RoundFacts[]): CaseInput {
   const now = rounds.at(-1);
   if (!now) throw new RangeError('a case needs the round that is read');
-  const { hip, waist, thigh, knee, calf } = wearer.body;
   const causes = oneEach(now.causes, ({ cause }) => cause);
   const past = rounds.slice(0, -1).slice(-HISTORY_MAX);
   return {
     garment,
-    body: {
-      ...(hip === undefined ? {} : { hipMm: hip }),
-      ...(waist === undefined ? {} : { waistMm: waist }),
-      ...(thigh === undefined ? {} : { thighMm: thigh }),
-      ...(knee === undefined ? {} : { kneeMm: knee }),
-      ...(calf === undefined ? {} : { calfMm: calf }),
-    },
+    body: bodyOf(wearer.body),
     fittedFor: wearer.fittedFor,
     muslin: now.cut,
     cloth: { kind: now.clothKind, stretchPercent: now.stretchPercent },

@@ -19,7 +19,7 @@ import { engineVersion } from '../diagnosis/version';
 import { publishedCases } from '../tests/reference/cases/published';
 import { absorptionErrorOf, exactnessOf, longSumErrorOf } from '../tests/support/exactness';
 
-/** `npm run evaluate`: everything the diagnosis is held to, in full size, as tables and as data/evaluation.json. */
+/** `npm run evaluate [-- part ...]`: everything the diagnosis is held to, in full size, as tables and as data/evaluation.json. */
 
 const FULL = { models: 10_000, sums: 200, absorptions: 50, fittings: 1000, persons: 500, drawings: 1000 };
 const SEEDS = [1, 2, 3];
@@ -145,15 +145,26 @@ function speed() {
   return rows;
 }
 
-const result = {
-  engine: engineVersion(trousers),
-  exactness: exactness(),
-  calibration: calibration(),
-  published: published(),
-  loop: loop(),
-  speed: speed(),
-};
+const PARTS = { exactness, calibration, published, loop, speed };
+type Part = keyof typeof PARTS;
+
+/** Parts named on the command line, or all of them. */
+function chosenParts(named: readonly string[]): Part[] {
+  const all = Object.keys(PARTS) as Part[];
+  const unknown = named.filter((name) => !all.includes(name as Part));
+  if (unknown.length > 0) {
+    console.error(`no part called ${unknown.join(', ')}; there are: ${all.join(', ')}`);
+    process.exit(2);
+  }
+  return named.length === 0 ? all : all.filter((part) => named.includes(part));
+}
+
+const parts = chosenParts(process.argv.slice(2));
+const figures = Object.fromEntries(parts.map((part) => [part, PARTS[part]()]));
 const folder = path.join(import.meta.dirname, '..', 'data');
 mkdirSync(folder, { recursive: true });
-writeFileSync(path.join(folder, 'evaluation.json'), `${JSON.stringify(result, null, 2)}\n`);
+writeFileSync(
+  path.join(folder, 'evaluation.json'),
+  `${JSON.stringify({ engine: engineVersion(trousers), ...figures }, null, 2)}\n`,
+);
 console.log(`\nWritten to ${path.join('data', 'evaluation.json')}`);

@@ -15,7 +15,7 @@ function choose(names) {
   const unknown = names.filter((name) => !PARTS.some((part) => part.name === name));
   const known = PARTS.map(({ name }) => name).join(', ');
   if (unknown.length > 0) throw new Stop(`No part is called ${unknown.join(', ')}. There are: ${known}.`);
-  return PARTS.filter(({ name }) => names.length === 0 || names.includes(name));
+  return PARTS.filter(({ name, onWish }) => (names.length === 0 ? !onWish : names.includes(name)));
 }
 
 /** A place of its own for this run, emptied of the run before. */

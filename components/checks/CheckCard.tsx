@@ -1,6 +1,7 @@
 'use client';
 import { useState } from 'react';
 import type { CheckAnswer, Side } from '@/components/round/evidence-state';
+import { SIDE_OPTIONS } from '@/components/round/side-options';
 import { Button } from '@/components/ui/Button';
 import { Choice } from '@/components/ui/Choice';
 import { Disclosure } from '@/components/ui/Disclosure';
@@ -14,6 +15,7 @@ interface Props {
   answer: CheckAnswer | null;
   side: Side;
   unit: LengthUnit;
+  /** What was found, and on which side. */
   onAnswer: (answer: CheckAnswer | null, side: Side) => void;
 }
 
@@ -54,6 +56,14 @@ export function CheckCard({ check, answer, side, unit, onAnswer }: Props) {
         value={answer?.outcome ?? null}
         onChange={(outcome) => say({ outcome })}
       />
+      {answer && check.sided ? (
+        <Choice
+          legend="On which side?"
+          options={SIDE_OPTIONS}
+          value={side}
+          onChange={(where) => onAnswer(answer, where)}
+        />
+      ) : null}
       {answer && check.amount !== 'none' ? (
         <CheckAmount key={check.id} check={check} answer={answer} unit={unit} onSay={say} />
       ) : null}

@@ -143,7 +143,8 @@ export function MarkCanvas({ photo, history, act, selected, onSelect, isReadOnly
           <MarkBar mark={chosen} onEdit={edit} onDelete={remove} onLetGo={letGo} />
         ) : null}
       </div>
-      {isReadOnly ? null : (
+      {/* There from the start, so that the photo does not move when its marks have come. */}
+      <div inert={isReadOnly}>
         <MarkToolbar
           tool={tool}
           onTool={chooseTool}
@@ -159,7 +160,7 @@ export function MarkCanvas({ photo, history, act, selected, onSelect, isReadOnly
           onZoom={zoomBy}
           onHelp={() => setHelp(true)}
         />
-      )}
+      </div>
       <p role="status" className="sr-only">
         {said}
       </p>

@@ -3,9 +3,8 @@ import { Controller, type UseFormReturn, useWatch } from 'react-hook-form';
 import { Choice } from '@/components/ui/Choice';
 import { TextArea } from '@/components/ui/TextArea';
 import { TextField } from '@/components/ui/TextField';
-import { CLOTH_KINDS, CLOTH_WORDS, type PatternForm } from './pattern-schema';
-
-const CLOTHS = CLOTH_KINDS.map((value) => ({ value, label: CLOTH_WORDS[value] }));
+import { CLOTH_OPTIONS, PER_CENT } from './cloth-options';
+import type { PatternForm } from './pattern-schema';
 
 export function PatternFields({ form }: { form: UseFormReturn<PatternForm> }) {
   const { register, control, formState } = form;
@@ -30,7 +29,12 @@ export function PatternFields({ form }: { form: UseFormReturn<PatternForm> }) {
         control={control}
         name="clothKind"
         render={({ field }) => (
-          <Choice legend="Drafted for" options={CLOTHS} value={field.value} onChange={field.onChange} />
+          <Choice
+            legend="Drafted for"
+            options={CLOTH_OPTIONS}
+            value={field.value}
+            onChange={field.onChange}
+          />
         )}
       />
       {clothKind === 'woven' ? null : (
@@ -38,9 +42,7 @@ export function PatternFields({ form }: { form: UseFormReturn<PatternForm> }) {
           label="Stretch it asks for, per cent across"
           inputMode="decimal"
           error={errors.stretchPercent?.message}
-          {...register('stretchPercent', {
-            setValueAs: (text: string | number) => (text === '' ? 0 : Number(text)),
-          })}
+          {...register('stretchPercent', PER_CENT)}
         />
       )}
       <TextArea label="Notes" {...register('notes')} />

@@ -1,3 +1,4 @@
+import { sourceWords } from '@/content/source-words';
 import { Disclosure } from '@/components/ui/Disclosure';
 import type { Correction } from '@/diagnosis/garments/schema';
 
@@ -29,6 +30,7 @@ export function HowTo({ correction }: { correction: Correction }) {
         {list('Walk against each other', correction.walk)}
         {list('Where it goes wrong', correction.mistakes)}
         {list('Take care', correction.cautions)}
+        {correction.amounts ? list('Amounts after', sourceWords(correction.amounts.sources)) : null}
       </dl>
     </Disclosure>
   );

@@ -1,3 +1,4 @@
+import { sourceWords } from '@/content/source-words';
 import { Disclosure } from '@/components/ui/Disclosure';
 import type { Reason } from '@/diagnosis/reading';
 
@@ -35,7 +36,7 @@ function Side({ title, reasons }: { title: string; reasons: Reason[] }) {
                 fill="currentColor"
               />
             </svg>
-            <span className="text-graphite">{sourceWords(reason.sources)}</span>
+            <Sources ids={reason.sources} />
           </li>
         ))}
       </ul>
@@ -43,5 +44,17 @@ function Side({ title, reasons }: { title: string; reasons: Reason[] }) {
   );
 }
 
-const sourceWords = (sources: string[]) =>
-  sources.length === 0 ? '' : `After ${sources.map((id) => id.replace(/^\w+:/, '')).join(', ')}`;
+/** Where it is written; what was seen in earlier rounds stands in the journal itself. */
+function Sources({ ids }: { ids: string[] }) {
+  if (ids.length === 0) return null;
+  return (
+    <details className="text-graphite">
+      <summary className="inline-flex min-h-11 items-center underline underline-offset-4">Written in</summary>
+      <ul className="list-disc pl-5">
+        {sourceWords(ids).map((words) => (
+          <li key={words}>{words}</li>
+        ))}
+      </ul>
+    </details>
+  );
+}

@@ -11,7 +11,7 @@ export function JumpBar({ reading }: { reading: Reading | null }) {
     <div className="no-print fixed inset-x-0 bottom-[calc(3.2rem+env(safe-area-inset-bottom))] md:bottom-0 z-10 border-t-2 border-line bg-paper lg:hidden">
       <nav aria-label="Parts of this round" className="flex items-stretch justify-between">
         <a href="#reading" className="flex min-h-11 min-w-0 flex-1 items-center px-4 font-bold">
-          <span className="truncate">{words}</span>
+          <span className="line-clamp-2 leading-tight">{words}</span>
         </a>
         <a
           href="#shows"

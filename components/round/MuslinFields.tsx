@@ -1,12 +1,10 @@
 'use client';
 import { Controller, type UseFormReturn, useWatch } from 'react-hook-form';
-import { CLOTH_KINDS, CLOTH_WORDS } from '@/components/patterns/pattern-schema';
+import { CLOTH_OPTIONS, PER_CENT } from '@/components/patterns/cloth-options';
 import { Choice } from '@/components/ui/Choice';
 import { TextField } from '@/components/ui/TextField';
 import { Tick } from '@/components/ui/Tick';
 import type { MuslinForm } from './round-schema';
-
-const CLOTHS = CLOTH_KINDS.map((value) => ({ value, label: CLOTH_WORDS[value] }));
 
 /** A new cutting: what was cut, from what. */
 export function MuslinFields({ form }: { form: UseFormReturn<MuslinForm> }) {
@@ -40,7 +38,7 @@ export function MuslinFields({ form }: { form: UseFormReturn<MuslinForm> }) {
         control={control}
         name="clothKind"
         render={({ field }) => (
-          <Choice legend="Cloth" options={CLOTHS} value={field.value} onChange={field.onChange} />
+          <Choice legend="Cloth" options={CLOTH_OPTIONS} value={field.value} onChange={field.onChange} />
         )}
       />
       {clothKind === 'woven' ? null : (
@@ -49,9 +47,7 @@ export function MuslinFields({ form }: { form: UseFormReturn<MuslinForm> }) {
           hint="Fold it double, hold 10 cm (4 in) and pull: 12.5 cm (5 in) is 25 per cent."
           inputMode="decimal"
           error={errors.stretchPercent?.message}
-          {...register('stretchPercent', {
-            setValueAs: (text: string | number) => (text === '' ? 0 : Number(text)),
-          })}
+          {...register('stretchPercent', PER_CENT)}
         />
       )}
       <TextField

@@ -91,7 +91,7 @@ export function RoundDesk({ desk, number, photos, userId, unit }: Props) {
               onRuleOut={(id) => evidence.edit([{ kind: 'cause', id, side: 'both', value: false }])}
             />
           ) : (
-            <Skeleton lines={6} />
+            <Skeleton lines={6} isTall />
           )}
         </Section>
         <Section title="Try it" id="try">

@@ -7,6 +7,7 @@ import {
   type EvidenceState,
   type Side,
 } from '@/components/round/evidence-state';
+import { SIDE_OPTIONS } from '@/components/round/side-options';
 import { Button } from '@/components/ui/Button';
 import { TextField } from '@/components/ui/TextField';
 import type { Knowledge, Sign, View } from '@/diagnosis/garments/schema';
@@ -22,12 +23,11 @@ interface Props {
   onEdit: (edits: Edit[]) => void;
 }
 
-const SIDES: Side[] = ['both', 'left', 'right'];
 const FOUND_MAX = 7;
 
 /** The state of a sign, on whichever side it was set. */
 function entryOf(state: EvidenceState, sign: Sign): (Entry & { kind: 'sign' }) | null {
-  for (const side of SIDES) {
+  for (const { value: side } of SIDE_OPTIONS) {
     const entry = state.entries[entryKey({ kind: 'sign', id: sign.id, side })];
     if (entry?.kind === 'sign' && entry.value !== null) return entry;
   }

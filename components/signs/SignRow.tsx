@@ -4,6 +4,7 @@ import { useId } from 'react';
 import { Choice } from '@/components/ui/Choice';
 import type { Sign } from '@/diagnosis/garments/schema';
 import type { Side } from '@/components/round/evidence-state';
+import { SIDE_OPTIONS } from '@/components/round/side-options';
 
 export const STRENGTHS = ['Not there', 'Faint', 'Clear', 'Pulling'] as const;
 
@@ -13,12 +14,6 @@ interface Props {
   side: Side;
   onChange: (severity: number | null, side: Side) => void;
 }
-
-const SIDES = [
-  { value: 'both', label: 'Both sides' },
-  { value: 'left', label: 'Your left' },
-  { value: 'right', label: 'Your right' },
-] as const;
 
 /** One sign and what was seen of it. Nothing chosen means: not looked at. */
 export function SignRow({ sign, severity, side, onChange }: Props) {
@@ -58,7 +53,7 @@ export function SignRow({ sign, severity, side, onChange }: Props) {
         <Choice
           legend="Where"
           hidesLegend
-          options={SIDES}
+          options={SIDE_OPTIONS}
           value={side}
           onChange={(value) => onChange(severity, value)}
         />

@@ -1,23 +1,17 @@
-import { type ComponentProps, type ReactNode, useId } from 'react';
-import { FIELD, join } from './styles';
+import type { ComponentProps } from 'react';
+import { Labelled, type LabelProps } from './Labelled';
+import { FIELD } from './styles';
 
-type Props = Omit<ComponentProps<'select'>, 'id'> & { label: string; hint?: ReactNode };
+type Props = Omit<ComponentProps<'select'>, 'id'> & LabelProps;
 
-export function SelectField({ label, hint, className, children, ...rest }: Props) {
-  const id = useId();
+export function SelectField({ label, hint, error, className, children, ...rest }: Props) {
   return (
-    <div className={join('grid gap-1', className)}>
-      <label htmlFor={id} className="font-bold">
-        {label}
-      </label>
-      {hint ? (
-        <p id={`${id}-hint`} className="text-sm text-graphite">
-          {hint}
-        </p>
-      ) : null}
-      <select id={id} className={FIELD} aria-describedby={hint ? `${id}-hint` : undefined} {...rest}>
-        {children}
-      </select>
-    </div>
+    <Labelled label={label} hint={hint} error={error} className={className}>
+      {(tied) => (
+        <select className={FIELD} {...tied} {...rest}>
+          {children}
+        </select>
+      )}
+    </Labelled>
   );
 }

@@ -1,16 +1,13 @@
-import { type ComponentProps, useId } from 'react';
-import { FIELD, join } from './styles';
+import type { ComponentProps } from 'react';
+import { Labelled, type LabelProps } from './Labelled';
+import { FIELD } from './styles';
 
-type Props = Omit<ComponentProps<'textarea'>, 'id'> & { label: string };
+type Props = Omit<ComponentProps<'textarea'>, 'id'> & LabelProps;
 
-export function TextArea({ label, className, ...rest }: Props) {
-  const id = useId();
+export function TextArea({ label, hint, error, className, ...rest }: Props) {
   return (
-    <div className={join('grid gap-1', className)}>
-      <label htmlFor={id} className="font-bold">
-        {label}
-      </label>
-      <textarea id={id} rows={3} className={FIELD} {...rest} />
-    </div>
+    <Labelled label={label} hint={hint} error={error} className={className}>
+      {(tied) => <textarea rows={3} className={FIELD} {...tied} {...rest} />}
+    </Labelled>
   );
 }

@@ -5,7 +5,8 @@ import { db } from '../client';
 import { changes } from '../schema/changes';
 import { rounds } from '../schema/rounds';
 import { recordAudit } from './audit';
-import { done, missing, type Written } from './outcome';
+import { writeGuarded } from './guarded';
+import type { Written } from './outcome';
 import type { Basis, Side } from './round-facts';
 import type { Viewer } from './viewer';
 import { roundIds, roundOwnedBy } from './visible-to';
@@ -84,37 +85,29 @@ export async function planChange(
 }
 
 /** Sets the planned amount, or says what was really made of it. */
-export async function updateChange(
+export function updateChange(
   viewer: Viewer,
   id: string,
   seenVersion: number,
-  { isMade, ...edit }: ChangeEdit,
+  edit: ChangeEdit,
 ): Promise<Written<ChangeDto>> {
+  const { isMade, ...columns } = edit;
   const set = {
-    ...edit,
+    ...columns,
     ...(isMade === undefined ? {} : { madeAt: isMade ? sql`coalesce(${changes.madeAt}, now())` : null }),
     version: sql`${changes.version} + 1`,
   };
-  const row = await db().transaction(async (tx) => {
-    const [written] = await tx
-      .update(changes)
-      .set(set)
-      .where(and(ownChange(viewer, id), eq(changes.version, seenVersion)))
-      .returning(COLUMNS);
-    if (!written) return null;
-    const fields = Object.keys(set);
-    await recordAudit(tx, {
-      actorId: viewer.userId,
-      verb: 'update',
-      objectKind: 'change',
-      objectId: id,
-      fields,
-    });
-    return written;
+  return writeGuarded({
+    viewer,
+    objectKind: 'change',
+    id,
+    edit,
+    write: async (tx) => {
+      const mine = and(ownChange(viewer, id), eq(changes.version, seenVersion));
+      return (await tx.update(changes).set(set).where(mine).returning({ id: changes.id })).length > 0;
+    },
+    find: () => findChange(viewer, id),
   });
-  if (row) return done(row);
-  const theirs = await findChange(viewer, id);
-  return theirs ? { kind: 'conflict', mine: { ...edit, isMade }, theirs } : missing();
 }
 
 /** Out of the plan. A change that has been made stays in the ledger: false. */

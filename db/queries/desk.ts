@@ -7,18 +7,10 @@ import { patternVersions } from '../schema/pattern-versions';
 import { patterns } from '../schema/patterns';
 import { rounds } from '../schema/rounds';
 import { wearers } from '../schema/wearers';
+import { latestBody } from './latest-body';
 import { roundFacts } from './round-facts';
 import type { Viewer } from './viewer';
 import { roundVisibleTo } from './visible-to';
-
-/** The newest value of each measure that sizes a body, mm: `{ hip: 1020, … }`. */
-const latestBody = sql<Partial<Record<'waist' | 'hip' | 'thigh' | 'knee' | 'calf', number>>>`(
-  select coalesce(json_object_agg(latest.measure, latest.value_mm), '{}') from (
-    select distinct on (m.measure) m.measure, m.value_mm
-    from measurements m join measurement_sets s on s.id = m.set_id
-    where s.wearer_id = wearers.id and s.deleted_at is null and m.measure in ('waist', 'hip', 'thigh', 'knee', 'calf')
-    order by m.measure, s.measured_on desc, s.id desc, m.take
-  ) latest)`;
 
 /**
  * Everything the reading of a journal stands on: who it is for, and every round that the viewer may see with what was found in

@@ -7,7 +7,8 @@ import { patterns } from '../schema/patterns';
 import { wearers } from '../schema/wearers';
 import { recordAudit } from './audit';
 import { moveToBin } from './bin';
-import { done, missing, type Written } from './outcome';
+import { writeGuarded } from './guarded';
+import type { Written } from './outcome';
 import type { Viewer } from './viewer';
 import { journalIds, journalOwnedBy, journalVisibleTo } from './visible-to';
 
@@ -129,42 +130,32 @@ export interface JournalEdit {
   isSettled?: boolean | undefined;
 }
 
-export async function updateJournal(
+export function updateJournal(
   viewer: Viewer,
   id: string,
   seenVersion: number,
   edit: JournalEdit,
 ): Promise<Written<JournalDto>> {
-  const isWritten = await db().transaction(async (tx) => {
-    const rows = await tx
-      .update(journals)
-      .set({
-        ...(edit.name === undefined ? {} : { name: edit.name }),
-        ...(edit.isSettled === undefined ? {} : { settledAt: edit.isSettled ? sql`now()` : null }),
-        version: sql`${journals.version} + 1`,
-      })
-      .where(
-        and(
-          eq(journals.id, id),
-          inArray(journals.id, journalIds(journalOwnedBy(viewer))),
-          eq(journals.version, seenVersion),
-        ),
-      )
-      .returning({ id: journals.id });
-    if (rows.length === 0) return false;
-    const fields = Object.keys(edit);
-    await recordAudit(tx, {
-      actorId: viewer.userId,
-      verb: 'update',
-      objectKind: 'journal',
-      objectId: id,
-      fields,
-    });
-    return true;
+  const set = {
+    ...(edit.name === undefined ? {} : { name: edit.name }),
+    ...(edit.isSettled === undefined ? {} : { settledAt: edit.isSettled ? sql`now()` : null }),
+    version: sql`${journals.version} + 1`,
+  };
+  return writeGuarded({
+    viewer,
+    objectKind: 'journal',
+    id,
+    edit,
+    write: async (tx) => {
+      const owned = inArray(journals.id, journalIds(journalOwnedBy(viewer)));
+      const mine = and(eq(journals.id, id), owned, eq(journals.version, seenVersion));
+      return (await tx.update(journals).set(set).where(mine).returning({ id: journals.id })).length > 0;
+    },
+    find: async () => {
+      const journal = await findJournal(viewer, id);
+      return journal?.isOwner ? journal : null;
+    },
   });
-  const now = await findJournal(viewer, id);
-  if (!now?.isOwner) return missing();
-  return isWritten ? done(now) : { kind: 'conflict', mine: edit, theirs: now };
 }
 
 export const removeJournal = (viewer: Viewer, id: string) =>

@@ -6,7 +6,8 @@ import { patternVersions } from '../schema/pattern-versions';
 import { patterns } from '../schema/patterns';
 import { recordAudit } from './audit';
 import { moveToBin } from './bin';
-import { done, missing, type Written } from './outcome';
+import { writeGuarded } from './guarded';
+import type { Written } from './outcome';
 import type { Viewer } from './viewer';
 
 const COLUMNS = {
@@ -67,42 +68,34 @@ export async function createPattern(
   return findPattern(viewer, id);
 }
 
-export async function updatePattern(
+export function updatePattern(
   viewer: Viewer,
   id: string,
   seenVersion: number,
-  input: PatternInput,
+  edit: PatternInput,
 ): Promise<Written<PatternDto>> {
-  const { pattern, draft } = split(input);
-  const isWritten = await db().transaction(async (tx) => {
-    const [row] = await tx
-      .update(patterns)
-      .set({ ...pattern, version: sql`${patterns.version} + 1` })
-      .where(and(eq(patterns.id, id), ownedBy(viewer), eq(patterns.version, seenVersion)))
-      .returning({ id: patterns.id });
-    if (!row) return false;
-    await tx
-      .update(patternVersions)
-      .set({ ...draft, version: sql`${patternVersions.version} + 1` })
-      .where(
-        and(
-          eq(patternVersions.patternId, id),
-          sql`${patternVersions.ordinal} = (select max(newer.ordinal) from pattern_versions newer where newer.pattern_id = ${id})`,
-        ),
-      );
-    const fields = Object.keys(input);
-    await recordAudit(tx, {
-      actorId: viewer.userId,
-      verb: 'update',
-      objectKind: 'pattern',
-      objectId: id,
-      fields,
-    });
-    return true;
+  const { pattern, draft } = split(edit);
+  return writeGuarded({
+    viewer,
+    objectKind: 'pattern',
+    id,
+    edit,
+    write: async (tx) => {
+      const [row] = await tx
+        .update(patterns)
+        .set({ ...pattern, version: sql`${patterns.version} + 1` })
+        .where(and(eq(patterns.id, id), ownedBy(viewer), eq(patterns.version, seenVersion)))
+        .returning({ id: patterns.id });
+      if (!row) return false;
+      const newest = sql`${patternVersions.ordinal} = (select max(newer.ordinal) from pattern_versions newer where newer.pattern_id = ${id})`;
+      await tx
+        .update(patternVersions)
+        .set({ ...draft, version: sql`${patternVersions.version} + 1` })
+        .where(and(eq(patternVersions.patternId, id), newest));
+      return true;
+    },
+    find: () => findPattern(viewer, id),
   });
-  const now = await findPattern(viewer, id);
-  if (!now) return missing();
-  return isWritten ? done(now) : { kind: 'conflict', mine: input, theirs: now };
 }
 
 /** Into the bin, with every journal cut from it out of sight. True when there was something to remove. */

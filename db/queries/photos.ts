@@ -5,7 +5,8 @@ import { db, type Executor } from '../client';
 import { photos } from '../schema/photos';
 import { rounds } from '../schema/rounds';
 import { recordAudit } from './audit';
-import { done, missing, type Written } from './outcome';
+import { writeGuarded } from './guarded';
+import type { Written } from './outcome';
 import type { Viewer } from './viewer';
 import { photoIsKept, roundIds, roundOwnedBy, roundVisibleTo } from './visible-to';
 
@@ -139,32 +140,24 @@ async function findOwnPhoto(viewer: Viewer, id: string): Promise<PhotoDto | null
   return row ?? null;
 }
 
-export async function updatePhoto(
+export function updatePhoto(
   viewer: Viewer,
   id: string,
   seenVersion: number,
   edit: { view?: View | undefined; isMirrored?: boolean | undefined },
 ): Promise<Written<PhotoDto>> {
-  const row = await db().transaction(async (tx) => {
-    const [written] = await tx
-      .update(photos)
-      .set({ ...edit, version: sql`${photos.version} + 1` })
-      .where(and(eq(photos.id, id), photoIsKept, inOwnRound(viewer), eq(photos.version, seenVersion)))
-      .returning(COLUMNS);
-    if (!written) return null;
-    const fields = Object.keys(edit);
-    await recordAudit(tx, {
-      actorId: viewer.userId,
-      verb: 'update',
-      objectKind: 'photo',
-      objectId: id,
-      fields,
-    });
-    return written;
+  return writeGuarded({
+    viewer,
+    objectKind: 'photo',
+    id,
+    edit,
+    write: async (tx) => {
+      const mine = and(eq(photos.id, id), photoIsKept, inOwnRound(viewer), eq(photos.version, seenVersion));
+      const set = { ...edit, version: sql`${photos.version} + 1` };
+      return (await tx.update(photos).set(set).where(mine).returning({ id: photos.id })).length > 0;
+    },
+    find: () => findOwnPhoto(viewer, id),
   });
-  if (row) return done(row);
-  const theirs = await findOwnPhoto(viewer, id);
-  return theirs ? { kind: 'conflict', mine: edit, theirs } : missing();
 }
 
 /** Into the bin, or out of it again within 30 days. */

@@ -7,7 +7,8 @@ import { muslins } from '../schema/muslins';
 import { rounds } from '../schema/rounds';
 import { recordAudit } from './audit';
 import { moveToBin } from './bin';
-import { done, missing, type Written } from './outcome';
+import { writeGuarded } from './guarded';
+import type { Written } from './outcome';
 import type { Viewer } from './viewer';
 import { journalIds, journalOwnedBy, roundIds, roundOwnedBy } from './visible-to';
 
@@ -117,43 +118,30 @@ async function findOwnRound(viewer: Viewer, id: string) {
 }
 export type RoundDto = NonNullable<Awaited<ReturnType<typeof findOwnRound>>>;
 
-export async function updateRound(
+export function updateRound(
   viewer: Viewer,
   id: string,
   seenVersion: number,
-  { hangsClean, ...edit }: RoundEdit,
+  edit: RoundEdit,
 ): Promise<Written<RoundDto>> {
+  const { hangsClean, ...columns } = edit;
   const set = {
-    ...edit,
+    ...columns,
     ...(hangsClean === undefined ? {} : { hangsCleanAt: hangsClean ? sql`now()` : null }),
     version: sql`${rounds.version} + 1`,
   };
-  const row = await db().transaction(async (tx) => {
-    const [written] = await tx
-      .update(rounds)
-      .set(set)
-      .where(
-        and(
-          eq(rounds.id, id),
-          inArray(rounds.id, roundIds(roundOwnedBy(viewer))),
-          eq(rounds.version, seenVersion),
-        ),
-      )
-      .returning(COLUMNS);
-    if (!written) return null;
-    const fields = Object.keys(set);
-    await recordAudit(tx, {
-      actorId: viewer.userId,
-      verb: 'update',
-      objectKind: 'round',
-      objectId: id,
-      fields,
-    });
-    return written;
+  return writeGuarded({
+    viewer,
+    objectKind: 'round',
+    id,
+    edit,
+    write: async (tx) => {
+      const owned = inArray(rounds.id, roundIds(roundOwnedBy(viewer)));
+      const mine = and(eq(rounds.id, id), owned, eq(rounds.version, seenVersion));
+      return (await tx.update(rounds).set(set).where(mine).returning({ id: rounds.id })).length > 0;
+    },
+    find: () => findOwnRound(viewer, id),
   });
-  if (row) return done(row);
-  const theirs = await findOwnRound(viewer, id);
-  return theirs ? { kind: 'conflict', mine: { ...edit, hangsClean }, theirs } : missing();
 }
 
 export const removeRound = (viewer: Viewer, id: string) =>

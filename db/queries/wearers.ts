@@ -4,7 +4,8 @@ import { db } from '../client';
 import { wearers } from '../schema/wearers';
 import { recordAudit } from './audit';
 import { moveToBin } from './bin';
-import { done, missing, type Written } from './outcome';
+import { writeGuarded } from './guarded';
+import type { Written } from './outcome';
 import type { Viewer } from './viewer';
 
 const COLUMNS = {
@@ -62,31 +63,23 @@ export async function createWearer(
   });
 }
 
-export async function updateWearer(
+export function updateWearer(
   viewer: Viewer,
   id: string,
   seenVersion: number,
-  input: WearerInput,
+  edit: WearerInput,
 ): Promise<Written<WearerDto>> {
-  return db().transaction(async (tx) => {
-    const [row] = await tx
-      .update(wearers)
-      .set({ ...input, version: sql`${wearers.version} + 1` })
-      .where(and(eq(wearers.id, id), ownedBy(viewer), eq(wearers.version, seenVersion)))
-      .returning(COLUMNS);
-    if (row) {
-      const fields = Object.keys(input);
-      await recordAudit(tx, {
-        actorId: viewer.userId,
-        verb: 'update',
-        objectKind: 'wearer',
-        objectId: id,
-        fields,
-      });
-      return done(row);
-    }
-    const theirs = await findWearer(viewer, id);
-    return theirs ? { kind: 'conflict', mine: input, theirs } : missing();
+  return writeGuarded({
+    viewer,
+    objectKind: 'wearer',
+    id,
+    edit,
+    write: async (tx) => {
+      const mine = and(eq(wearers.id, id), ownedBy(viewer), eq(wearers.version, seenVersion));
+      const set = { ...edit, version: sql`${wearers.version} + 1` };
+      return (await tx.update(wearers).set(set).where(mine).returning({ id: wearers.id })).length > 0;
+    },
+    find: () => findWearer(viewer, id),
   });
 }
 

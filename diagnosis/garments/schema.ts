@@ -80,7 +80,10 @@ const zone = z.enum([
   'lower-leg', 'hem', 'side-seam', 'inseam', 'pocket', 'fly', 'waistband',
 ]); // prettier-ignore
 
-/** What a mark must look like, in figure coordinates, to be read as this sign. Angles are degrees from plumb, 0–180, + leans to the wearer's side seam going down. */
+/**
+ * What a mark must look like, in figure coordinates, to be read as this sign. Angles are degrees from plumb, taken modulo
+ * 180 (a line has no direction): + leans to the wearer's side seam going down, in side and seated views to their back.
+ */
 export const templateSchema = z.strictObject({
   zones: z.array(zone).min(1),
   kinds: z.array(z.enum(['tight', 'slack', 'gap', 'pooling', 'tilt'])).min(1),

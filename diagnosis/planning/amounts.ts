@@ -3,6 +3,7 @@ import type { Correction } from '../garments/schema';
 import { ownAmount } from '../inference/replay';
 import type { Range } from '../reading';
 import { amountText } from './amount-text';
+import { type Caps, capsOn } from './caps';
 import type { Outlook, Tail } from './outlook';
 import { LIKELY_FROM, POSSIBLE_FROM } from './words';
 
@@ -24,10 +25,7 @@ export const NO_AMOUNTS = {
 };
 
 /** How far a correction may go on this body, mm of its own basis. */
-export interface Limits {
-  firstMm: number;
-  capRoundMm: number;
-  capTotalMm: number;
+export interface Limits extends Caps {
   /** What is left of the total cap after the rounds before. */
   leftMm: number;
   /** What this round may take at the most. */
@@ -37,22 +35,11 @@ export interface Limits {
 /** Its first amount and caps at this size, and what earlier rounds have left of them; null where the change is no length. */
 export function limitsOf(outlook: Outlook, correction: Correction, side: Side): Limits | null {
   const { layout } = outlook;
-  const { amounts } = correction;
-  if (!amounts) return null;
-  const factor = layout.factors[amounts.sizeLevel];
-  const [firstMm, capRoundMm, capTotalMm] = [amounts.firstMm, amounts.capRoundMm, amounts.capTotalMm].map(
-    (mm) => mm * factor,
-  ) as [number, number, number];
-  const madeMm = netMade(outlook, correction, side);
-  const leftMm = capTotalMm - madeMm;
+  const caps = capsOn(correction, layout.factors);
+  if (!caps) return null;
+  const leftMm = caps.capTotalMm - netMade(outlook, correction, side);
   // Rests below a hundredth of a millimetre come from adding, not from cutting.
-  return {
-    firstMm,
-    capRoundMm,
-    capTotalMm,
-    leftMm: leftMm > 0.01 ? leftMm : 0,
-    capMm: Math.min(capRoundMm, leftMm),
-  };
+  return { ...caps, leftMm: leftMm > 0.01 ? leftMm : 0, capMm: Math.min(caps.capRoundMm, leftMm) };
 }
 
 /** What earlier rounds made of a correction, less what they took back by its opposite, mm of its own basis; not below 0. */
@@ -82,16 +69,26 @@ function takenBackPerMm(correction: Correction, other: Correction): number {
   return ratios.every((ratio) => ratio > 0) ? Math.min(...ratios) : 0;
 }
 
+/** Whether somebody put a length on what is served: a fold pinned, a gap measured, a tape against the paper. */
+function isMeasured({ layout: { index }, fitting }: Outlook, serves: readonly Tail[]): boolean {
+  const served = (id: string) => serves.some(({ dimension }) => index.dimensions.get(id) === dimension);
+  const pinned = fitting.tests.some(({ check, amountMm }) => {
+    const { amountTo } = index.knowledge.checks[index.checks.get(check)!]!;
+    return amountMm !== null && amountTo !== null && served(amountTo.dimension);
+  });
+  return pinned || fitting.measured.some(({ terms }) => terms.some(({ dimension }) => served(dimension)));
+}
+
 /**
  * The amount proposed for this round: the smaller of the first amount and two thirds of the estimate, the whole estimate
- * once it is firm and not from marks alone; never past a cap.
+ * once somebody measured it and it is firm (take the amount from the toile, not from a table: trousers:TF053); never past a cap.
  */
 export function amountsOf(outlook: Outlook, correction: Correction, serves: readonly Tail[], limits: Limits) {
   const amounts = correction.amounts!;
   const estimate = estimateOf(outlook, correction, serves);
   const [lowMm, highMm] = estimate.rangeMm;
   const firm =
-    !outlook.marksAlone &&
+    isMeasured(outlook, serves) &&
     estimate.probability >= LIKELY_FROM &&
     highMm - lowMm <= FIRM_SHARE * estimate.meanMm;
   const wantedMm = firm ? estimate.meanMm : Math.min(limits.firstMm, FIRST_SHARE * estimate.meanMm);

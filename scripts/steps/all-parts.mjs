@@ -41,4 +41,10 @@ export const PARTS = [
   vitest('integration', ['integration'], { needs: ['postgresql'], envOf: databaseOnly }),
   { name: 'build', needs: [], run: () => ensureBuild().then(() => ({ passed: 1, failed: 0 })) },
   playwright('browser', { needs: ['postgresql', 'chromium'], envOf: wholeApplication }),
+  playwright('shots', {
+    needs: ['postgresql', 'chromium'],
+    envOf: wholeApplication,
+    config: 'playwright.shots.config.ts',
+    onWish: true,
+  }),
 ];

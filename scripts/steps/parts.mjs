@@ -71,15 +71,16 @@ export const vitest = (name, projects, { needs = [], envOf = () => ({}) } = {}) 
   },
 });
 
-/** Playwright against the built application. */
-export const playwright = (name, { needs, envOf }) => ({
+/** Playwright against the built application. One that is `onWish` runs only when it is asked for by name. */
+export const playwright = (name, { needs, envOf, config = 'playwright.config.ts', onWish = false }) => ({
   name,
   needs,
+  onWish,
   run: async (context) => {
     const report = join(context.folders.data, `${name}.json`);
     rmSync(report, { force: true });
     const env = { ...ENV, ...(await envOf(context)), PLAYWRIGHT_JSON_OUTPUT_NAME: report };
-    const { code } = await run(bin('playwright'), ['test', '--reporter=line,json'], {
+    const { code } = await run(bin('playwright'), ['test', '-c', config, '--reporter=line,json'], {
       cwd: ROOT,
       env,
       allowFailure: true,

@@ -5,9 +5,9 @@ interface Point {
 
 /** From a point to the nearest spot of the chord from a to b, in their unit. */
 export function distanceToChord({ x, y }: Point, a: Point, b: Point): number {
-  const length = Math.hypot(b.x - a.x, b.y - a.y);
-  if (length === 0) return Math.hypot(x - a.x, y - a.y);
-  const along = Math.min(1, Math.max(0, ((x - a.x) * (b.x - a.x) + (y - a.y) * (b.y - a.y)) / length ** 2));
+  const square = (b.x - a.x) ** 2 + (b.y - a.y) ** 2;
+  if (square === 0) return Math.hypot(x - a.x, y - a.y);
+  const along = Math.min(1, Math.max(0, ((x - a.x) * (b.x - a.x) + (y - a.y) * (b.y - a.y)) / square));
   return Math.hypot(x - a.x - along * (b.x - a.x), y - a.y - along * (b.y - a.y));
 }
 

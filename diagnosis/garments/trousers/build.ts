@@ -104,7 +104,10 @@ interface SignWords {
   maskedBy?: Sign['maskedBy'];
   lookAlikes?: [sign: string, differs: string][];
   synonyms: string[];
+  /** Null where the sign is felt and no line can show it. */
+  template: Sign['template'];
   fullLength?: boolean;
+  aliases?: string[];
 }
 
 export function sign(words: SignWords): Sign {
@@ -124,7 +127,6 @@ export function sign(words: SignWords): Sign {
     leak,
     maskedBy,
     lookAlikes: lookAlikes.map(([other, differs]) => ({ sign: other, differs })),
-    template: null,
     needsFullLength: fullLength,
     sources: [...new Set(links.flatMap(({ sources }) => sources))],
   };

@@ -78,4 +78,9 @@ export const forkCorrections: Correction[] = [
     amounts: [3, 5, 8, 12], vector: [['under-seat-length', -1]], stage: 4, seam: 'other', pieces: ['back'], operators: ['shaped-seam'], keep: ['side and inseam lengths'], true: ['the new seam'], walk: ['the new seam'],
     mistakes: ['Tucked across the whole width', 'In a formal cloth'], risk: 0.3, sided: true, sources: ['trousers:TC059'],
   }),
+  correction({
+    id: 'lengthen-under-seat', name: 'Give length under the seat', group: 'under-seat', description: 'Slash the back across under the seat from the middle to both seams and spread in the middle, nothing at side and inseam.',
+    amounts: [3, 5, 8, 12], vector: [['under-seat-length', 1]], stage: 4, seam: 'other', neverWith: ['shape-under-seat', 'shorten-back-point'], pieces: ['back'], operators: ['shaped-seam'], keep: ['side and inseam lengths'], true: ['the new seam'], walk: ['the new seam'],
+    mistakes: ['Spread across the whole width', 'The back slope was too small for a sitter'], risk: 0.3, muslin: 'patch', sided: true, sources: ['trousers:TF051'],
+  }),
 ]; // prettier-ignore

@@ -2,6 +2,11 @@ import type { Correction } from '../schema';
 import { correction } from './build';
 
 const SIDE_LENGTH = 'side seam length';
+/** What a change of the depth all round never goes with (fitter’s reference 1.10). */
+const RISES = [
+  'raise-centre-back', 'wedge-into-back', 'pin-out-back-fold', 'overlap-wedge-in-back', 'raise-centre-front', 'wedge-into-front', 'lower-centre-front',
+  'raise-side-waist', 'lower-side-waist', 'tip-waist-forward',
+]; // prettier-ignore
 
 /** Depth, rises and the waist line: what runs up and down. */
 export const lengthCorrections: Correction[] = [
@@ -9,7 +14,7 @@ export const lengthCorrections: Correction[] = [
     id: 'lengthen-depth', name: 'Lengthen the depth all round', group: 'depth',
     description: 'Slash front and back straight across above the crotch line and spread them by the same amount.',
     amounts: [6, 10, 19, 38], vector: [['crotch-depth', 1], ['leg-length', 1, '~']], stage: 2, seam: 'length',
-    neverWith: ['raise-centre-back', 'wedge-into-back', 'raise-centre-front', 'wedge-into-front', 'lower-centre-front', 'pin-out-back-fold'],
+    neverWith: [...RISES],
     pieces: ['front', 'back'], operators: ['parallel-spread'], keep: ['waist', 'hip width', 'the curve', 'the fly notch'],
     true: ['centre front', 'centre back', 'sides', 'darts'], walk: ['side seams'],
     mistakes: ['Doing one piece only', 'The hem drops as much, and nobody shortens it'], muslin: 'patch',
@@ -18,7 +23,7 @@ export const lengthCorrections: Correction[] = [
     id: 'shorten-depth', name: 'Shorten the depth all round', group: 'depth',
     description: 'Fold the same tuck across front and back above the crotch line.',
     amounts: [6, 10, 19, 38], vector: [['crotch-depth', -1], ['leg-length', -1, '~']], stage: 2, seam: 'length',
-    neverWith: ['raise-centre-back', 'wedge-into-back', 'raise-centre-front', 'wedge-into-front', 'lower-centre-front', 'pin-out-back-fold'],
+    neverWith: [...RISES],
     pieces: ['front', 'back'], operators: ['parallel-tuck'], keep: ['waist', 'hip width', 'the curve', 'the fly notch'],
     true: ['fly end', 'pocket ends', 'sides'], walk: ['side seams'],
     mistakes: ['Doing it while the thigh is tight', 'Tucking below the hip line'], sources: ['trousers:TC022', 'trousers:TF036'],
@@ -97,5 +102,30 @@ export const lengthCorrections: Correction[] = [
     id: 'shorten-leg', name: 'Shorten the leg', group: 'leg-length', description: 'Fold a tuck across the lower leg.',
     amounts: [6, 12, 38, 125], vector: [['leg-length', -1]], stage: 8, seam: 'length', sided: true, pieces: ['front', 'back'], operators: ['parallel-tuck'],
     keep: ['hem width', 'knee'], true: ['side', 'inseam'], walk: ['side seams', 'inseams'], mistakes: ['Before rise and shoes are settled', 'In the flared part'],
+  }),
+  correction({
+    id: 'overlap-wedge-in-back', name: 'Overlap a wedge across the seat', group: 'back-rise',
+    description: 'Slash the back from centre back over the seat to the stitching line of the side, keep that point as the hinge, and overlap at centre back.',
+    amounts: [3, 6, 12, 25], vector: [['back-rise', -1], ['back-slope', -0.3, '~']], stage: 2, seam: 'back-crotch',
+    neverWith: ['pin-out-back-fold', 'shorten-back-point', 'fill-back-curve', 'lengthen-depth', 'shorten-depth'], pieces: ['back'], operators: ['hinged-overlap'],
+    keep: ['the side on its stitching line'], true: ['centre back', 'the side'], walk: ['side seams', 'waistband'],
+    mistakes: ['It takes length that sitting needs', 'Used for a low seat, which wants the curve'], risk: 0.25,
+  }),
+  correction({
+    id: 'tip-waist-forward', name: 'Tip the waist: front down, back up', group: 'back-rise',
+    description: 'Lower centre front and raise centre back by the same amount, the waist at the side kept.',
+    amounts: [3, 6, 12, 30], vector: [['front-rise', -1], ['back-rise', 1]], stage: 2, seam: 'length',
+    neverWith: ['raise-centre-back', 'wedge-into-back', 'pin-out-back-fold', 'raise-centre-front', 'lower-centre-front', 'wedge-into-front', 'lengthen-depth', 'shorten-depth', 'extend-back-point'],
+    pieces: ['front', 'back', 'waistband', 'fly'], operators: ['lower-waist-taper', 'raise-waist-taper'], keep: ['the side point', 'hip'],
+    true: ['square at centre front and centre back', 'the waist run'], walk: ['waistband'],
+    mistakes: ['Added on top of a front already lowered', 'The band seam is not squared again'], risk: 0.3, sources: ['trousers:TC055'],
+  }),
+  correction({
+    id: 'raise-crotch-level', name: 'Raise the crotch level', group: 'depth',
+    description: 'Draw the crotch point and the foot of the curve higher, waist and side kept; the inseam becomes longer.',
+    amounts: [3, 6, 10, 19], vector: [['crotch-depth', -1], ['front-extension', -0.4, '~'], ['back-extension', -0.4, '~']], stage: 3, seam: 'back-crotch',
+    neverWith: ['raise-centre-back', 'wedge-into-back', 'shorten-depth', 'lengthen-depth'], pieces: ['front', 'back'], operators: ['reshape-curve', 'extend-point'],
+    keep: ['waist', 'side length'], true: ['both curves'], walk: ['inseams, longer by the amount'],
+    mistakes: ['No cloth for it on a muslin that is cut', 'The leg was caught lower down'], muslin: 'new-cloth', risk: 0.25,
   }),
 ]; // prettier-ignore

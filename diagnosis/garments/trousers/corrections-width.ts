@@ -65,7 +65,7 @@ export const widthCorrections: Correction[] = [
   }),
   correction({
     id: 'deepen-back-dart', name: 'Deepen the back darts', group: 'waist', description: 'Take more into each back dart at the waist.',
-    amounts: [3, 6, 10, 25], basis: 'piece', level: 'waist', vector: [['waist-back', -2]], stage: 7, seam: 'girth', pieces: ['back', 'waistband', 'yoke'], operators: ['resize-dart'], keep: ['hip', 'centre back', 'side seam length'], true: ['the dart cap'], walk: ['yoke', 'waistband'],
+    amounts: [3, 6, 10, 25], basis: 'piece', level: 'waist', vector: [['waist-back', -2]], stage: 7, seam: 'girth', pieces: ['back', 'waistband'], operators: ['resize-dart'], keep: ['hip', 'centre back', 'side seam length'], true: ['the dart cap'], walk: ['yoke', 'waistband'],
     mistakes: ['It ends too high and makes a bubble', 'It points past the fullest place'], sources: ['trousers:TF048'],
   }),
   correction({
@@ -90,12 +90,32 @@ export const widthCorrections: Correction[] = [
   }),
   correction({
     id: 'take-in-back-inseam', name: 'Take in the back inseam at the top', group: 'thigh', description: 'Take in the back inseam over its top 250 to 300 mm, point kept.',
-    amounts: [3, 5, 10, 16], basis: 'edge', edges: 1, level: 'thigh', vector: [['back-thigh', -1]], stage: 5, seam: 'girth', neverWith: ['extend-back-point', 'shorten-back-point'], pieces: ['back'], operators: ['take-in-taper'],
+    amounts: [3, 6, 10, 16], basis: 'edge', edges: 1, level: 'thigh', vector: [['back-thigh', -1]], stage: 5, seam: 'girth', neverWith: ['extend-back-point', 'shorten-back-point'], pieces: ['back'], operators: ['take-in-taper'],
     keep: ['the point', 'the front inseam', 'knee'], true: ['the run of the inseam'], walk: ['the inseam keeps its drafted ease'], mistakes: ['Taken in to the knee', 'The thigh catches on stairs'], sided: true, sources: ['trousers:TF012'],
   }),
   correction({
     id: 'take-in-thigh-side', name: 'Take in the thigh at the side', group: 'thigh', description: 'Take in front and back at the side from hip notch to knee.',
     amounts: [3, 5, 10, 16], basis: 'edge', edges: 2, level: 'thigh', vector: [['front-thigh', -1], ['back-thigh', -1]], stage: 5, seam: 'girth', pieces: ['front', 'back'], operators: ['take-in-taper'], keep: ['hip notch', 'knee'], true: ['the run at hip and knee'], walk: ['side seams'],
     mistakes: ['It eats crotch length', 'One piece only'],
+  }),
+  correction({
+    id: 'take-in-waist-back', name: 'Take in the waist behind at the side', group: 'waist', description: 'Take in the back at the side of the waist, to nothing at the high hip.',
+    amounts: [3, 3, 6, 12], basis: 'edge', edges: 2, level: 'waist', vector: [['waist-back', -2]], stage: 7, seam: 'girth', pieces: ['back', 'waistband'], operators: ['take-in-taper'], keep: ['hip'], true: ['the run of the waist'], walk: ['waistband'],
+    mistakes: ['Carried below the high hip', 'The gape was back rise'], sources: ['trousers:TC081'],
+  }),
+  correction({
+    id: 'narrow-back', name: 'Narrow the back', group: 'hip', description: 'Fold a long tuck down the back beside the grain line.',
+    amounts: [3, 6, 10, 19], basis: 'piece', level: 'hip', vector: [['hip-back', -2], ['back-thigh', -1]], stage: 5, seam: 'girth', pieces: ['back'], operators: ['parallel-tuck'], keep: ['front', 'side length', 'dart intake'], true: ['waist', 'hem', 'grain in the middle again'], walk: ['waistband'],
+    mistakes: ['The knee shrinks unseen', 'The grain is left off the middle'],
+  }),
+  correction({
+    id: 'straighten-waistband', name: 'Curve the waistband less', group: 'waistband', description: 'Slash the band from its top edge and spread there, in several places.',
+    amounts: [3, 8, 16, 30], basis: 'round', level: 'waist', vector: [['waistband-contour', -1]], stage: 7, seam: 'other', pieces: ['waistband'], operators: ['contour-band'], keep: ['the lower edge', 'the overlap at centre front'], true: ['both edges smooth'], walk: ['band to trousers'],
+    mistakes: ['The lower edge is lengthened too', 'The waist itself was too small'],
+  }),
+  correction({
+    id: 'let-out-back-inseam', name: 'Let out the back inseam at the top', group: 'thigh', description: 'Let out the back inseam over its top 250 to 300 mm, point kept.',
+    amounts: [3, 5, 10, 16], basis: 'edge', edges: 1, level: 'thigh', vector: [['back-thigh', 1]], stage: 1, seam: 'girth', neverWith: ['extend-back-point', 'shorten-back-point'], pieces: ['back'], operators: ['let-out-taper'],
+    keep: ['the point', 'the front inseam', 'knee'], true: ['the run of the inseam'], walk: ['the inseam keeps its drafted ease'], mistakes: ['The point itself was short', 'Let out to the knee'], sided: true,
   }),
 ]; // prettier-ignore

@@ -8,7 +8,7 @@ import { STRENGTHS } from '@/diagnosis/inference/strengths';
 
 describe('calibration by simulation (it tests the code, not the knowledge)', { timeout: 120_000 }, () => {
   it.each([1, 2, 3])('ranks are uniform and probabilities come true, seed %d', (seed) => {
-    const result = calibrate(trousers, STRENGTHS, seed, 160);
+    const result = calibrate(trousers, STRENGTHS, seed, 1_000);
     expect(result.predictions).toBeGreaterThanOrEqual(10_000);
     expect(result.leastP).toBeGreaterThan(0.0004);
     expect(result.calibrationError).toBeLessThanOrEqual(0.03);

@@ -1,6 +1,8 @@
 import { z } from 'zod';
 import { changeEditSchema } from '@/components/round/round-schema';
 import { dropChange, updateChange } from '@/db/queries/changes';
+import { findPlanned } from '@/db/queries/stop-marks';
+import { refusePastStop } from '@/lib/request/past-stop';
 import { readAmount } from '@/lib/request/read-amount';
 import { route } from '@/lib/request/route';
 import { orNotFound, unwrap } from '@/lib/request/written';
@@ -12,6 +14,10 @@ export const PATCH = route(
   async ({ viewer, params, body: { version, planned, made, ...edit } }) => {
     const plan = planned ? readAmount(planned, 'planned') : null;
     const real = made ? readAmount(made, 'made') : null;
+    const now = orNotFound(await findPlanned(viewer, params.changeId));
+    const { reason = now.reason } = edit;
+    if (plan || edit.reason !== undefined)
+      await refusePastStop(viewer, { ...now, reason, plannedMm: plan?.mm ?? now.plannedMm });
     return unwrap(
       await updateChange(viewer, params.changeId, version, {
         ...edit,

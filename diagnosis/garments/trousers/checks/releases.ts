@@ -1,0 +1,24 @@
+import type { Check } from '../../schema';
+import { causeLink, check, link } from '../build';
+
+/** Tests that open a seam: off the body, bridged, on again (TF053; fitter’s reference 1.23). */
+export const releases: Check[] = [
+  check({ id: 'open-inseam-top', name: 'Open the top of the inseam', question: 'With the top 80 mm (3 in) of the inseam open and bridged, how wide does it gape?', how: 'Tack a strip of cloth across before you put it on again.', effort: 'release', amount: 'gap', amountTo: ['back-extension', 'more'],
+    outcomes: [['gapes', 'It gapes', link('back-extension', 'more', 'defining'), link('front-extension', 'more', 'usual')], ['closed', 'It stays closed']] }),
+  check({ id: 'open-side-at-hip', name: 'Open the side at the hip', question: 'With the side open 100 mm (4 in) over the hip and bridged, does the fold under the band slide flat?', how: 'Tack a strip of cloth across before you put it on again.', effort: 'release',
+    outcomes: [['flat', 'It slides flat', link('hip-back', 'more', 'defining', 'trousers:TF004')], ['stays', 'It stays']], sources: ['trousers:TF004'] }),
+  check({ id: 'open-side-waist', name: 'Open the side at the waist', question: 'Undo the closure and open 30 mm (1 1/4 in) of the side waist: does the fork drop?', how: 'Tack a strip of cloth across before you put it on again.', effort: 'release',
+    outcomes: [['drops', 'It drops', link('waist-front', 'more', 'strong', 'trousers:TF027'), link('waist-back', 'more', 'strong', 'trousers:TF027')], ['stays', 'It stays']], sources: ['trousers:TF027'] }),
+  check({ id: 'inside-out', name: 'Wear it inside out', question: 'Turn the muslin inside out and wear it again. Does the one-sided fold change side?', how: 'For a muslin without a fly.', effort: 'release',
+    outcomes: [['changes-side', 'It changes side', causeLink('not-sewn-as-planned', 'strong')], ['stays', 'It stays on the same side of the body']] }),
+  check({ id: 'open-front-inseam-top', name: 'Open the front at the inseam', question: 'With the top 80 mm (3 in) of the inseam open and bridged, how far does the front edge draw away from the back one?', how: 'Tack a strip of cloth across before you put it on again; measure in front of the fork.', effort: 'release', amount: 'gap', amountTo: ['front-extension', 'more'],
+    outcomes: [['draws-away', 'The front draws away', link('front-extension', 'more', 'defining', 'trousers:TF053')], ['stays', 'It stays']], sources: ['trousers:TF053'] }),
+  check({ id: 'open-across-back', name: 'Open across the back', question: 'With a level slit from the centre back toward the side, under the band and bridged, how wide does it gape at the centre back in sitting?', how: 'Tack a strip of cloth across before you put it on again; sit, then measure at the centre back.', effort: 'release', secondPerson: true, amount: 'gap', amountTo: ['back-rise', 'more'],
+    outcomes: [['gapes', 'It gapes', link('back-rise', 'more', 'defining', 'trousers:TF053', 'trousers:TF054')], ['closed', 'It stays closed']], sources: ['trousers:TF053', 'trousers:TF054'] }),
+  check({ id: 'open-across-front', name: 'Open across the front', question: 'With a level slit from the centre front toward the side, below the band and bridged, how wide does it gape at the centre front?', how: 'Tack a strip of cloth across before you put it on again; stand, then measure at the centre front.', effort: 'release', amount: 'gap', amountTo: ['front-rise', 'more'],
+    outcomes: [['gapes', 'It gapes', link('front-rise', 'more', 'defining', 'trousers:TF053', 'trousers:TF054')], ['closed', 'It stays closed']], sources: ['trousers:TF053', 'trousers:TF054'] }),
+  check({ id: 'open-side-of-leg', name: 'Open the side of the leg', question: 'With this side seam open over the thigh and bridged, does the fork rise to its place?', how: 'From 50 mm (2 in) below the hip to above the knee; tack a strip of cloth across before you put it on again.', effort: 'release',
+    outcomes: [['rises', 'It rises, and the slit gapes', link('front-thigh', 'more', 'defining', 'trousers:TF036', 'trousers:TC040'), link('back-thigh', 'more', 'defining', 'trousers:TF036', 'trousers:TC040')], ['stays-low', 'It stays low', link('crotch-depth', 'less', 'strong')]], sources: ['trousers:TF036'] }),
+  check({ id: 'open-centre-back-seam', name: 'Open the centre back seam', question: 'With the centre back seam open from the waist to the hip and bridged, how wide does it gape at the hip?', how: 'Tack a strip of cloth across before you put it on again; measure level with the fullest place.', effort: 'release', secondPerson: true, amount: 'gap', amountTo: ['hip-back', 'more'],
+    outcomes: [['at-the-hip', 'It gapes at the hip', link('hip-back', 'more', 'defining', 'trousers:TF047')], ['at-the-waist', 'Only at the waist', link('waist-back', 'more', 'strong', 'trousers:TF047')], ['closed', 'It stays closed']], sources: ['trousers:TF047'] }),
+]; // prettier-ignore

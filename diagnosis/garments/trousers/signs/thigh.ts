@@ -1,0 +1,90 @@
+import type { Sign } from '../../schema';
+import { causeLink, link, sign } from '../build';
+import { mark, SLANTING, UPRIGHT } from '../templates';
+import { BACK_AND_SIDES, FRONT_AND_SIDES, STANDING } from './shared';
+
+/** The leg from fork to knee. */
+export const thighSigns: Sign[] = [
+  sign({
+    id: 'tight-lines-front-thigh',
+    name: 'Tight lines over the front thigh',
+    description: 'Level or slanting taut lines lie over the thigh; 10 mm (3/8 in) cannot be pinched.',
+    group: 'thigh', tension: 'tight', zone: 'thigh-front', views: FRONT_AND_SIDES, sided: true,
+    links: [link('front-thigh', 'more', 'strong', 'trousers:TC024', 'trousers:TF042'), link('front-extension', 'more', 'sometimes', 'trousers:TC050'), link('leg-centre', 'less', 'rare', 'trousers:TF042'), link('crotch-depth', 'more', 'rare', 'trousers:TC050'), causeLink('stretch-the-wrong-way', 'sometimes', 'trousers:TC087')],
+    synonyms: ['tight thighs', 'thigh lines', 'quads too big', 'strains over the thigh muscle', 'horizontal lines on the thigh', 'thighs too tight'],
+    template: mark('tight', { from: 45, to: 135 }, ['thigh-front', 'side-seam', 'inner-thigh'], { anchor: 'thigh', length: [0.2, 0.9] }),
+  }),
+  sign({
+    id: 'tight-lines-back-thigh',
+    name: 'Tight lines over the back thigh',
+    description: 'Taut lines run round the back of the thigh below the seat.',
+    group: 'thigh', tension: 'tight', zone: 'thigh-back', views: BACK_AND_SIDES, sided: true,
+    links: [link('back-thigh', 'more', 'strong', 'trousers:TC050'), link('back-extension', 'more', 'usual'), causeLink('stretch-the-wrong-way', 'sometimes', 'trousers:TC087')],
+    synonyms: ['tight behind the thigh', 'hamstring tight', 'back of the leg tight', 'horizontal pulls on the back thigh'],
+    template: mark('tight', { from: 45, to: 135 }, ['thigh-back', 'under-seat', 'inner-thigh'], { anchor: 'thigh', length: [0.2, 0.9] }),
+  }),
+  sign({
+    id: 'thigh-tight-when-sitting',
+    name: 'The thigh is tight when you sit',
+    description: 'Sitting, the cloth strains over the top of the thigh and the hem is drawn up.',
+    group: 'sitting', tension: 'tight', zone: 'thigh-front', views: ['seated'],
+    links: [link('front-thigh', 'more', 'strong'), link('back-thigh', 'more', 'usual'), link('knee-girth', 'more', 'sometimes'), link('crotch-depth', 'more', 'rare')],
+    synonyms: ['thighs tight when seated', 'pulls over my thighs sitting down', 'legs tight when I sit', 'cloth stretched on my lap'],
+    template: mark('tight', null, ['thigh-front', 'thigh-back', 'side-seam'], { anchor: 'lap' }),
+  }),
+  sign({
+    id: 'vertical-slack-front-thigh',
+    name: 'Loose upright folds on the front thigh',
+    description: 'Folds stand upright on the front of the thigh and can be pinched.',
+    group: 'thigh', tension: 'slack', zone: 'thigh-front', views: FRONT_AND_SIDES, sided: true,
+    links: [link('front-thigh', 'less', 'strong', 'trousers:TC024', 'trousers:TF002'), link('hip-front', 'less', 'sometimes'), link('front-extension', 'less', 'rare')],
+    synonyms: ['baggy thighs', 'thighs too wide', 'long vertical creases on the thigh', 'loose front of thigh', 'too much room in the thigh'],
+    template: mark(['slack', 'pooling'], UPRIGHT, ['thigh-front', 'inner-thigh'], { anchor: 'thigh', length: [0.3, 1.6] }),
+  }),
+  sign({
+    id: 'vertical-slack-back-thigh',
+    name: 'Loose upright folds down the back thigh',
+    description: 'Folds stand upright on the back of the thigh and can be pinched.',
+    group: 'thigh', tension: 'slack', zone: 'thigh-back', views: BACK_AND_SIDES, sided: true,
+    links: [link('back-thigh', 'less', 'strong', 'trousers:TF012'), link('back-extension', 'less', 'usual'), link('hip-back', 'less', 'sometimes')],
+    synonyms: ['too much fabric on the back of my leg', 'loose back thigh', 'vertical folds on the back leg', 'baggy back thighs'],
+    template: mark(['slack', 'pooling'], UPRIGHT, ['thigh-back', 'under-seat'], { anchor: 'thigh', length: [0.3, 1.6] }),
+  }),
+  sign({
+    id: 'level-folds-down-back-leg',
+    name: 'Level or slanting folds down the back leg',
+    description: 'Several soft folds lie across the back of the leg between seat and knee, the fork being calm.',
+    group: 'thigh', tension: 'slack', zone: 'thigh-back', views: BACK_AND_SIDES, leak: 'high', fullLength: true,
+    links: [link('under-seat-length', 'less', 'usual', 'trousers:TC059'), link('back-slope', 'less', 'usual', 'trousers:TC010'), link('calf-girth', 'more', 'usual', 'trousers:TF032'), link('back-leg-length', 'less', 'usual'), link('crotch-depth', 'less', 'sometimes', 'trousers:TC022'), causeLink('stance', 'usual', 'trousers:TC070', 'trousers:TC048'), causeLink('lining-or-cling', 'sometimes', 'trousers:TC029'), causeLink('cloth-grown', 'sometimes', 'trousers:TC054')],
+    lookAlikes: [['folds-behind-knee', 'Those lie at the knee only.'], ['slack-under-seat', 'Those lie close below the seat.']],
+    synonyms: ['folds all down the back of my legs', 'many wrinkles on the back leg', 'wrinkles down the hamstring', 'back of the legs looks messy', 'accordion folds on the back leg', 'diagonal folds behind the leg'],
+    template: mark(['slack', 'pooling'], { from: 40, to: 140 }, ['thigh-back', 'under-seat', 'behind-knee'], { length: [0.2, 1] }),
+  }),
+  sign({
+    id: 'taut-lines-from-seat-to-calf',
+    name: 'Taut lines from the seat down to the calf',
+    description: 'Slanting taut lines run behind the leg from seat to knee or calf; the leg cannot follow the curve of the body.',
+    group: 'calf', tension: 'tight', zone: 'thigh-back', views: BACK_AND_SIDES, fullLength: true,
+    links: [link('calf-girth', 'more', 'strong', 'trousers:TC059'), link('under-seat-length', 'less', 'usual', 'trousers:TC059'), link('knee-girth', 'more', 'sometimes'), link('back-leg-length', 'less', 'sometimes', 'trousers:TC059')],
+    synonyms: ['pulls from my seat to my calf', 'long drag lines behind the leg', 'back leg pulled tight to the calf', 'diagonal tension on the back of the leg'],
+    template: mark('tight', SLANTING, ['thigh-back', 'behind-knee', 'calf'], { target: 'calf', length: [0.5, 2] }),
+  }),
+  sign({
+    id: 'loose-below-full-thigh',
+    name: 'Spare cloth below the fullest thigh',
+    description: 'At the side, below the fullest place of the thigh, a soft bag of cloth stands off above the knee.',
+    group: 'thigh', tension: 'slack', zone: 'side-seam', views: STANDING, sided: true,
+    links: [link('front-thigh', 'less', 'usual', 'trousers:TC052'), link('back-thigh', 'less', 'usual', 'trousers:TC052'), link('knee-girth', 'less', 'sometimes', 'trousers:TC052')],
+    synonyms: ['saddlebag shape in the cloth', 'spare volume under the thigh', 'side of the leg sticks out above the knee', 'bulge at the outer leg below the hip', 'leg stays wide too far down'],
+    template: mark(['slack', 'pooling', 'gap'], UPRIGHT, ['side-seam', 'thigh-front', 'knee', 'thigh-back'], { anchor: 'thigh', target: 'knee', length: [0.2, 1] }),
+  }),
+  sign({
+    id: 'leg-loose-all-round',
+    name: 'The leg is loose all round',
+    description: 'From fork to hem the leg hangs wide, with upright folds on every side.',
+    group: 'thigh', tension: 'slack', zone: 'knee', views: STANDING,
+    links: [link('front-thigh', 'less', 'usual', 'trousers:TC084', 'trousers:TC089'), link('back-thigh', 'less', 'usual', 'trousers:TC084', 'trousers:TC089'), link('knee-girth', 'less', 'usual', 'trousers:TC090'), link('calf-girth', 'less', 'sometimes'), causeLink('cloth-grown', 'sometimes')],
+    synonyms: ['legs too wide', 'huge in the leg', 'leg is baggy', 'swimming in the legs', 'legs too big all over'],
+    template: mark(['slack', 'pooling'], UPRIGHT, ['knee', 'thigh-front', 'thigh-back', 'lower-leg', 'side-seam'], { target: 'hem', length: [1, 3.5] }),
+  }),
+]; // prettier-ignore
