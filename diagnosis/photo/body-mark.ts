@@ -35,10 +35,12 @@ export type BodyMark = {
   readonly path: readonly FigurePoint[];
   readonly length: number;
   /**
-   * 0–180 from plumb: 0 upright, 90 level, 45 going down and out toward the side seam (on the seam itself, seen from the
-   * side: down and forward), 135 the other way. Null for a pin.
+   * 0–180 from plumb: 0 upright, 90 level. Front and back: 45 goes down and out toward the side seam, 135 down and in. From
+   * the side and seated: 45 goes down and back, 135 down and forward. Null for a pin.
    */
   readonly angleDeg: number | null;
+  /** The same with 45 going down toward the side seam in every view: how a line seen from behind lies from the side. */
+  readonly seamwardDeg: number | null;
   /** Zones that the line lies in, by their share of it (0–1), greatest first; empty off the garment. */
   readonly zones: readonly { readonly zone: Zone; readonly share: number }[];
   /** How close each sample lies to each zone of the view: 1 within, falling over about 0.07 of the crotch depth. */
@@ -92,13 +94,16 @@ export function axisOf(path: readonly FigurePoint[]): { x: number; y: number } {
   return axis.y < 0 ? { x: -axis.x, y: -axis.y } : axis;
 }
 
-/** +1 where growing x leads toward the side seam from this place; on the seam, seen from the side, toward the front. */
-function outward(figure: ReadFigure, middle: FigurePoint, zone: Zone | undefined): 1 | -1 {
-  const { view } = figure;
-  if (view === 'front' || view === 'back') return middle.x < 0 ? -1 : 1;
-  if (zone !== undefined && SEAM_ZONES.has(zone)) return 1;
+const isStanding = (view: FigureView) => view === 'front' || view === 'back';
+
+/** +1 where growing x leads toward the side seam from this place; on the seam itself, seen from the side, toward the back. */
+function seamward(figure: ReadFigure, middle: FigurePoint, zone: Zone | undefined): 1 | -1 {
+  if (isStanding(figure.view)) return middle.x < 0 ? -1 : 1;
+  if (zone !== undefined && SEAM_ZONES.has(zone)) return -1;
   return middle.x < seamX(figure, middle.y) ? 1 : -1;
 }
+
+const toHalfTurn = (x: number, y: number) => ((Math.atan2(x, y) * 180) / Math.PI + 180) % 180;
 
 function sideOf(mark: DrawnMark, view: FigureView, middle: FigurePoint): Side | null {
   if (mark.side !== 'both') return mark.side;
@@ -140,7 +145,8 @@ export function bodyMark(figure: ReadFigure, placement: FigurePlacement, mark: D
   const closeness = closenessOf(figure, path);
   const zones = zonesOf(closeness);
   const axis = axisOf(path);
-  const lean = (Math.atan2(outward(figure, middle, zones[0]?.zone) * axis.x, axis.y) * 180) / Math.PI;
+  const toSeam = seamward(figure, middle, zones[0]?.zone);
+  const seamwardDeg = length > 0 ? toHalfTurn(toSeam * axis.x, axis.y) : null;
   return {
     id: mark.id,
     kind: mark.kind,
@@ -149,7 +155,8 @@ export function bodyMark(figure: ReadFigure, placement: FigurePlacement, mark: D
     side: sideOf(mark, figure.view, middle),
     path,
     length,
-    angleDeg: length > 0 ? (lean + 180) % 180 : null,
+    angleDeg: isStanding(figure.view) || length === 0 ? seamwardDeg : toHalfTurn(-axis.x, axis.y),
+    seamwardDeg,
     zones,
     closeness,
     ends: [nearest(figure, path[0]!), nearest(figure, path.at(-1)!)],

@@ -39,9 +39,6 @@ type InView = {
   readonly why: Reason[];
 };
 
-const bySide = (side: Side | 'both') => (mark: BodyMark) =>
-  side === 'both' || mark.side === null || mark.side === side;
-
 function meetingReason(figure: ReadFigure, marks: readonly BodyMark[], template: Template): Reason | null {
   if (marks.length < 2) return null;
   const meeting = meetingOf(marks);
@@ -71,47 +68,51 @@ function readView(figure: ReadFigure, marks: readonly BodyMark[], sign: Sign, te
   return { view: figure.view, score: sum + (meeting ? MEETING_GAIN : 0), support, why };
 }
 
-function offerOf(
-  figures: readonly ReadFigure[],
-  marks: readonly BodyMark[],
-  sign: Sign,
-  side: Side | 'both',
-): Offer | null {
-  const template = sign.template;
+type Read = { readonly sign: Sign; readonly score: number; readonly views: readonly InView[] };
+
+/** One sign over all marks of all views. A sided sign is read over both legs, so that it neither gains nor loses by having sides. */
+function readSign(figures: readonly ReadFigure[], marks: readonly BodyMark[], sign: Sign): Read | null {
+  const { template } = sign;
   if (template === null) return null;
-  const own = marks.filter(bySide(side));
   const views = figures
     .map((figure) =>
       readView(
         figure,
-        own.filter(({ view }) => view === figure.view),
+        marks.filter(({ view }) => view === figure.view),
         sign,
         template,
       ),
     )
     .filter(({ support }) => support.length > 0)
     .sort((a, b) => b.score - a.score);
-  const best = views[0];
-  if (!best) return null;
+  if (views.length === 0) return null;
   const others = views.slice(1).reduce((sum, { score }) => sum + Math.max(0, score), 0);
-  const support = views.flatMap((one) => one.support);
-  const seen = views.map(({ view }) => view);
+  return { sign, score: views[0]!.score + OTHER_VIEW_SHARE * others, views };
+}
+
+function offerOn({ sign, score, views }: Read, side: Side | 'both'): Offer {
+  const isOwn = ({ mark }: Supported) => side === 'both' || mark.side === null || mark.side === side;
+  const own = views.filter(({ support }) => support.some(isOwn));
+  const support = own.flatMap((one) => one.support).filter(isOwn);
+  const seen = own.map(({ view }) => view);
+  const why = own[0]!.why;
   return {
     sign: sign.id,
     side,
     markIds: support.map(({ mark }) => mark.id),
     views: seen,
     severity: Math.max(...support.map(({ mark }) => mark.severity)) as 1 | 2 | 3,
-    score: best.score + OTHER_VIEW_SHARE * others,
-    why: seen.length > 1 ? [...best.why, { kind: 'views', views: seen }] : best.why,
+    score,
+    why: seen.length > 1 ? [...why, { kind: 'views', views: seen }] : why,
   };
 }
 
-/** For a sided sign the sides that marks were drawn on; a mark on the centre line speaks for both. */
-function sidesOf(sign: Sign, marks: readonly BodyMark[]): (Side | 'both')[] {
-  if (!sign.sided) return ['both'];
-  const drawn = (['left', 'right'] as const).filter((side) => marks.some((mark) => mark.side === side));
-  return drawn.length > 0 ? [...drawn] : ['both'];
+/** One offer, or for a sided sign one on each leg that marks speak for; a mark on the centre line alone leaves it open. */
+function offersOf(read: Read): Offer[] {
+  if (!read.sign.sided) return [offerOn(read, 'both')];
+  const marks = read.views.flatMap(({ support }) => support.map(({ mark }) => mark));
+  const sides = (['left', 'right'] as const).filter((side) => marks.some((mark) => mark.side === side));
+  return sides.length > 0 ? sides.map((side) => offerOn(read, side)) : [offerOn(read, 'both')];
 }
 
 export type OfferOptions = {
@@ -137,12 +138,10 @@ export function offerSigns(
 ): Offer[] {
   const read = marks.filter(({ kind }) => kind !== 'pin');
   return signs
-    .flatMap((sign) => sidesOf(sign, read).map((side) => offerOf(figures, read, sign, side)))
-    .filter(
-      (offer) =>
-        offer !== null && offer.score > LEAST_SCORE && !refused.has(offerKey(offer.sign, offer.side)),
-    )
-    .map((offer) => offer!)
+    .map((sign) => readSign(figures, read, sign))
+    .filter((one) => one !== null && one.score > LEAST_SCORE)
+    .flatMap((one) => offersOf(one!))
+    .filter(({ sign, side }) => !refused.has(offerKey(sign, side)))
     .sort((a, b) => b.score - a.score || (a.sign < b.sign ? -1 : 1))
     .slice(0, most);
 }

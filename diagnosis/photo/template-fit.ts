@@ -2,7 +2,7 @@ import type { Landmark } from '../figure/garment';
 import type { FigurePoint } from '../figure/point';
 import type { Sign, Zone } from '../garments/schema';
 import type { BodyMark } from './body-mark';
-import type { ReadFigure } from './read-figure';
+import { distanceToStretch, type ReadFigure } from './read-figure';
 
 export type Template = NonNullable<Sign['template']>;
 
@@ -16,7 +16,7 @@ export type Reason =
   | { readonly kind: 'views'; readonly views: readonly string[] };
 
 export type Fit = {
-  /** How much likelier the mark is under the sign than as any line anywhere; 1 says nothing. */
+  /** How much likelier the mark is under the sign than as a stray line; 1 says nothing. */
   readonly odds: number;
   readonly reasons: readonly Reason[];
 };
@@ -26,26 +26,35 @@ export type Fit = {
  * a sixth of their length and 15 mm.
  */
 const ANGLE_SD_DEG = 12;
-const PLACE_SD = 0.13;
+const PLACE_SD = 0.16;
 const HEADING_SD_DEG = 14;
 const LENGTH_SD = 0.2;
+const LENGTH_LEAST = 0.05;
 /** What is left of the odds where one feature is off altogether: a person may call a thing by a near word, or draw half of it. */
-const LEAST = { zone: 0.02, angle: 0.05, length: 0.3, anchor: 0.25, target: 0.25, view: 0.3 };
+const LEAST = { kind: 0.002, zone: 0.02, angle: 0.05, length: 0.3, anchor: 0.4, target: 0.3, view: 0.1 };
 /** Area that a zone's edge is uncertain by, as a share of the garment. */
 const EDGE_SHARE = 0.03;
+const OWN_ZONE_SHARE = 0.4;
+/** A sign of place is told by where an edge sits, not by a line: a line says it less well. */
+const PLACE_SIGN_SHARE = 0.6;
 
 const bell = (miss: number, sd: number) => Math.exp(-((miss / sd) ** 2) / 2);
 const blend = (least: number, ratio: number) => least + (1 - least) * ratio;
 
-/** How alike two kinds of mark are to the eye. */
+/** Kinds a person may take for one another, and how much of the odds is left then. */
+const NEAR_KINDS: Readonly<Record<string, number>> = {
+  'pooling slack': 0.5,
+  'gap slack': 0.15,
+  'gap pooling': 0.15,
+};
+const KINDS_READ = 5;
+
+/** A sign that may look like three kinds of mark says less by one of them than a sign that has only that one. */
 function kindOdds(kind: BodyMark['kind'], kinds: Template['kinds']): number {
-  const odds = kinds.map((wanted) => {
-    if (wanted === kind) return 3;
-    const pair = [wanted, kind].sort().join(' ');
-    if (pair === 'pooling slack') return 1.5;
-    return pair === 'gap slack' || pair === 'gap pooling' ? 0.5 : 0.08;
-  });
-  return Math.max(...odds);
+  const alike = kinds.map((wanted) =>
+    wanted === kind ? 1 : (NEAR_KINDS[[wanted, kind].sort().join(' ')] ?? LEAST.kind),
+  );
+  return (Math.max(...alike) * KINDS_READ) / kinds.length ** 0.8;
 }
 
 /** Degrees between an angle and a range, both modulo 180; 0 within it. `to` below `from` runs over plumb. */
@@ -60,13 +69,21 @@ function angleWidth({ from, to }: { from: number; to: number }): number {
   return to >= from ? Math.min(180, to - from) : (((to - from) % 180) + 180) % 180;
 }
 
-function zoneOdds(figure: ReadFigure, mark: BodyMark, zones: Template['zones']): number {
+/** Share (0–1) of the line that lies in any of the zones, their edges blurred, over what chance would put there. */
+function placeOdds(figure: ReadFigure, mark: BodyMark, zones: Template['zones']): number | null {
   const rows = zones.map((zone) => mark.closeness.get(zone)).filter((row) => row !== undefined);
-  if (rows.length === 0) return LEAST.zone;
+  if (rows.length === 0) return null;
   const within =
     mark.path.reduce((sum, _, i) => sum + Math.max(...rows.map((row) => row[i]!)), 0) / mark.path.length;
   const area = zones.reduce((sum, zone) => sum + (figure.areaShares.get(zone) ?? 0), 0) + EDGE_SHARE;
-  return blend(LEAST.zone, within ** 1.5 / Math.min(1, area));
+  return within ** 1.5 / Math.min(1, area);
+}
+
+/** The template's zones say where the line may run, the sign's own zone where it belongs. */
+function zoneOdds(figure: ReadFigure, mark: BodyMark, sign: Sign, template: Template): number {
+  const may = placeOdds(figure, mark, template.zones) ?? 0;
+  const belongs = placeOdds(figure, mark, [sign.zone]) ?? may;
+  return blend(LEAST.zone, (1 - OWN_ZONE_SHARE) * may + OWN_ZONE_SHARE * belongs);
 }
 
 function angleOdds(angleDeg: number | null, range: Template['angleDeg']): number {
@@ -75,18 +92,36 @@ function angleOdds(angleDeg: number | null, range: Template['angleDeg']): number
   return blend(LEAST.angle, (bell(angleMiss(angleDeg, range), ANGLE_SD_DEG) * 180) / Math.max(spread, 1));
 }
 
+/** Lengths that are drawn at all run over a factor of about thirty; a range is the narrower the more it says. */
+const LENGTHS_LOG = 3.4;
+
 function lengthOdds(length: number, range: Template['lengthRatio']): number {
   if (range === null || length <= 0) return 1;
-  const [from, to] = [Math.log(Math.max(range.from, 0.01)), Math.log(Math.max(range.to, 0.02))];
+  const [from, to] = [
+    Math.log(Math.max(range.from, LENGTH_LEAST)),
+    Math.log(Math.max(range.to, 2 * LENGTH_LEAST)),
+  ];
   const at = Math.log(length);
-  const miss = at < from ? from - at : at > to ? at - to : 0;
-  return blend(LEAST.length, 1.4 * bell(miss, LENGTH_SD));
+  const miss = Math.max(0, from - at, at - to);
+  const spread = to - from + LENGTH_SD * Math.sqrt(2 * Math.PI);
+  return blend(LEAST.length, (bell(miss, LENGTH_SD) * LENGTHS_LOG) / Math.max(spread, 1));
 }
 
-/** The landmarks of a name that a mark of one side may mean. */
+/** The same place under the name that another view has for it. */
+const OTHER_NAMES: Readonly<Record<string, readonly string[]>> = {
+  'waist-front': ['waist-centre'],
+  'waist-back': ['waist-centre'],
+  'waist-centre': ['waist-front', 'waist-back'],
+  knee: ['behind-knee'],
+  'behind-knee': ['knee'],
+};
+
+/** The landmarks of a name that a mark of one side may mean, in the names of this view. */
 export function landmarksFor(figure: ReadFigure, name: string, side: BodyMark['side']): Landmark[] {
+  const isShown = figure.landmarks.some((one) => one.name === name);
+  const names = isShown ? [name] : (OTHER_NAMES[name] ?? []);
   return figure.landmarks.filter(
-    (one) => one.name === name && (side === null || one.side === null || one.side === side),
+    (one) => names.includes(one.name) && (side === null || one.side === null || one.side === side),
   );
 }
 
@@ -98,6 +133,12 @@ function headingMiss(from: FigurePoint, to: FigurePoint, place: FigurePoint): nu
   return Math.abs((Math.atan2(ax * by - ay * bx, ax * bx + ay * by) * 180) / Math.PI);
 }
 
+const distanceToPath = (path: readonly FigurePoint[], at: FigurePoint) =>
+  Math.min(...path.slice(1).map((point, i) => distanceToStretch(at, path[i]!, point)));
+
+const ALONG_SHARE = 0.8;
+const HEADING_SHARE = 0.35;
+
 type EndFit = { readonly anchor: number; readonly target: number };
 
 /** How well one way round of the line starts at the anchor and heads for, or reaches, the target; 0–1 each. */
@@ -105,19 +146,23 @@ function endFit(figure: ReadFigure, mark: BodyMark, template: Template, isTurned
   const [from, to] = isTurned ? [mark.path.at(-1)!, mark.path[0]!] : [mark.path[0]!, mark.path.at(-1)!];
   const best = (name: string | null, fit: (at: FigurePoint) => number) =>
     name === null ? 0 : Math.max(0, ...landmarksFor(figure, name, mark.side).map(({ at }) => fit(at)));
+  const heading = (at: FigurePoint) =>
+    away(from, at) > 0.2 ? bell(headingMiss(from, to, at), HEADING_SD_DEG) : 0;
   return {
-    anchor: best(template.anchor, (at) => bell(away(from, at), PLACE_SD)),
-    target: best(template.target, (at) =>
+    // Some lines pass over their landmark, some would come from it if they were longer: both count, for less.
+    anchor: best(template.anchor, (at) =>
       Math.max(
-        bell(away(to, at), PLACE_SD),
-        away(from, at) > 0.2 ? bell(headingMiss(from, to, at), HEADING_SD_DEG) : 0,
+        bell(away(from, at), PLACE_SD),
+        ALONG_SHARE * bell(distanceToPath(mark.path, at), PLACE_SD),
+        HEADING_SHARE * heading(at),
       ),
     ),
+    target: best(template.target, (at) => Math.max(bell(away(to, at), PLACE_SD), heading(at))),
   };
 }
 
 /** Odds of a place that was hit, against the chance of hitting it: a landmark is a small thing, a heading a wide one. */
-const ANCHOR_GAIN = 3;
+const ANCHOR_GAIN = 2.2;
 const TARGET_GAIN = 2.2;
 
 function endOdds(figure: ReadFigure, mark: BodyMark, template: Template): EndFit & { odds: number } {
@@ -132,13 +177,27 @@ function endOdds(figure: ReadFigure, mark: BodyMark, template: Template): EndFit
   return straight!.odds >= turned!.odds ? straight! : turned!;
 }
 
+/** A sign of sitting is not read from a standing photo, nor the other way; beside its own views a sign may still show a little. */
+function viewOdds(figure: ReadFigure, sign: Sign): number {
+  if (sign.views.includes(figure.view)) return 1;
+  const isOtherPose = figure.view === 'seated' || sign.views.every((view) => view === 'seated');
+  return isOtherPose ? 0 : LEAST.view;
+}
+
+/** A sign that is also seen from front or back says its direction toward the side seam; one seen from the side alone, toward the back. */
+function directionFor(mark: BodyMark, sign: Sign): number | null {
+  const isStandingSign = sign.views.some((view) => view === 'front' || view === 'back');
+  return isStandingSign ? mark.seamwardDeg : mark.angleDeg;
+}
+
 /** How well one mark fits a sign's template in the view it was drawn on, and what speaks for it. */
 export function fitTemplate(figure: ReadFigure, mark: BodyMark, sign: Sign, template: Template): Fit {
-  const kind = kindOdds(mark.kind, template.kinds);
-  const zone = zoneOdds(figure, mark, template.zones);
-  const angle = angleOdds(mark.angleDeg, template.angleDeg);
+  const kind = kindOdds(mark.kind, template.kinds) * (sign.tension === 'place' ? PLACE_SIGN_SHARE : 1);
+  const zone = zoneOdds(figure, mark, sign, template);
+  const angleDeg = directionFor(mark, sign);
+  const angle = angleOdds(angleDeg, template.angleDeg);
   const ends = endOdds(figure, mark, template);
-  const view = sign.views.includes(figure.view) ? 1 : LEAST.view;
+  const view = viewOdds(figure, sign);
   const reasons: Reason[] = [];
   const within = mark.zones.find((one) => template.zones.includes(one.zone));
   if (within) reasons.push({ kind: 'zone', zone: within.zone });
