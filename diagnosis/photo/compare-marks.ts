@@ -94,3 +94,18 @@ export function compareMarks(
     });
   return [...fates, ...come];
 }
+
+/**
+ * Whether something tight of a later round lies where a slack mark of the earlier one lay: while it is there nobody can see
+ * whether the spare cloth has gone.
+ */
+export function hiddenByTight(after: readonly BodyMark[]): (mark: BodyMark) => boolean {
+  const tight = after.filter(({ kind, severity }) => kind === 'tight' && severity >= 2);
+  return (mark) =>
+    (mark.kind === 'slack' || mark.kind === 'pooling') &&
+    tight.some(
+      (one) =>
+        one.view === mark.view &&
+        one.zones.some(({ zone }) => mark.zones.some((other) => other.zone === zone)),
+    );
+}

@@ -1,6 +1,7 @@
 import { randomUUID } from 'node:crypto';
 import { beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import { findLandmarks, saveLandmarks, type LandmarksSave } from '@/db/queries/landmarks';
+import { listMarkedPhotos } from '@/db/queries/marked-photos';
 import type { Viewer } from '@/db/queries/viewer';
 import { databaseOfFile } from '../../support/database';
 import { makeRound, makeViewer } from '../../support/people';
@@ -71,5 +72,12 @@ describe('where the figure lies on a photo', () => {
     expect(await saveLandmarks(reader, photoId, sent({ seen: 1, landmarks: [] }))).toEqual({ kind: 'missing' }); // prettier-ignore
     expect(await findLandmarks(stranger, photoId)).toBeNull();
     expect(await saveLandmarks(stranger, photoId, sent())).toEqual({ kind: 'missing' });
+  });
+
+  it('comes with the photos that are laid side by side', async () => {
+    await saveLandmarks(owner, photoId, sent());
+    const listed = await listMarkedPhotos(reader, [roundId]);
+    expect(listed.find(({ id }) => id === photoId)).toMatchObject({ landmarks: [FORK, WAIST], marks: [] });
+    expect(await listMarkedPhotos(stranger, [roundId])).toEqual([]);
   });
 });

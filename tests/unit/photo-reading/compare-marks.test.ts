@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import type { FigureView } from '@/diagnosis/figure/figure';
 import type { BodyMark } from '@/diagnosis/photo/body-mark';
-import { compareMarks, type CompareContext } from '@/diagnosis/photo/compare-marks';
+import { compareMarks, hiddenByTight, type CompareContext } from '@/diagnosis/photo/compare-marks';
 import { drawnOver } from './placed';
 
 const FRONT_AND_BACK: CompareContext = {
@@ -55,5 +55,13 @@ describe('marks of two rounds on the body', () => {
     const lower = mark({ id: 'b' }, LINE.map(([x, y]) => [x, y + 0.1])); // prettier-ignore
     const compared = compareMarks([mark({ id: 'a' }), lower], [{ ...lower, id: 'B' }, mark({ id: 'A' })], FRONT_AND_BACK); // prettier-ignore
     expect(compared.map(({ before, after }) => [before?.id, after?.id])).toEqual([['a', 'A'], ['b', 'B']]); // prettier-ignore
+  });
+
+  it('calls slack hidden where something tight lies now, in the same place only', () => {
+    const slack = mark({ kind: 'slack' });
+    const elsewhere = mark({}, [[0.3, 2], [0.4, 2.2]]); // prettier-ignore
+    expect(states([slack], [mark()], { isHidden: hiddenByTight([mark()]) })).toEqual(['hidden', 'new']);
+    expect(states([slack], [elsewhere], { isHidden: hiddenByTight([elsewhere]) })).toEqual(['gone', 'new']);
+    expect(hiddenByTight([mark({ severity: 1 })])(slack)).toBe(false);
   });
 });
