@@ -56,6 +56,11 @@ export function RoundDesk({ desk, number, photos, userId, unit }: Props) {
           isOwner={desk.isOwner}
           view={view}
           onView={setView}
+          reading={
+            knowledge
+              ? { knowledge, cut: round.cut, state: evidence.state, onEdit: evidence.edit }
+              : undefined
+          }
         />
         <Section title="What shows" id="shows">
           <SaveLine state={evidence.saveState} />

@@ -116,6 +116,12 @@ const PHOTOS = [
     access: fitters,
     body: () => ({ revision: 1, upserts: [], deletes: [] }),
   }),
+  handler('GET', 'photos/[photoId]/landmarks', { path: ({ photoId }) => `/api/photos/${photoId}/landmarks`, access: readers }),
+  handler('PUT', 'photos/[photoId]/landmarks', {
+    path: ({ photoId }) => `/api/photos/${photoId}/landmarks`,
+    access: fitters,
+    body: () => ({ revision: 1, seen: 0, landmarks: [] }),
+  }),
 ]; // prettier-ignore
 
 const NOWHERE = (['GET', 'POST', 'PUT', 'PATCH', 'DELETE'] as const).map((method) =>
