@@ -3,10 +3,11 @@ import type { Knowledge } from '../garments/schema';
 import { measureOf, type MeasureId, type WaistPlace } from '../measuring/measures';
 import { sumOf, type SumTerm } from './sums';
 
-/** A measure of the body with its error, mm. */
+/** A measure of the body with its error, mm, and the waist that the string was tied at. */
 export interface BodyLength {
   meanMm: number;
   sdMm: number;
+  waist: WaistPlace;
 }
 
 /** What the pattern says at the size that is cut there, mm: the body it is for, and itself between seamlines. */
@@ -18,7 +19,6 @@ export interface PatternLength {
 export interface FlatCheckInput {
   body: Readonly<Partial<Record<MeasureId, BodyLength>>>;
   pattern: Readonly<Partial<Record<MeasureId, PatternLength>>>;
-  bodyWaist: WaistPlace;
   /** Where the pattern's waist seam is meant to sit; null where nobody said. */
   patternWaist: WaistPlace | null;
   cloth: 'woven' | 'stretch-woven' | 'knit';
@@ -78,7 +78,7 @@ function whyNot(input: FlatCheckInput, measure: MeasureId): string | null {
   const { needsWaist } = measureOf(measure);
   if (needsWaist && input.patternWaist === null)
     return 'Say first where the waist of this pattern is to sit.';
-  if (needsWaist && input.patternWaist !== input.bodyWaist)
+  if (needsWaist && input.patternWaist !== input.body[measure]?.waist)
     return 'It was taken from another waist than the pattern’s: measure again from that string.';
   const { body } = input;
   return measure === 'crotch-length' && body['front-crotch-length'] && body['back-crotch-length']

@@ -10,6 +10,8 @@ export interface Suggestion {
   /** On one piece, edge … as `basis` says, mm. */
   amountMm: number;
   basis: Basis;
+  /** Own-basis millimetres per millimetre of another basis, as the correction has them. */
+  conversions: Partial<Record<Basis, number>>;
   /** The difference it meets, mm: times its effect it is the amount. */
   meetsMm: number;
 }
@@ -36,7 +38,7 @@ function suggestionOf(
 ): Measured | null {
   const correction = knowledge.corrections.find((one) => one.id === id);
   if (!correction?.amounts) return null;
-  const { basis, capRoundMm, capTotalMm, sizeLevel } = correction.amounts;
+  const { basis, conversions, capRoundMm, capTotalMm, sizeLevel } = correction.amounts;
   const weight = new Map(terms.map((term) => [term.dimension, term.weight]));
   const perMm = correction.vector.reduce(
     (sum, { dimension, perMm, coupling }) => sum + (coupling ? 0 : perMm * (weight.get(dimension) ?? 0)),
@@ -45,7 +47,14 @@ function suggestionOf(
   const wanted = (needMm * share * MET) / perMm;
   if (!(wanted > 0)) return null;
   const amountMm = Math.min(wanted, capRoundMm * factors[sizeLevel]);
-  const suggestion = { correction: id, name: correction.name, amountMm, basis, meetsMm: amountMm * perMm };
+  const suggestion = {
+    correction: id,
+    name: correction.name,
+    amountMm,
+    basis,
+    conversions,
+    meetsMm: amountMm * perMm,
+  };
   return { suggestion, isPastCap: wanted > capTotalMm * factors[sizeLevel] };
 }
 

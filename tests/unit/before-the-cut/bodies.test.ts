@@ -21,7 +21,7 @@ function checkOf(body: DrawnBody) {
   const placeOf = (measure: string) =>
     (choice.levels.find((level) => level.measure === measure)?.chosen ?? choice.proposals[0]!.base).ordinal;
   const lengths: FlatCheckInput['body'] = Object.fromEntries(
-    Object.entries(body).map(([id, mm]) => [id, combineTakes(id as MeasureId, [mm], false)]),
+    Object.entries(body).map(([id, mm]) => [id, { ...combineTakes(id as MeasureId, [mm], false), waist: 'navel' as const }]),
   );
   const pattern: FlatCheckInput['pattern'] = Object.fromEntries(
     Object.keys(body).map((id) => {
@@ -32,7 +32,7 @@ function checkOf(body: DrawnBody) {
       return [id, { bodyMm: at(bodyChart), garmentMm: at(finishedChart) }];
     }),
   );
-  const input: FlatCheckInput = { body: lengths, pattern, bodyWaist: 'navel', patternWaist: 'navel', cloth: 'woven' }; // prettier-ignore
+  const input: FlatCheckInput = { body: lengths, pattern, patternWaist: 'navel', cloth: 'woven' }; // prettier-ignore
   return { choice, ...flatCheck(trousers, input) };
 }
 

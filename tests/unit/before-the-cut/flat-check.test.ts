@@ -12,8 +12,8 @@ import { parseCase } from '@/diagnosis/case';
 import { knowledgeOf } from '@/diagnosis/garments/registry';
 
 const trousers = knowledgeOf('trousers');
-const input = (more: Partial<FlatCheckInput>): FlatCheckInput => ({ body: {}, pattern: {}, bodyWaist: 'navel', patternWaist: 'navel', cloth: 'woven', ...more }); // prettier-ignore
-const of = (mm: number, sdMm = 8) => ({ meanMm: mm, sdMm });
+const input = (more: Partial<FlatCheckInput>): FlatCheckInput => ({ body: {}, pattern: {}, patternWaist: 'navel', cloth: 'woven', ...more }); // prettier-ignore
+const of = (mm: number, sdMm = 8) => ({ meanMm: mm, sdMm, waist: 'navel' as const });
 const check = (more: Partial<FlatCheckInput>) => flatCheck(trousers, input(more));
 
 describe('body beside pattern', () => {
