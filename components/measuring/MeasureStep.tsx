@@ -7,7 +7,7 @@ import type { LengthUnit } from '@/diagnosis/units/parse-amount';
 import { TAKES_MAX } from '../wearers/measurement-schema';
 import { Keypad } from './Keypad';
 import { MeasureFigure } from './MeasureFigure';
-import type { SittingState } from './useSitting';
+import { type SittingState, STEP_ID } from './useSitting';
 
 interface Props {
   state: SittingState;
@@ -21,7 +21,7 @@ export function MeasureStep({ state, unit, last }: Props) {
   const { measure, takes, at, type } = state;
   const now = takes.at(-1) ?? '';
   return (
-    <Section title={measure.name}>
+    <Section title={measure.name} id={STEP_ID}>
       <MeasureFigure measure={measure} />
       <p className="max-w-prose">{measure.how}</p>
       {takes.map((typed, take) => (

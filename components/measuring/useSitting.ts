@@ -7,6 +7,9 @@ import { MEASURES, type MeasureId, type WaistPlace } from '@/diagnosis/measuring
 import type { LengthUnit } from '@/diagnosis/units/parse-amount';
 import { answerKey, keptTakes, openQuestions, type Sitting, unreadable, valuesOf } from './sitting';
 
+/** The address of the measure in hand on its page. */
+export const STEP_ID = 'step';
+
 export interface SittingHead {
   measuredOn: string;
   takenAlone: boolean;
@@ -31,12 +34,18 @@ export function useSitting(wearerId: string, unit: LengthUnit, start: SittingHea
   const type = (typed: string, take = takes.length - 1) =>
     write(measure.id, takes.map((one, i) => (i === take ? typed : one))); // prettier-ignore
 
+  const go = (to: number) => {
+    setAt(Math.max(0, Math.min(MEASURES.length - 1, to)));
+    // On a phone the list lies below the keys.
+    document.getElementById(STEP_ID)?.scrollIntoView();
+  };
+
   const save = async () => {
     const values = valuesOf(sitting);
     if (values.length === 0) return setProblem('Take at least one measure, then save.');
     const wrong = MEASURES.findIndex(({ id: one }) => unreadable(keptTakes(sitting[one]), unit) !== null);
     if (wrong >= 0) {
-      setAt(wrong);
+      go(wrong);
       return setProblem(unreadable(keptTakes(sitting[MEASURES[wrong]!.id]), unit));
     }
     setBusy(true);
@@ -49,7 +58,7 @@ export function useSitting(wearerId: string, unit: LengthUnit, start: SittingHea
 
   return {
     head, setHead, sitting, measure, takes, at, problem, isBusy, save, type,
-    go: (to: number) => setAt(Math.max(0, Math.min(MEASURES.length - 1, to))),
+    go,
     again: () => write(measure.id, [...takes, '']),
     questions: openQuestions(sitting, unit, head.waistPlace, answered),
     answer: (measureId: MeasureId) => setAnswered((all) => [...all, answerKey(measureId, sitting)]),

@@ -25,6 +25,10 @@ export type Advice =
 /** What is met on paper before the first muslin; the rest is the muslin's to show (fitting: two thirds of the estimate). */
 const MET = 2 / 3;
 
+/** Widths that are spare by less stay in the first muslin: surplus is taken out last, and cloth can be taken in (order of work). */
+const SPARE_LEFT_MM = 30;
+const WIDTHS: readonly string[] = ['waist', 'hip', 'thigh', 'knee', 'calf'];
+
 interface Measured {
   suggestion: Suggestion;
   isPastCap: boolean;
@@ -60,11 +64,13 @@ function suggestionOf(
 
 /**
  * What to do about a difference before the first muslin, and by how much. Within its error: nothing. Past what a draft can be
- * bent: another size, or another draft. A sum that cannot be divided is left open.
+ * bent: another size, or another draft. A sum that cannot be divided, and a little spare width, is left open.
  * @param body sizes caps and amounts
  */
 export function adviseOn(knowledge: Knowledge, difference: Difference, body: Body): Advice {
   if (difference.kind === 'within') return { kind: 'leave' };
+  if (WIDTHS.includes(difference.measure) && difference.needMm < 0 && difference.needMm > -SPARE_LEFT_MM)
+    return { kind: 'open', message: 'Leave it in: spare width is taken in once the muslin hangs.' };
   const remedies = REMEDIES[difference.measure]?.[difference.kind === 'short' ? 'more' : 'less'] ?? [];
   const factors = sizeFactors(body);
   const found = remedies.flatMap((remedy) => suggestionOf(knowledge, difference, remedy, factors) ?? []);

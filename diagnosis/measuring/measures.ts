@@ -64,9 +64,6 @@ const BY_ID = new Map<string, Measure>(MEASURES.map((measure) => [measure.id, me
 
 export const isMeasureId = (id: string): id is MeasureId => BY_ID.has(id);
 
-/** The measure of an id; null for one that is not (or no longer) known. */
-export const findMeasure = (id: string): Measure | null => BY_ID.get(id) ?? null;
-
 /** @throws RangeError never for a `MeasureId`: the list holds each. */
 export function measureOf(id: MeasureId): Measure {
   const found = BY_ID.get(id);

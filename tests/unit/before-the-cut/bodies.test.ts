@@ -21,7 +21,10 @@ function checkOf(body: DrawnBody) {
   const placeOf = (measure: string) =>
     (choice.levels.find((level) => level.measure === measure)?.chosen ?? choice.proposals[0]!.base).ordinal;
   const lengths: FlatCheckInput['body'] = Object.fromEntries(
-    Object.entries(body).map(([id, mm]) => [id, { ...combineTakes(id as MeasureId, [mm], false), waist: 'navel' as const }]),
+    Object.entries(body).map(([id, mm]) => [
+      id,
+      { ...combineTakes(id as MeasureId, [mm], false), waist: 'navel' as const },
+    ]),
   );
   const pattern: FlatCheckInput['pattern'] = Object.fromEntries(
     Object.keys(body).map((id) => {
