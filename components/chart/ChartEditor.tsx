@@ -5,6 +5,7 @@ import { sendJson } from '@/components/net/send';
 import { Button } from '@/components/ui/Button';
 import { Choice } from '@/components/ui/Choice';
 import { TextArea } from '@/components/ui/TextArea';
+import { TextField } from '@/components/ui/TextField';
 import { Tick } from '@/components/ui/Tick';
 import type { ChartKind } from '@/diagnosis/chart/chart';
 import { parseChart } from '@/diagnosis/chart/parse-chart';
@@ -32,6 +33,7 @@ export function ChartEditor({ patternId, kind, unit: own, kept }: Props) {
   const router = useRouter();
   const text = useKeptText(`chart ${patternId} ${kind}`, kept);
   const [unit, setUnit] = useState(own);
+  const [allowance, setAllowance] = useState('');
   const [leavesOut, setLeavesOut] = useState(false);
   const [problem, setProblem] = useState<string | null>(null);
   const [isBusy, setBusy] = useState(false);
@@ -40,7 +42,8 @@ export function ChartEditor({ patternId, kind, unit: own, kept }: Props) {
 
   const save = async () => {
     setBusy(true);
-    const body = { kind, unit, pasted: text.value, leavesOut };
+    const over = allowance.trim();
+    const body = { kind, unit, pasted: text.value, leavesOut, allowance: over === '' ? null : { typed: over, unit } };
     const sent = await sendJson('PUT', `/api/patterns/${patternId}/chart`, body);
     setBusy(false);
     if (!sent.ok) return setProblem(sent.problem.message);
@@ -71,6 +74,17 @@ export function ChartEditor({ patternId, kind, unit: own, kept }: Props) {
           label="Keep what could be read, leave those cells out"
           checked={leavesOut}
           onChange={(event) => setLeavesOut(event.target.checked)}
+        />
+      ) : null}
+      {kind === 'paper' ? (
+        <TextField
+          label="Allowance that the tape ran over"
+          hint="Leave it empty when you measured along the seamlines."
+          placeholder={unit}
+          autoComplete="off"
+          maxLength={24}
+          value={allowance}
+          onChange={(event) => setAllowance(event.target.value)}
         />
       ) : null}
       {problem ? (

@@ -1,5 +1,6 @@
+import { Notice } from '@/components/ui/Notice';
 import { Section } from '@/components/ui/Section';
-import { CHART_KINDS } from '@/diagnosis/chart/chart';
+import { CHART_KINDS, type ChartKind } from '@/diagnosis/chart/chart';
 import type { LengthUnit } from '@/diagnosis/units/parse-amount';
 import type { PatternChartDto } from '@/db/queries/charts';
 import { ChartEditor } from './ChartEditor';
@@ -22,10 +23,29 @@ export function PatternTables({ patternId, cells, unit }: Props) {
         return (
           <Section key={kind} title={KIND_WORDS[kind].title}>
             {kind === 'paper' ? <PaperGuide /> : null}
+            <StrayNames names={strayNames(cells, kind)} />
             <ChartEditor key={kept} patternId={patternId} kind={kind} unit={unit} kept={kept} />
           </Section>
         );
       })}
     </div>
+  );
+}
+
+/** Sizes of a table that the chart of bodies does not have: nothing can be held against them. */
+function strayNames(cells: Props['cells'], kind: ChartKind): string[] {
+  const namesOf = (of: ChartKind) =>
+    new Set(cells.filter((cell) => cell.kind === of).map(({ size }) => size));
+  const known = namesOf('body');
+  return known.size === 0 ? [] : [...namesOf(kind)].filter((name) => !known.has(name));
+}
+
+function StrayNames({ names }: { names: string[] }) {
+  if (names.length === 0) return null;
+  return (
+    <Notice tone="care">
+      Not in the chart of bodies: {names.join(', ')}. A size must have the same name in both, or it is not
+      compared.
+    </Notice>
   );
 }

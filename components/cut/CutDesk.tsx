@@ -34,7 +34,7 @@ export function CutDesk({ dto, unit, isHidden }: Props) {
           <SizeSection cut={cut} unit={unit} isHidden={isHidden} patternId={patternId} wearerId={wearerId} />
         </Section>
         <Section title="Ease">
-          <EaseSection rows={cut.ease} unit={unit} />
+          <EaseSection rows={cut.ease} ease={choices.ease} unit={unit} />
         </Section>
         <Section title="Cloth">
           <ClothSection gauge={choices.gauge} verdict={cut.cloth} unit={unit} />

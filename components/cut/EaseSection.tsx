@@ -1,9 +1,17 @@
+import type { CutChoices } from '@/db/queries/cuts';
 import { Amount } from '@/components/ui/Amount';
 import type { EaseRow } from '@/diagnosis/before-the-cut/before-the-cut';
 import type { LengthUnit } from '@/diagnosis/units/parse-amount';
+import { EaseForm } from './EaseForm';
+
+interface Props {
+  rows: readonly EaseRow[];
+  ease: CutChoices['ease'];
+  unit: LengthUnit;
+}
 
 /** What the garment adds to the body at each level: to move in, and for the look. */
-export function EaseSection({ rows, unit }: { rows: readonly EaseRow[]; unit: LengthUnit }) {
+export function EaseSection({ rows, ease, unit }: Props) {
   if (rows.length === 0)
     return (
       <p className="max-w-prose text-graphite">
@@ -11,6 +19,7 @@ export function EaseSection({ rows, unit }: { rows: readonly EaseRow[]; unit: Le
       </p>
     );
   return (
+    <>
     <ul className="grid max-w-2xl border-t border-seam">
       {rows.map(({ measure, name, totalMm, wearingMm, designMm, isBelowLeast, isJudged }) => (
         <li key={measure} className="border-b border-seam py-2">
@@ -24,5 +33,7 @@ export function EaseSection({ rows, unit }: { rows: readonly EaseRow[]; unit: Le
         </li>
       ))}
     </ul>
+    <EaseForm levels={rows} ease={ease} unit={unit} />
+    </>
   );
 } // prettier-ignore

@@ -18,7 +18,7 @@ export function MeasureList({ state: { sitting, at, go } }: { state: SittingStat
               onClick={() => go(place)}
               className={join('flex min-h-11 w-full items-center justify-between gap-3 px-2 py-1 text-left hover:bg-paper', place === at && 'bg-paper font-bold')}
             >
-              <span>{name}</span>
+              <span>{name}</span>{' '}
               <span className={takes.length === 0 ? 'text-graphite' : undefined}>{takes.length === 0 ? 'not taken' : takes.join(', ')}</span>
             </button>
           </li>

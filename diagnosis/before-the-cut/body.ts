@@ -28,7 +28,19 @@ export function bodyOf(sets: readonly MeasuredSet[], patternWaist: WaistPlace | 
     const { meanMm, sdMm } = combineTakes(measure, takes, set.takenAlone);
     body[measure] = { meanMm, sdMm, waist: set.waistPlace };
   }
+  const rise = riseFromSeams(body);
+  if (!body['seated-depth'] && rise) body['seated-depth'] = rise;
   return body;
+}
+
+/**
+ * The tailor's body rise, outseam less inseam, where nobody sat down for the crotch depth (standards:D07): less sure than
+ * either seam, for both errors are in it. Null where one of the two was not taken.
+ */
+export function riseFromSeams({ outseam, inseam }: BodyLengths): BodyLength | null {
+  if (!outseam || !inseam || outseam.meanMm <= inseam.meanMm) return null;
+  const sdMm = Math.hypot(outseam.sdMm, inseam.sdMm);
+  return { meanMm: outseam.meanMm - inseam.meanMm, sdMm, waist: outseam.waist };
 }
 
 /** The girths and lengths alone, mm. */

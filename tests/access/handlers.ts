@@ -54,7 +54,13 @@ const BEFORE_THE_CUT = [
   handler('PUT', 'patterns/[patternId]/chart', {
     path: ({ patternId }) => `/api/patterns/${patternId}/chart`,
     access: owner,
-    body: () => ({ kind: 'body', unit: 'cm', pasted: 'Size\tHip\n10\t98\n12\t102', leavesOut: false }),
+    body: () => ({
+      kind: 'body',
+      unit: 'cm',
+      pasted: 'Size\tHip\n10\t98\n12\t102',
+      allowance: null,
+      leavesOut: false,
+    }),
   }),
   handler('PATCH', 'journals/[journalId]/cut', {
     path: ({ journalId }) => `/api/journals/${journalId}/cut`,
