@@ -14,6 +14,7 @@ export const PAGE_ROWS: PageRow[] = [
   page('(auth)/forgot', () => '/forgot', everyone),
   page('(auth)/reset', () => '/reset', everyone),
   page('dev/mail', () => '/dev/mail', everyone), // there only on the one machine that RUCKLE_LOCAL names
+  page('dev/parts', () => '/dev/parts', everyone), // the same
   page('(studio)/settings', () => '/settings', own),
   page('(studio)/wearers', () => '/wearers', own),
   page('(studio)/wearers/new', () => '/wearers/new', own),

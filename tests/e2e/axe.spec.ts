@@ -10,6 +10,7 @@ const SIGNED_OUT = [
   '/verify',
   '/reset',
   '/dev/mail',
+  '/dev/parts',
   '/nothing-here',
 ];
 const SIGNED_IN = [
