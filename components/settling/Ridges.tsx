@@ -7,7 +7,7 @@ const RIDGE_HEIGHT = 24;
 /** Beyond this share of its height a ridge is drawn; what is flatter does not widen the picture. */
 const SEEN = 0.03;
 
-/** Millimetres from the middle that the picture reaches: as far as any ridge is seen, and past the tolerance. */
+/** Millimetres from the middle that the picture reaches: as far as a ridge is seen, and past the tolerance. */
 function reachOf({ atMm, toleranceMm, rounds }: SettlingRow): number {
   const seen = rounds.flatMap(({ ridge }) =>
     ridge.flatMap((height, i) => (height > SEEN ? [Math.abs(atMm[i]!)] : [])),
