@@ -35,6 +35,7 @@ export function PieceFigure({ drawing, label, unit }: Props) {
           strokeDasharray={`${em / 2} ${em / 3}`}
         />
         <path d={drawing.grain} stroke="var(--seam)" strokeWidth={thin} />
+        <path d={drawing.notches} stroke="var(--ink)" strokeWidth={thin * 1.5} />
         <path d={drawing.after} stroke="var(--ink)" strokeWidth={thin * 2} />
         <path d={drawing.darts} stroke="var(--ink)" strokeWidth={thin * 1.5} />
         {drawing.folds.map((d) => (

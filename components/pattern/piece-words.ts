@@ -44,10 +44,14 @@ export function provedText({ name, declaredMm, beforeMm, afterMm, holds }: Prove
 }
 
 /** One pair of seams walked: what the draft meant, and what is out by more than a pattern may be. */
-export function walkedText({ name, draftedMm, nowMm, verdict }: Walked, unit: LengthUnit): string {
+export function walkedText({ id, name, draftedMm, nowMm, verdict }: Walked, unit: LengthUnit): string {
   if (verdict === 'as-drafted') return `${name}: they meet`;
   if (verdict === 'ease') return `${name}: drafted ${amountText(Math.abs(nowMm), unit)} apart, to be eased`;
   const by = amountText(Math.abs(nowMm - draftedMm), unit);
+  if (id === 'band') {
+    const way = nowMm > draftedMm ? 'longer' : 'shorter';
+    return `${name}: make each half of the band ${by} ${way}, shared out along it`;
+  }
   return `${name}: now ${by} out. Share it out along the seam, or take it off the longer one.`;
 }
 

@@ -1,7 +1,11 @@
 import type { CaseInput } from '@/diagnosis/case-schema';
 import { drawPiece, type PieceDrawing } from '@/diagnosis/pattern/drawing';
+import { bandWants, fitBand } from '@/diagnosis/pattern/fit-band';
+import { draftFly } from '@/diagnosis/pattern/blocks/fly';
 import { replay } from '@/diagnosis/pattern/history';
+import { NAMED_OVER_MM } from '@/diagnosis/pattern/walk';
 import { standInBlock } from '@/diagnosis/pattern/stand-in';
+import type { Piece } from '@/diagnosis/pattern/piece';
 import type { RecordRow } from './record-rows';
 
 export interface FinalPiece {
@@ -35,11 +39,14 @@ export function finalPieces(
       own.map(({ correction, madeMm }) => ({ correction, amountMm: madeMm! })),
     );
     if (!done.ok) return { ok: false, name: own[done.at]!.name };
-    for (const piece of PIECES) {
-      if (done.block[piece] === block[piece]) continue;
-      const drawing = drawPiece(block[piece], done.block[piece], []);
+    const isBandOff = Math.abs(bandWants(block, done.block)) > NAMED_OVER_MM;
+    const now = isBandOff ? fitBand(block, done.block) : done.block;
+    const add = (piece: string, before: Piece, after: Piece) => {
+      const drawing = drawPiece(before, after, []);
       pieces.push({ leg, piece, drawing: { ...drawing, box: drawing.whole } });
-    }
+    };
+    for (const piece of PIECES) if (now[piece] !== block[piece]) add(piece, block[piece], now[piece]);
+    if (own.some((row) => row.pieces.includes('fly'))) add('fly', draftFly(block.front), draftFly(now.front));
   }
   return { ok: true, pieces };
 }

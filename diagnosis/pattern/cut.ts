@@ -35,10 +35,20 @@ function whereAlong(piece: Piece, edge: string, mm: number): Where {
   return { index: last, t: 1 };
 }
 
-/** The point so many millimetres along an edge. @throws RangeError when the edge is missing or shorter. */
-export function pointAlong(piece: Piece, edge: string, mm: number): XY {
-  const { index, t } = whereAlong(piece, edge, mm);
-  return pointAt(piece.parts[index]!.cubic, t);
+/** Reads points of an edge by millimetres along it; lengths are measured once. Beyond its ends, the nearest end. */
+export function edgeReader(piece: Piece, edge: string): (mm: number) => XY {
+  const parts = piece.parts
+    .filter((one) => one.edge === edge)
+    .map(({ cubic }) => ({ cubic, mm: lengthOf(cubic) }));
+  return (mm) => {
+    let left = mm;
+    for (const [index, { cubic, mm: length }] of parts.entries()) {
+      if (left <= length || index === parts.length - 1)
+        return pointAt(cubic, parameterAtLength(cubic, left, length));
+      left -= length;
+    }
+    throw new RangeError(`the ${piece.id} has no edge ${edge}`);
+  };
 }
 
 /**

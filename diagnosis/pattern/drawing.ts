@@ -1,7 +1,7 @@
 import { cuttingLine } from './allowance';
-import { pointAt, type Cubic } from './geometry/cubic';
+import { pointAt, velocityAt, type Cubic } from './geometry/cubic';
 import { flatten } from './geometry/outline';
-import { between, distance, type XY } from './geometry/xy';
+import { between, distance, plus, times, unit, type XY } from './geometry/xy';
 import { edgeLength } from './measure';
 import type { Drawn } from './operators/outcome';
 import { isDart, type Piece } from './piece';
@@ -31,6 +31,8 @@ export interface PieceDrawing {
   readonly hinges: readonly XY[];
   readonly darts: string;
   readonly grain: string;
+  /** Short strokes outward from the stitching line, where seams are matched. */
+  readonly notches: string;
 }
 
 const n = (value: number) => value.toFixed(2);
@@ -93,6 +95,17 @@ const dartsOf = (piece: Piece): XY[][] =>
     return point ? [[mouth[0]!.cubic.from, point, mouth.at(-1)!.cubic.to]] : [];
   });
 
+const NOTCHES = ['notch', 'hip-in', 'hip-out', 'knee-in', 'knee-out'];
+const NOTCH_MM = 6;
+const notchesOf = (piece: Piece) =>
+  piece.parts
+    .filter(({ start }) => start !== undefined && NOTCHES.includes(start))
+    .map(({ cubic }) => {
+      const { x, y } = unit(velocityAt(cubic, 0));
+      return line([cubic.from, plus(cubic.from, times({ x: y, y: -x }, NOTCH_MM))]);
+    })
+    .join('');
+
 /** Before and after of one piece over each other, with what each operator marks: slash, hinge, fold. */
 export function drawPiece(before: Piece, after: Piece, drawn: readonly Drawn[]): PieceDrawing {
   const moved = movedParts(before, after);
@@ -124,5 +137,6 @@ export function drawPiece(before: Piece, after: Piece, drawn: readonly Drawn[]):
     hinges: drawn.flatMap((one) => one.hinges ?? []),
     darts: darts.after.map(line).join(''),
     grain: line([top, foot]),
+    notches: notchesOf(after),
   };
 }

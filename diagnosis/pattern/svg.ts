@@ -17,6 +17,7 @@ export function svgDocument(drawing: PieceDrawing, title: string): string {
     path(drawing.before, 'stroke="#999" stroke-width="0.4" stroke-dasharray="4 3"'),
     path(drawing.after, 'stroke="#000" stroke-width="0.6"'),
     path(drawing.darts, 'stroke="#000" stroke-width="0.4"'),
+    path(drawing.notches, 'stroke="#000" stroke-width="0.4"'),
     path(drawing.grain, 'stroke="#000" stroke-width="0.4"'),
     '</svg>',
   ].join('\n');

@@ -20,7 +20,7 @@ const named = (edge: string, cubics: readonly Cubic[], start: string): Part[] =>
 
 /**
  * Half a waistband, from centre back (left) to centre front, on the stitching line. Its lower edge is as long as the waist it is
- * sewn to; with `contourMm` the top edge is so much shorter, as a ring of paper round a cone. All mm.
+ * sewn to; with `contourMm` the top edge is so much shorter (negative: longer), as a ring of paper round a cone. All mm.
  * @throws RangeError when the top edge would be shorter than half the lower.
  */
 export function draftBand({
@@ -35,7 +35,7 @@ export function draftBand({
   if (contourMm > lowerMm / 2) throw new RangeError('the band cannot be curved so much');
   const marks = { 'grain-top': xy(0, 0), 'grain-foot': xy(0, heightMm) };
   const allowancesMm = { upper: 10, front: 10, lower: 10 };
-  if (contourMm < 0.5) {
+  if (Math.abs(contourMm) < 0.5) {
     const [a, b, c, d] = [xy(0, 0), xy(lowerMm, 0), xy(lowerMm, heightMm), xy(0, heightMm)] as const;
     const sides = [
       part('upper', straight(a, b), 'back-top'),

@@ -61,7 +61,9 @@ const BESIDE_DART_MM = 8;
 /** A plumb line on the inner side of the dart, through waist and hem. */
 const lengthwise = (piece: Piece, amountMm: number): Parallel => ({
   axis: 'x',
-  at: hasPoint(piece, 'dart-1-in') ? pointOf(piece, 'dart-1-in').x + BESIDE_DART_MM : 0,
+  at: hasPoint(piece, 'dart-1-in')
+    ? pointOf(piece, 'dart-1-in').x + BESIDE_DART_MM
+    : (pointOf(piece, 'side-waist').x + pointOf(piece, 'centre-waist').x) / 2,
   edges: ['waist', 'hem'],
   moves: 'centre-waist',
   amountMm,

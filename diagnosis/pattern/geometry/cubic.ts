@@ -94,8 +94,7 @@ export function splitCubic({ from, control1, control2, to }: Cubic, t: number): 
 }
 
 /** The parameter at which `mm` of the cubic have been walked (Newton's method held inside a bisection). */
-export function parameterAtLength(cubic: Cubic, mm: number): number {
-  const whole = lengthOf(cubic);
+export function parameterAtLength(cubic: Cubic, mm: number, whole = lengthOf(cubic)): number {
   if (mm <= 0) return 0;
   if (mm >= whole) return 1;
   if (isStraight(cubic)) return mm / whole;

@@ -2,7 +2,6 @@ import { edgeLength } from '../measure';
 import type { Piece } from '../piece';
 import { hingedOverlap, hingedSpread } from './hinged';
 import { changes, edge, keeps, type Outcome } from './outcome';
-import { parallelSpread, parallelTuck } from './parallel';
 
 /** Slashes that share the change, so that the band bends evenly. */
 const SLASHES = 4;
@@ -43,16 +42,4 @@ export function contourBand(piece: Piece, amountMm: number): Outcome {
       keeps('the front end', edge('front')),
     ],
   };
-}
-
-/** Make the half band longer (+) or shorter at its side, top and lower edge alike. */
-export function lengthenBand(piece: Piece, amountMm: number): Outcome {
-  const args = {
-    axis: 'x',
-    at: edgeLength(piece, 'upper') * 0.45,
-    edges: ['upper', 'lower'],
-    moves: 'front-top',
-    amountMm: Math.abs(amountMm),
-  } as const;
-  return amountMm > 0 ? parallelSpread(piece, args) : parallelTuck(piece, args);
 }

@@ -1,6 +1,6 @@
 import { lengthOf, mapCubic, pointAt, rootsOf, solve, straight, velocityAt } from '../geometry/cubic';
 import { cross, distance, dot, minus, turn, type XY } from '../geometry/xy';
-import { cutAt, pointAlong, stationPoint } from '../cut';
+import { cutAt, edgeReader, stationPoint } from '../cut';
 import { edgeLength } from '../measure';
 import { isDart, pointOf, walkFrom, type Piece, type Station } from '../piece';
 import { changes, edge, keeps, type Outcome } from './outcome';
@@ -125,14 +125,15 @@ export function hingedOverlap(piece: Piece, args: Hinged): Outcome {
   const { target, amountMm } = args;
   const hingePoint = stationPoint(piece, args.hinge);
   const foot = footMm(piece, target, hingePoint);
-  const away = (mm: number) => distance(pointAlong(piece, target, mm), hingePoint);
+  const along = edgeReader(piece, target);
+  const away = (mm: number) => distance(along(mm), hingePoint);
   const longest = edgeLength(piece, target) - amountMm;
   if (longest < 0) throw new RangeError(`the ${target} is shorter than the amount`);
   const [low, high] = [Math.max(0, foot - amountMm), Math.min(foot, longest)];
   const startMm = solve((mm) => away(mm + amountMm) - away(mm), low, high);
   const second = openAt(piece, args, startMm + amountMm);
   const first = openAt(second.piece, args, startMm);
-  const lips = [pointAlong(piece, target, startMm), pointAlong(piece, target, startMm + amountMm)] as const;
+  const lips = [along(startMm), along(startMm + amountMm)] as const;
   const strip = first.slashIndex;
   const kept = { ...first.piece, parts: first.piece.parts.filter((_, index) => index !== strip) };
   const hingeIndex = kept.parts.findIndex(({ cubic }) => distance(cubic.from, hingePoint) < 1e-9);

@@ -61,8 +61,8 @@ export function shiftKneeLine(piece: Piece, amountMm: number): Outcome {
       keeps('the knee', width('knee')),
       keeps('the hem', HEM),
       // A steep taper is a little longer or shorter for a knee at another height; the walk names it.
-      keeps('the side', edge('side'), 3),
-      keeps('the inseam', edge('inseam'), 3),
+      keeps('the side', edge('side'), 6),
+      keeps('the inseam', edge('inseam'), 6),
     ],
   });
 }

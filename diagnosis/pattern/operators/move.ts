@@ -49,15 +49,23 @@ export function move(piece: Piece, { stretches, by, marks = {}, declared }: Move
   };
 }
 
-/**
- * As {@link move}; the seam then gets back its length by sliding, as a pattern maker lowers a lengthened crotch point until the
- * inseam measures as before.
- */
-export function moveAndSlide(piece: Piece, args: Move, slide: Slide): Outcome {
+/** The piece with the stretches slid until the seam measures `wantedMm`. */
+export function slideUntil(piece: Piece, slide: Slide, wantedMm: number): Piece {
   const [from, to] = [{ point: slide.from }, { point: slide.to }];
-  const wanted = seamLength(piece, from, to);
+  const at = (mm: number) => bendAll(piece, slide.stretches, times(slide.direction, mm));
+  const mm = solve((tried) => seamLength(at(tried), from, to) - wantedMm, -SLIDE_MM, SLIDE_MM, 0);
+  return at(mm);
+}
+
+/**
+ * As {@link move}; the seams then get back their lengths by sliding, as a pattern maker lowers a lengthened crotch point until the
+ * inseam measures as before. Several seams are slid in turn, thrice, since each moves the others a little; the last is exact.
+ */
+export function moveAndSlide(piece: Piece, args: Move, ...slides: readonly Slide[]): Outcome {
+  const wanted = slides.map(({ from, to }) => seamLength(piece, { point: from }, { point: to }));
   const moved = move(piece, args);
-  const at = (mm: number) => bendAll(moved.piece, slide.stretches, times(slide.direction, mm));
-  const mm = solve((tried) => seamLength(at(tried), from, to) - wanted, -SLIDE_MM, SLIDE_MM, 0);
-  return { ...moved, piece: at(mm) };
+  let slid = moved.piece;
+  for (let turn = 0; turn < (slides.length > 1 ? 3 : 1); turn++)
+    for (const [index, slide] of slides.entries()) slid = slideUntil(slid, slide, wanted[index]!);
+  return { ...moved, piece: slid };
 }

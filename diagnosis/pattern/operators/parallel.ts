@@ -127,7 +127,7 @@ export function parallelTuck(piece: Piece, args: Parallel): Outcome {
     before: piece,
     piece: joined(tucked.piece, tucked.joints),
     // Seams that run aslant lose a little more or less than the strip is wide.
-    declared: declare(piece, { ...args, amountMm: -args.amountMm }, 0.12 * args.amountMm),
+    declared: declare(piece, { ...args, amountMm: -args.amountMm }, 0.2 * args.amountMm),
     drawn: {
       slashes: [line(piece, args)],
       folds: [[...line(piece, args), ...line(piece, { ...args, at: far }).reverse()]],

@@ -1,10 +1,16 @@
 import { minus, times, unit, xy } from '../geometry/xy';
-import { pointOf, type Piece } from '../piece';
+import { hasPoint, pointOf, type Piece } from '../piece';
 import { move, moveAndSlide, stretch } from './move';
 import { changes, edge, keeps, type Outcome } from './outcome';
 
 const CENTRE = { of: 'seam', from: { point: 'centre-waist' }, to: { point: 'notch' } } as const;
 const SIDE = { of: 'seam', from: { point: 'hip-out' }, to: { point: 'side-waist' } } as const;
+
+/** Where a stretch of waist that begins at the side (`out`) or the centre (`in`) ends: at the dart, or without one right across. */
+function innerEnd(piece: Piece, from: 'in' | 'out'): string {
+  if (hasPoint(piece, `dart-1-${from}`)) return `dart-1-${from}`;
+  return from === 'out' ? 'centre-waist' : 'side-waist';
+}
 
 /** Raise (+) or lower the waist at the centre, along the centre line, to nothing at the side. */
 export function raiseCentre(piece: Piece, amountMm: number): Outcome {
@@ -57,12 +63,20 @@ export function pivotCentre(piece: Piece, amountMm: number): Outcome {
     declared: [
       changes('the lean of the centre at the waist', lean, amountMm),
       keeps('the side, hip to waist', SIDE),
-      // The side slides a little to keep its length, and the waist with it.
-      keeps('the waist', edge('waist'), 1),
+      keeps('the waist', edge('waist'), 0.1),
       keeps('the hip', { of: 'width', level: 'hip' }),
     ],
   };
-  return moveAndSlide(piece, moved, {
+  const waist = {
+    from: 'side-waist',
+    to: 'centre-waist',
+    stretches: [
+      stretch('hip-out', 'side-waist', [0, 1], 'smooth', 'height'),
+      stretch('side-waist', innerEnd(piece, 'out'), [1, 0], 'line'),
+    ],
+    direction: xy(-1, 0),
+  };
+  return moveAndSlide(piece, moved, waist, {
     from: 'hip-out',
     to: 'side-waist',
     stretches: [
@@ -75,11 +89,10 @@ export function pivotCentre(piece: Piece, amountMm: number): Outcome {
 
 /** Let out (+) or take in the waist at the side, to nothing at the hip. */
 export function waistAtSide(piece: Piece, amountMm: number): Outcome {
-  const inner = piece.parts.some(({ start }) => start === 'dart-1-out') ? 'dart-1-out' : 'centre-waist';
   return move(piece, {
     stretches: [
       stretch('hip-out', 'side-waist', [0, 1], 'smooth', 'height'),
-      stretch('side-waist', inner, [1, 0], 'line'),
+      stretch('side-waist', innerEnd(piece, 'out'), [1, 0], 'line'),
     ],
     by: xy(-amountMm, 0),
     declared: [
@@ -92,10 +105,9 @@ export function waistAtSide(piece: Piece, amountMm: number): Outcome {
 
 /** Let out (+) or take in the centre above the notch: so much at the waist, `hipShare` of it at the hip, nothing at the notch. */
 export function centreSeam(piece: Piece, amountMm: number, hipShare: number): Outcome {
-  const inner = piece.parts.some(({ start }) => start === 'dart-1-in') ? 'dart-1-in' : 'side-waist';
   return move(piece, {
     stretches: [
-      stretch(inner, 'centre-waist', [0, 1], 'line'),
+      stretch(innerEnd(piece, 'in'), 'centre-waist', [0, 1], 'line'),
       stretch('centre-waist', 'hip-in', [1, hipShare], 'line', 'height'),
       stretch('hip-in', 'notch', [hipShare, 0], 'smooth', 'height'),
     ],

@@ -54,7 +54,7 @@ describe('a change on the piece', () => {
   it('walks the seams: a drafted difference is eased, one that the change made is named', () => {
     render(view('let-out-waist-front', 12));
     expect(screen.getByText(/inseam, fork to knee: drafted 6 mm apart, to be eased/)).toBeInTheDocument();
-    expect(screen.getByText(/waist and band: now 12 mm out/)).toBeInTheDocument();
+    expect(screen.getByText(/waist and band: make each half of the band 12 mm longer/)).toBeInTheDocument();
   });
 
   it('says that a block stands in, and on which leg a sided change is done', () => {
