@@ -24,12 +24,22 @@ interface Props {
   isOwner: boolean;
   view: View;
   onView: (view: View) => void;
+  previousRoundId: string | null;
   /** What marks are read with, once it is here. */
   reading?: ReadingTools | undefined;
 }
 
 /** The photos of a round: one on the table to mark, the others in a strip; one touch covers them all. */
-export function PhotoStage({ round, photos: first, userId, isOwner, view, onView, reading }: Props) {
+export function PhotoStage({
+  round,
+  photos: first,
+  userId,
+  isOwner,
+  view,
+  onView,
+  previousRoundId,
+  reading,
+}: Props) {
   const url = `/api/rounds/${round.id}/photos`;
   const { data: photos = first, mutate } = useSWR<PhotoDto[]>(url, fetchJson, { fallbackData: first });
   const [chosenId, setChosenId] = useState(first[0]?.id ?? null);
@@ -111,6 +121,7 @@ export function PhotoStage({ round, photos: first, userId, isOwner, view, onView
           roundId={round.id}
           view={view}
           isFolded={photos.length > 0}
+          previousRoundId={previousRoundId}
           onAdded={put}
         />
       ) : null}
