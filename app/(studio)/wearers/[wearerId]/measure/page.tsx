@@ -27,7 +27,7 @@ export default async function MeasurePage({ params }: PageProps<'/wearers/[weare
     <>
       <PageHead
         title={`Measure ${found.name}`}
-        lead="From the waist down. Leave out what you cannot reach."
+        lead={found.isSelf || found.consentsMeasure ? LEAD : ASK_FIRST}
       />
       <MeasureFlow
         wearerId={id}
