@@ -13,8 +13,8 @@ export const WAIST_WORDS: Record<WaistPlace, { label: string; how: string }> = {
 }; // prettier-ignore
 
 export const MEASURE_IDS = [
-  'height', 'waist', 'high-hip', 'hip', 'waist-to-hip', 'seated-depth', 'front-crotch-length', 'back-crotch-length',
-  'crotch-length', 'thigh', 'knee', 'calf', 'ankle', 'instep', 'inseam', 'outseam',
+  'waist', 'high-hip', 'hip', 'waist-to-hip', 'seated-depth', 'front-crotch-length', 'back-crotch-length',
+  'crotch-length', 'thigh', 'knee', 'calf', 'ankle', 'instep', 'inseam', 'outseam', 'height',
 ] as const; // prettier-ignore
 export type MeasureId = (typeof MEASURE_IDS)[number];
 
@@ -42,7 +42,6 @@ export interface Measure {
 const CP = ['common practice'] as const;
 
 export const MEASURES: readonly Measure[] = [
-  { id: 'height', name: 'Height', how: 'Without shoes, back to a wall, a book flat on the head.', run: 'along', view: 'front', level: { from: -1.2, to: 4 }, tapeSdMm: 10, usualMm: { from: 900, to: 2250 }, needsWaist: false, sources: CP },
   { id: 'waist', name: 'Waist', how: 'Tie a string round the waist that is meant and let it settle. Measure along it, breathing out, as close as a band is worn.', run: 'round', view: 'front', level: { from: 0, to: 0 }, tapeSdMm: 8, usualMm: { from: 420, to: 2000 }, needsWaist: true, sources: ['trousers:TM001', 'standards:B26'] },
   { id: 'high-hip', name: 'High hip', how: 'Round the fullest place of the front, 8 to 10 cm (3 to 4 in) below the string, the tape level.', run: 'round', view: 'front', level: { from: 0.38, to: 0.38 }, tapeSdMm: 8, usualMm: { from: 480, to: 2050 }, needsWaist: false, sources: ['trousers:TM002'] },
   { id: 'hip', name: 'Hip', how: 'Round the fullest place of the seat, above the fork, the tape level. A full front: hold a card flat against it and measure over the card.', run: 'round', view: 'back', level: { from: 0.75, to: 0.75 }, tapeSdMm: 8, usualMm: { from: 550, to: 2100 }, needsWaist: false, sources: ['trousers:TM004', 'trousers:TM005', 'trousers:TM006'] },
@@ -58,6 +57,7 @@ export const MEASURES: readonly Measure[] = [
   { id: 'instep', name: 'Heel over instep', how: 'Round the heel and over the instep: what a narrow hem has to pass.', run: 'round', view: 'left', level: { from: 3.85, to: 3.85 }, tapeSdMm: 5, usualMm: { from: 210, to: 480 }, needsWaist: false, sources: ['trousers:TM010'] },
   { id: 'inseam', name: 'Inseam', how: 'Stand with a book held up between the legs. From its upper edge to the floor, then take off what the hem is to clear.', run: 'along', view: 'front', level: { from: 1, to: 3.9 }, tapeSdMm: 8, usualMm: { from: 380, to: 1150 }, needsWaist: false, sources: ['trousers:TM011'] },
   { id: 'outseam', name: 'Outseam', how: 'At the side, from the string over the hip to the floor, then take off what the hem is to clear.', run: 'along', view: 'left', level: { from: 0, to: 3.9 }, tapeSdMm: 10, usualMm: { from: 500, to: 1450 }, needsWaist: true, sources: ['trousers:TM011'] },
+  { id: 'height', name: 'Height', how: 'Without shoes, back to a wall, a book flat on the head.', run: 'along', view: 'front', level: { from: -1.2, to: 4 }, tapeSdMm: 10, usualMm: { from: 900, to: 2250 }, needsWaist: false, sources: CP },
 ]; // prettier-ignore
 
 const BY_ID = new Map<string, Measure>(MEASURES.map((measure) => [measure.id, measure]));

@@ -11,6 +11,7 @@ describe('the cutting and marking sheet', () => {
 
   it('lets a straight woven leg end above the knee, and never a narrow or a stretch one', () => {
     expect(ids({})).toContain('as-shorts');
+    expect(ids({ cut: 'full' }).filter((id) => /shorts|full-legs/.test(id))).toEqual(['full-legs']);
     for (const facts of [{ isNarrowLeg: true }, { cloth: 'knit' as const }, { cloth: 'stretch-woven' as const }])
       expect(ids(facts).filter((id) => id.endsWith('as-shorts'))).toEqual(['not-as-shorts']);
   }); // prettier-ignore

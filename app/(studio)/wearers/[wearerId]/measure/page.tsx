@@ -10,6 +10,9 @@ import { uuidOr404 } from '@/lib/request/uuid-or-404';
 
 export const metadata: Metadata = { title: 'Measure' };
 
+const LEAD = 'From the waist down. Leave out what you cannot reach.';
+const ASK_FIRST = 'Ask first: it is not written down yet that they agreed to be measured.';
+
 export default async function MeasurePage({ params }: PageProps<'/wearers/[wearerId]/measure'>) {
   const viewer = await requireViewer();
   const id = uuidOr404((await params).wearerId);
@@ -24,7 +27,7 @@ export default async function MeasurePage({ params }: PageProps<'/wearers/[weare
     <>
       <PageHead
         title={`Measure ${found.name}`}
-        lead="From the waist down. Leave out what you cannot reach."
+        lead={found.isSelf || found.consentsMeasure ? LEAD : ASK_FIRST}
       />
       <MeasureFlow
         wearerId={id}
