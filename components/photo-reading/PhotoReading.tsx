@@ -84,7 +84,7 @@ function Read({ body, selected, view, knowledge, cut, state, onEdit }: ReadProps
   );
   return (
     <>
-      <h3 className="font-bold">{selected ? 'The mark you chose may be' : 'Your marks may be'}</h3>
+      <h2 className="text-lg">{selected ? 'The mark you chose may be' : 'Your marks may be'}</h2>
       {offers.length > 0 ? (
         <Offers
           signs={signs}

@@ -1,5 +1,7 @@
 import type { Mark } from '@/components/marks/model/mark';
 import type { LandmarkInput } from '@/db/queries/landmarks';
+import type { FigurePlacement } from '@/diagnosis/figure/align';
+import type { FigureView } from '@/diagnosis/figure/figure';
 import { photoPoint } from '@/diagnosis/figure/point';
 import { REFERENCE_PROPORTIONS } from '@/diagnosis/figure/proportions';
 import type { Sign, Zone } from '@/diagnosis/garments/schema';
@@ -17,6 +19,27 @@ type DrawnOnPhoto = Pick<Mark, 'id' | 'kind' | 'severity' | 'side'> & {
   points: readonly { x: number; y: number }[];
 };
 
+const figures = new Map<FigureView, ReadFigure>();
+function figureOf(view: FigureView): ReadFigure {
+  const figure = figures.get(view) ?? readFigure(view, REFERENCE_PROPORTIONS);
+  figures.set(view, figure);
+  return figure;
+}
+
+/** A mark is a new object whenever it changes; with the same figure in the same place it lies where it lay. */
+const carried = new WeakMap<DrawnOnPhoto, { placed: string; body: BodyMark }>();
+
+function carry(figure: ReadFigure, placement: FigurePlacement, mark: DrawnOnPhoto): BodyMark {
+  const placed = JSON.stringify([placement.frame, placement.map]);
+  const had = carried.get(mark);
+  if (had?.placed === placed) return had.body;
+  const { id, kind, severity, side } = mark;
+  const points = mark.points.map(({ x, y }) => photoPoint(x, y));
+  const body = bodyMark(figure, placement, { id, kind, severity, side, points });
+  carried.set(mark, { placed, body });
+  return body;
+}
+
 /** The marks of a photo carried onto the body; null while the figure does not lie on the photo. */
 export function marksOnBody(
   photo: ShownPhoto,
@@ -25,15 +48,8 @@ export function marksOnBody(
 ): MarksOnBody | null {
   const placement = placementOf(photo, tapped);
   if (!placement || !isFigureView(photo.view)) return null;
-  const figure = readFigure(photo.view, REFERENCE_PROPORTIONS);
-  const drawn = marks.map(({ id, kind, severity, side, points }) => ({
-    id,
-    kind,
-    severity,
-    side,
-    points: points.map(({ x, y }) => photoPoint(x, y)),
-  }));
-  return { figure, marks: drawn.map((mark) => bodyMark(figure, placement, mark)) };
+  const figure = figureOf(photo.view);
+  return { figure, marks: marks.map((mark) => carry(figure, placement, mark)) };
 }
 
 /** The marks that lie together with the chosen one; all of them where none is chosen. */

@@ -136,6 +136,9 @@ function headingMiss(from: FigurePoint, to: FigurePoint, place: FigurePoint): nu
 const distanceToPath = (path: readonly FigurePoint[], at: FigurePoint) =>
   Math.min(...path.slice(1).map((point, i) => distanceToStretch(at, path[i]!, point)));
 
+/** Of so little no place and direction makes a reading. */
+const NEVER = 0.02;
+
 const ALONG_SHARE = 0.8;
 const HEADING_SHARE = 0.35;
 
@@ -190,29 +193,50 @@ function directionFor(mark: BodyMark, sign: Sign): number | null {
   return isStandingSign ? mark.seamwardDeg : mark.angleDeg;
 }
 
-/** How well one mark fits a sign's template in the view it was drawn on, and what speaks for it. */
-export function fitTemplate(figure: ReadFigure, mark: BodyMark, sign: Sign, template: Template): Fit {
-  const kind = kindOdds(mark.kind, template.kinds) * (sign.tension === 'place' ? PLACE_SIGN_SHARE : 1);
+function fitOnce(figure: ReadFigure, mark: BodyMark, sign: Sign, template: Template): Fit {
+  const tension = sign.tension === 'place' ? PLACE_SIGN_SHARE : 1;
+  const kindAndView = kindOdds(mark.kind, template.kinds) * tension * viewOdds(figure, sign);
+  if (kindAndView < NEVER) return { odds: kindAndView, reasons: [] };
   const zone = zoneOdds(figure, mark, sign, template);
+  if (zone <= 2 * LEAST.zone) return { odds: kindAndView * zone, reasons: [] };
   const angleDeg = directionFor(mark, sign);
-  const angle = angleOdds(angleDeg, template.angleDeg);
   const ends = endOdds(figure, mark, template);
-  const view = viewOdds(figure, sign);
+  const odds =
+    kindAndView *
+    zone *
+    angleOdds(angleDeg, template.angleDeg) *
+    ends.odds *
+    lengthOdds(mark.length, template.lengthRatio);
+  return { odds, reasons: reasonsFor(mark, template, angleDeg, ends) };
+}
+
+function reasonsFor(mark: BodyMark, template: Template, angleDeg: number | null, ends: EndFit): Reason[] {
+  const { zones, angleDeg: range, anchor, target } = template;
   const reasons: Reason[] = [];
-  const within = mark.zones.find((one) => template.zones.includes(one.zone));
+  const within = mark.zones.find((one) => zones.includes(one.zone));
   if (within) reasons.push({ kind: 'zone', zone: within.zone });
-  if (
-    template.angleDeg &&
-    mark.angleDeg !== null &&
-    angleMiss(mark.angleDeg, template.angleDeg) < ANGLE_SD_DEG
-  )
-    reasons.push({ kind: 'direction', angleDeg: mark.angleDeg });
-  if (template.anchor !== null && ends.anchor > 0.5)
-    reasons.push({ kind: 'anchor', landmark: template.anchor });
-  if (template.target !== null && ends.target > 0.5)
-    reasons.push({ kind: 'target', landmark: template.target });
-  return {
-    odds: kind * zone * angle * ends.odds * view * lengthOdds(mark.length, template.lengthRatio),
-    reasons,
-  };
+  if (range && angleDeg !== null && angleMiss(angleDeg, range) < ANGLE_SD_DEG)
+    reasons.push({ kind: 'direction', angleDeg });
+  if (anchor !== null && ends.anchor > 0.5) reasons.push({ kind: 'anchor', landmark: anchor });
+  if (target !== null && ends.target > 0.5) reasons.push({ kind: 'target', landmark: target });
+  return reasons;
+}
+
+/** Marks do not change; only the one that was just drawn has to be held against the signs again. */
+const known = new WeakMap<ReadFigure, WeakMap<BodyMark, Map<Sign, Fit>>>();
+
+function fitsOf(figure: ReadFigure, mark: BodyMark): Map<Sign, Fit> {
+  const ofFigure = known.get(figure) ?? new WeakMap<BodyMark, Map<Sign, Fit>>();
+  known.set(figure, ofFigure);
+  const fits = ofFigure.get(mark) ?? new Map<Sign, Fit>();
+  ofFigure.set(mark, fits);
+  return fits;
+}
+
+/** How well one mark fits a sign's template in the view it was drawn on, and what speaks for it. Kept for the mark's life. */
+export function fitTemplate(figure: ReadFigure, mark: BodyMark, sign: Sign, template: Template): Fit {
+  const fits = fitsOf(figure, mark);
+  const fit = fits.get(sign) ?? fitOnce(figure, mark, sign, template);
+  fits.set(sign, fit);
+  return fit;
 }
