@@ -4,6 +4,7 @@ import type { MarkedPhotoDto } from '@/db/queries/marked-photos';
 import type { LengthUnit } from '@/diagnosis/units/parse-amount';
 import { comparedRounds } from './compared';
 import { CompareView } from './CompareView';
+import { MarkFates } from './MarkFates';
 import { PhotoPairs } from './PhotoPairs';
 import { RoundChooser } from './RoundChooser';
 
@@ -32,6 +33,7 @@ export function ComparedPair({ desk, before, after, photos, unit }: Props) {
         before={{ number: before.number, photos: of(before) }}
         after={{ number: after.number, photos: of(after) }}
       />
+      <MarkFates before={of(before)} after={of(after)} />
       <CompareView compared={comparedRounds(desk, before, after, views)} unit={unit} />
     </div>
   );

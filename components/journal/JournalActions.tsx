@@ -11,6 +11,7 @@ export function JournalActions({ journal }: { journal: JournalDto }) {
   const step = journal.isOwner ? nextStep(last, settledAt !== null) : null;
   return (
     <>
+      {journal.isOwner ? <LinkButton href={`/journals/${id}/cut`}>Before the first cut</LinkButton> : null}
       {last && before ? (
         <LinkButton href={`/journals/${id}/compare?a=${before.number}&b=${last.number}`}>
           Side by side

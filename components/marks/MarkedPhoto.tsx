@@ -1,6 +1,8 @@
 'use client';
-import { useState } from 'react';
+import { lazy, Suspense, useState } from 'react';
 import { v7 } from 'uuid';
+import type { ReadingTools } from '@/components/photo-reading/PhotoReading';
+import { useLandmarks } from '@/components/photo-reading/useLandmarks';
 import { photoSrcSet, photoUrl } from '@/components/photos/PhotoImage';
 import { VIEW_WORDS } from '@/components/photos/view-words';
 import { SaveLine } from '@/components/round/SaveLine';
@@ -16,16 +18,24 @@ import { useWaitingMarks } from './useWaitingMarks';
 interface Props {
   userId: string;
   photo: PhotoDto;
+  /** Absent until the knowledge has come. */
+  reading?: ReadingTools | undefined;
 }
+
+// The figure and what reads lines come after the photo can be marked.
+const FigurePlacer = lazy(() => import('@/components/photo-reading/FigurePlacer').then(({ FigurePlacer: it }) => ({ default: it }))); // prettier-ignore
+const PhotoReading = lazy(() => import('@/components/photo-reading/PhotoReading').then(({ PhotoReading: it }) => ({ default: it }))); // prettier-ignore
 
 const NOTHING_YET = startHistory([]);
 
 /** One photo with its marks: drawn on it, and listed beside it. */
-export function MarkedPhoto({ userId, photo }: Props) {
+export function MarkedPhoto({ userId, photo, reading }: Props) {
   const { id, revision, widthPx, heightPx, view, isMirrored } = photo;
   const { marks, history, saveState, conflicts, act, settle } = useMarks(userId, photo);
   const elsewhere = useWaitingMarks(userId, id);
   const [selected, setSelected] = useState<string | null>(null);
+  const figure = useLandmarks(photo);
+  const [isPlacing, setPlacing] = useState(false);
   const alt = `${VIEW_WORDS[view]}${isMirrored ? ', in a mirror' : ''}`;
   const src = {
     src: photoUrl(id, revision, '1600'),
@@ -34,6 +44,18 @@ export function MarkedPhoto({ userId, photo }: Props) {
     heightPx,
     alt,
   };
+  if (isPlacing && view !== 'close-up')
+    return (
+      <Suspense fallback={null}>
+        <FigurePlacer
+          photo={{ ...photo, view }}
+          tapped={figure.landmarks}
+          message={figure.message}
+          onKeep={figure.save}
+          onClose={() => setPlacing(false)}
+        />
+      </Suspense>
+    );
   return (
     <div className="grid gap-3">
       <MarkCanvas
@@ -64,6 +86,19 @@ export function MarkedPhoto({ userId, photo }: Props) {
           setSelected(null);
         }}
       />
+      {reading && figure.isLoaded ? (
+        <Suspense fallback={null}>
+          {' '}
+          <PhotoReading
+            photo={photo}
+            tapped={figure.landmarks}
+            marks={marks}
+            selected={selected}
+            onPlace={() => setPlacing(true)}
+            {...reading}
+          />
+        </Suspense>
+      ) : null}
     </div>
   );
 }

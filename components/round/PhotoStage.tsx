@@ -4,6 +4,7 @@ import { useEffect, useState } from 'react';
 import useSWR from 'swr';
 import { MarkedPhoto } from '@/components/marks/MarkedPhoto';
 import { fetchJson } from '@/components/net/send';
+import type { ReadingTools } from '@/components/photo-reading/PhotoReading';
 import { PhotoFacts } from '@/components/photos/PhotoFacts';
 import { PhotoUploader } from '@/components/photos/PhotoUploader';
 import { usePhotoEdits } from '@/components/photos/usePhotoEdits';
@@ -23,10 +24,22 @@ interface Props {
   isOwner: boolean;
   view: View;
   onView: (view: View) => void;
+  previousRoundId: string | null;
+  /** What marks are read with, once it is here. */
+  reading?: ReadingTools | undefined;
 }
 
 /** The photos of a round: one on the table to mark, the others in a strip; one touch covers them all. */
-export function PhotoStage({ round, photos: first, userId, isOwner, view, onView }: Props) {
+export function PhotoStage({
+  round,
+  photos: first,
+  userId,
+  isOwner,
+  view,
+  onView,
+  previousRoundId,
+  reading,
+}: Props) {
   const url = `/api/rounds/${round.id}/photos`;
   const { data: photos = first, mutate } = useSWR<PhotoDto[]>(url, fetchJson, { fallbackData: first });
   const [chosenId, setChosenId] = useState(first[0]?.id ?? null);
@@ -60,7 +73,12 @@ export function PhotoStage({ round, photos: first, userId, isOwner, view, onView
             Covered. Press to show the photos.
           </button>
         ) : (
-          <MarkedPhoto key={`${chosen.id} ${chosen.revision}`} userId={userId} photo={chosen} />
+          <MarkedPhoto
+            key={`${chosen.id} ${chosen.revision}`}
+            userId={userId}
+            photo={chosen}
+            reading={reading}
+          />
         )
       ) : null}
       {photos.length > 0 ? (
@@ -103,6 +121,7 @@ export function PhotoStage({ round, photos: first, userId, isOwner, view, onView
           roundId={round.id}
           view={view}
           isFolded={photos.length > 0}
+          previousRoundId={previousRoundId}
           onAdded={put}
         />
       ) : null}

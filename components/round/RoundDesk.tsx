@@ -56,6 +56,12 @@ export function RoundDesk({ desk, number, photos, userId, unit }: Props) {
           isOwner={desk.isOwner}
           view={view}
           onView={setView}
+          previousRoundId={desk.rounds[at - 1]?.id ?? null}
+          reading={
+            knowledge
+              ? { knowledge, cut: round.cut, state: evidence.state, onEdit: evidence.edit }
+              : undefined
+          }
         />
         <Section title="What shows" id="shows">
           <SaveLine state={evidence.saveState} />

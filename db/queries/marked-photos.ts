@@ -19,7 +19,11 @@ const marksOf = sql<MarkOnPhoto[]>`(
   select coalesce(json_agg(json_build_object('id', m.id, 'kind', m.kind, 'severity', m.severity, 'side', m.side, 'points', m.points, 'note', m.note) order by m.id), '[]')
   from marks m where m.photo_id = photos.id)`;
 
-/** The photos of some rounds with everybody's marks on them, for looking at. Rounds that the viewer may not see give none. */
+const landmarksOf = sql<{ landmark: string; x: number; y: number }[]>`(
+  select coalesce(json_agg(json_build_object('landmark', l.landmark, 'x', l.x, 'y', l.y) order by l.landmark), '[]')
+  from photo_landmarks l where l.photo_id = photos.id)`;
+
+/** The photos of some rounds with everybody's marks on them and where the figure lies, for looking at. Rounds that the viewer may not see give none. */
 export function listMarkedPhotos(viewer: Viewer, ids: string[]) {
   return db()
     .select({
@@ -31,6 +35,7 @@ export function listMarkedPhotos(viewer: Viewer, ids: string[]) {
       widthPx: photos.widthPx,
       heightPx: photos.heightPx,
       marks: marksOf,
+      landmarks: landmarksOf,
     })
     .from(photos)
     .where(

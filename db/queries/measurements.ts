@@ -13,12 +13,13 @@ export interface MeasurementSetInput {
   takenAlone: boolean;
   waistPlace: 'narrowest' | 'navel' | 'band';
   note: string;
-  values: { measure: string; valueMm: Millimetres; typed: string }[];
+  /** Several takes of one measure count from 1. */
+  values: { measure: string; take?: number; valueMm: Millimetres; typed: string }[];
 }
 
 export interface MeasurementSetDto extends Omit<MeasurementSetInput, 'values'> {
   id: string;
-  values: { measure: string; valueMm: number; typed: string }[];
+  values: { measure: string; take: number; valueMm: number; typed: string }[];
 }
 
 const ownWearerIds = (viewer: Viewer) =>
@@ -37,7 +38,7 @@ export function listMeasurementSets(viewer: Viewer, wearerId: string): Promise<M
       waistPlace: measurementSets.waistPlace,
       note: measurementSets.note,
       values: sql<MeasurementSetDto['values']>`(
-        select coalesce(json_agg(json_build_object('measure', m.measure, 'valueMm', m.value_mm, 'typed', m.typed) order by m.measure, m.take), '[]')
+        select coalesce(json_agg(json_build_object('measure', m.measure, 'take', m.take, 'valueMm', m.value_mm, 'typed', m.typed) order by m.measure, m.take), '[]')
         from measurements m where m.set_id = measurement_sets.id)`,
     })
     .from(measurementSets)

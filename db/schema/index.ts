@@ -2,7 +2,9 @@
 export { audit } from './audit';
 export { changes } from './changes';
 export { doomedObjects } from './doomed-objects';
+export { fittedMeasures } from './fitted-measures';
 export { grants } from './grants';
+export { journalCuts } from './journal-cuts';
 export { journals } from './journals';
 export { mails } from './mails';
 export { marks } from './marks';

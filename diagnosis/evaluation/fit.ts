@@ -5,7 +5,10 @@ import type { Strengths } from '../inference/strengths';
 import { parsedCase, placeOf } from './published';
 import type { PublishedCase } from './published';
 
-/** A number of the strengths that is fitted, and how to set it. Knowledge (which link, which grade) is never fitted. */
+/**
+ * A number of the strengths that is fitted, and how to set it. Knowledge (which link, which grade) is never fitted, nor are
+ * thresholds and softness: a scale is by its definition the amount at which a fault is clearly seen, and ranks cannot tell.
+ */
 interface Knob {
   get: (strengths: Strengths) => number;
   set: (strengths: Strengths, value: number) => Strengths;
@@ -22,24 +25,6 @@ const KNOBS: readonly Knob[] = [
     low: 0.02,
     high: 0.97,
   })),
-  {
-    get: (strengths) => strengths.thresholds[0],
-    set: (strengths, value) => {
-      const by = value / strengths.thresholds[0];
-      return {
-        ...strengths,
-        thresholds: strengths.thresholds.map((t) => t * by) as [number, number, number],
-      };
-    },
-    low: 0.3,
-    high: 0.9,
-  },
-  {
-    get: (strengths) => strengths.width,
-    set: (strengths, width) => ({ ...strengths, width }),
-    low: 0.15,
-    high: 0.5,
-  },
   {
     get: (strengths) => strengths.leak.usual[0],
     set: (strengths, value) => {
@@ -67,7 +52,7 @@ export function meanReciprocalPlace(
 }
 
 /**
- * Fits the few common numbers by coordinate steps until none helps: grades in their order, thresholds, softness, leaks.
+ * Fits the few common numbers by coordinate steps until none helps: grades in their order, then leaks.
  * Steps that leave the order of the grades, or a knob's range, are not tried.
  */
 export function fitStrengths(

@@ -58,6 +58,8 @@ export const causeSchema = z.strictObject({
   name: words,
   description: words,
   prior: z.number().gt(0).lt(1),
+  /** Where it can only be in some kinds of cloth. */
+  onlyIn: z.array(z.enum(CLOTHS)).optional(),
   /** What to do, never on paper, before a new photo. */
   action: words,
   sources,

@@ -1,8 +1,9 @@
-import type { Case, RoundEvidence, Side } from '../case-schema';
+import type { Case, PastRound, RoundEvidence, Side } from '../case-schema';
 import { addTest } from './checks';
 import { Draft } from './draft';
 import type { Beliefs } from './draft';
 import { GRID_SIZE, zAt } from './grid';
+import { believedAfter, type Hindsight, hindsightOf } from './hindsight';
 import { layoutOf, variablesFor } from './layout';
 import type { Layout } from './layout';
 import { addMeasured, termsKey } from './measured';
@@ -40,12 +41,31 @@ export function prepare(knowledge: Knowledge, fitting: Case, strengths: Strength
   const prior = startBeliefs(layout, fitting, strengths);
   let start = prior;
   let exactBefore = true;
-  for (const round of fitting.history) {
-    const solution = solveRound(layout, tables, start, round, PAST_ROUND);
-    exactBefore &&= solution.exact;
-    start = advance(layout, solution.beliefs, prior, round);
-  }
+  fitting.history.forEach((round, i) => {
+    const next = fitting.history[i + 1] ?? fitting;
+    const { beliefs, exact } = lookBack(layout, tables, start, round, next);
+    exactBefore &&= exact;
+    start = advance(layout, beliefs, prior, round);
+  });
   return { layout, tables, prior, start, exactBefore };
+}
+
+/** A past round, read with what came after it. */
+function lookBack(
+  layout: Layout,
+  tables: Tables,
+  start: Beliefs,
+  round: PastRound,
+  next: RoundEvidence,
+): { beliefs: Beliefs; exact: boolean } {
+  const then = solveRound(layout, tables, start, round, PAST_ROUND);
+  const hindsight = hindsightOf(layout, round, next);
+  if (!hindsight) return then;
+  const now = solveRound(layout, tables, start, round, PAST_ROUND, hindsight);
+  return {
+    beliefs: believedAfter(then.beliefs, now.beliefs, hindsight),
+    exact: then.exact && now.exact,
+  };
 }
 
 function startBeliefs(layout: Layout, fitting: Case, strengths: Strengths): Beliefs {
@@ -79,13 +99,14 @@ export function solveRound(
   start: Beliefs,
   round: RoundEvidence,
   care = CURRENT_ROUND,
+  hindsight: Hindsight | null = null,
 ): Solution {
   const notes = notesOf(layout, round.signs, round.absent);
   const gather = (weigh: AbsenceWeight) => {
     const draft = new Draft(start);
-    for (const note of notes) addSign(draft, layout, tables, note, weigh);
+    for (const note of notes) addSign(draft, layout, tables, note, weigh, hindsight);
     for (const test of sortedBy(round.tests, ({ check, side }) => `${check} ${side}`))
-      addTest(draft, layout, tables, test);
+      addTest(draft, layout, tables, test, hindsight);
     for (const measured of sortedBy(round.measured, termsKey)) addMeasured(draft, layout, measured);
     return solve(draft, care);
   };

@@ -1,6 +1,7 @@
 import type { TestResult } from '../case-schema';
 import type { Check, Link } from '../garments/schema';
 import type { Draft } from './draft';
+import { type Hindsight, seenWith } from './hindsight';
 import { GRID_REACH, SD_MIN_Z, zAt } from './grid';
 import { variablesFor } from './layout';
 import type { Layout } from './layout';
@@ -16,10 +17,17 @@ const AMOUNT_SD_MM = { pinch: 3, gap: 4 } as const;
 const AMOUNT_SD_SHARE = 0.1;
 
 /** Adds what a check showed: outcomes are tried in order, so the earlier ones did not happen; then its amount. */
-export function addTest(draft: Draft, layout: Layout, tables: Tables, test: TestResult): void {
+export function addTest(
+  draft: Draft,
+  layout: Layout,
+  tables: Tables,
+  test: TestResult,
+  hindsight: Hindsight | null,
+): void {
   const check = layout.index.knowledge.checks[layout.index.checks.get(test.check)!]!;
   const at = check.outcomes.findIndex(({ id }) => id === test.outcome);
-  addOutcome(draft, layout, tables, check, at, test.side);
+  const went = hindsight?.wentAnswer(test.check, test.side) ? hindsight : null;
+  addOutcome(draft, layout, tables, check, at, test.side, went);
   if (test.amountMm !== null) addAmount(draft, layout, check, at, test);
 }
 
@@ -31,15 +39,17 @@ export function addOutcome(
   check: Check,
   at: number,
   side: TestResult['side'],
+  went: Hindsight | null = null,
 ): void {
   for (const { links } of check.outcomes.slice(0, at))
     for (const source of sourcesOf(layout, tables, links, side, 1))
       draft.temper(source.variable, (state) => Math.log(source.cumulative[0]![state]!));
   const { id, links } = check.outcomes[at]!;
-  const leak = at === check.outcomes.length - 1 ? REMAINDER_LEAK : OUTCOME_LEAK;
+  const leak = (at === check.outcomes.length - 1 ? REMAINDER_LEAK : OUTCOME_LEAK) * (went?.leftOfLeak ?? 1);
   const slots = sourcesOf(layout, tables, links, side, 1).map((source) => {
     const { miss } = reaching(source, 1);
-    return { variable: source.variable, miss, hit: miss.map((stays) => 1 - stays), parts: [0] };
+    const fires = { miss, hit: miss.map((stays) => 1 - stays) };
+    return { variable: source.variable, ...seenWith(fires, went?.leftOf(source.variable)), parts: [0] };
   });
   if (slots.length > 0)
     draft.findings.push({

@@ -67,9 +67,10 @@ function leansOf(layout: Layout, fitting: Case): Map<string, number> {
 }
 
 function causePrior(layout: Layout, fitting: Case, cause: number): Float64Array {
-  const { id, prior } = layout.index.knowledge.causes[cause]!;
+  const { id, prior, onlyIn } = layout.index.knowledge.causes[cause]!;
   if (fitting.causes.present.includes(id)) return Float64Array.of(1 - CAUSE_KNOWN, CAUSE_KNOWN);
-  if (fitting.causes.absent.includes(id)) return Float64Array.of(CAUSE_KNOWN, 1 - CAUSE_KNOWN);
+  const cannotBe = onlyIn !== undefined && !onlyIn.includes(fitting.cloth.kind);
+  if (cannotBe || fitting.causes.absent.includes(id)) return Float64Array.of(CAUSE_KNOWN, 1 - CAUSE_KNOWN);
   return Float64Array.of(1 - prior, prior);
 }
 

@@ -35,6 +35,11 @@ export function advance(layout: Layout, beliefs: Beliefs, prior: Beliefs, round:
   return { marginals, pairs };
 }
 
+/** The needs that the changes after a round touched, couplings included. */
+export function changedVariables(layout: Layout, round: PastRound): ReadonlySet<number> {
+  return new Set(shiftsOf(layout, round).keys());
+}
+
 interface Shift {
   byZ: number;
   blurZ: number;

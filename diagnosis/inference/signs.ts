@@ -1,6 +1,7 @@
 import type { Side, SignAbsent, SignSeen } from '../case-schema';
 import type { Sign } from '../garments/schema';
 import type { Draft, OpenFinding } from './draft';
+import { type Hindsight, seenWith } from './hindsight';
 import type { Layout } from './layout';
 import { reaching, sourcesOf } from './sources';
 import type { Source, Tables } from './sources';
@@ -49,6 +50,7 @@ export function addSign(
   tables: Tables,
   notes: SignNotes,
   weigh: AbsenceWeight,
+  hindsight: Hindsight | null,
 ): void {
   const sign = layout.index.knowledge.signs[notes.sign]!;
   if (layout.muslin === 'shorts' && sign.needsFullLength) return;
@@ -59,7 +61,7 @@ export function addSign(
     addTwoSided(draft, layout, tables, notes.sign, left, right, weigh);
   else {
     const side: Side = left && right ? 'both' : left ? 'left' : 'right';
-    addOneSided(draft, layout, tables, notes.sign, side, (left ?? right)!, weigh);
+    addOneSided(draft, layout, tables, notes.sign, side, (left ?? right)!, weigh, hindsight);
   }
 }
 
@@ -86,6 +88,7 @@ function addOneSided(
   side: Side,
   noted: Noted,
   weigh: AbsenceWeight,
+  hindsight: Hindsight | null,
 ): void {
   const sign = layout.index.knowledge.signs[place]!;
   const { severity, reliability } = noted;
@@ -94,10 +97,11 @@ function addOneSided(
     for (const source of sourcesOf(layout, tables, sign.links, side, 1)) addAbsence(draft, source, weight);
     return;
   }
-  const above = leakOf(tables, sign, reliability, 1);
+  const went = hindsight?.wentSign(sign.id, side) ? hindsight : null;
+  const above = leakOf(tables, sign, reliability, went?.leftOfLeak ?? 1);
   const slots = sourcesOf(layout, tables, sign.links, side, reliability).map((source) => ({
     variable: source.variable,
-    ...reaching(source, severity),
+    ...seenWith(reaching(source, severity), went?.leftOf(source.variable)),
     parts: [0],
   }));
   const leak = Float64Array.of(1 - above[severity]!, above[severity]! - above[severity + 1]!);

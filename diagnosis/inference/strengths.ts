@@ -18,23 +18,23 @@ export interface Strengths {
   tail: number;
 }
 
-/** Set by judgement before anything was fitted; where fitting starts from. */
+/**
+ * Set by judgement before anything was fitted; where fitting starts from. A need of one scale is by definition clearly seen;
+ * half of it is faint, twice as much pulls.
+ */
 export const STRENGTHS_BEFORE: Strengths = {
   grade: { defining: 0.92, strong: 0.78, usual: 0.58, sometimes: 0.34, rare: 0.14 },
-  thresholds: [0.55, 1.05, 2.2],
-  width: 0.28,
-  leak: { low: [0.02, 0.008, 0.002], usual: [0.05, 0.02, 0.004], high: [0.12, 0.05, 0.01] },
+  thresholds: [0.5, 1, 2],
+  width: 0.3,
+  leak: { low: [0.01, 0.003, 0.001], usual: [0.03, 0.008, 0.0015], high: [0.1, 0.03, 0.005] },
   tail: 0.06,
 };
 
-/**
- * In use: fitted by coordinate steps on the tuning cases, from those above. Only what moved is named: two grades and the
- * thresholds; the other grades, softness, leaks and tails stayed where they were.
- */
+/** In use: fitted by coordinate steps on the tuning cases, from those above. What moved is named: the two weak grades and the leaks. */
 export const STRENGTHS: Strengths = {
   ...STRENGTHS_BEFORE,
-  grade: { ...STRENGTHS_BEFORE.grade, strong: 0.86, usual: 0.45 },
-  thresholds: [0.79, 1.5, 3.15],
+  grade: { ...STRENGTHS_BEFORE.grade, sometimes: 0.26, rare: 0.11 },
+  leak: { low: [0.009, 0.0027, 0.0009], usual: [0.019, 0.005, 0.001], high: [0.09, 0.027, 0.0045] },
 };
 
 /** A cause that is present acts like a need this many scales out. */

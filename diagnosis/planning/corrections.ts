@@ -6,6 +6,7 @@ import { NO_AMOUNTS, amountsOf, limitsOf } from './amounts';
 import { expectedMisfit } from './misfit';
 import { tailAt } from './outlook';
 import type { Outlook, Tail } from './outlook';
+import { type Support, supportOf } from './support';
 import { wordOf } from './words';
 
 /** Amounts tried for the best admissible one, as parts of the cap. */
@@ -35,9 +36,10 @@ export interface Scored {
 export function scoreCorrections(outlook: Outlook): { scored: Scored[]; spent: Correction[] } {
   const scored: Scored[] = [];
   const spent: Correction[] = [];
+  const support = supportOf(outlook);
   for (const correction of outlook.layout.index.knowledge.corrections) {
     for (const side of sidesOf(outlook, correction)) {
-      const one = scoreOne(outlook, correction, side);
+      const one = scoreOne(outlook, support, correction, side);
       if (one) scored.push(one);
       else spent.push(correction);
     }
@@ -83,7 +85,7 @@ function servedBy({ layout, marginals }: Outlook, { vector }: Correction, side: 
     );
 }
 
-function scoreOne(outlook: Outlook, correction: Correction, side: Side): Scored | null {
+function scoreOne(outlook: Outlook, support: Support, correction: Correction, side: Side): Scored | null {
   const serves = servedBy(outlook, correction, side);
   const most = serves.reduce<Tail | null>(
     (best, tail) => (best && best.probability >= tail.probability ? best : tail),
@@ -92,7 +94,12 @@ function scoreOne(outlook: Outlook, correction: Correction, side: Side): Scored 
   const probability = most?.probability ?? 0;
   const limits = limitsOf(outlook, correction, side);
   if (limits && limits.leftMm <= 0) return null;
-  const gain = limits ? bestGain(outlook, correction, side, limits.capMm) : remedyGain(outlook, serves);
+  const gain = limits
+    ? bestGain(outlook, support, correction, side, limits.capMm)
+    : remedyGain(
+        outlook,
+        serves.filter(({ dimension, direction }) => support(dimension, direction)),
+      );
   const loss = most ? outlook.layout.index.knowledge.dimensions[most.dimension]!.loss[most.direction] : 1;
   const score = gain - loss * (NEEDLESS_COST + RISK_COST * correction.risk) * (1 - probability);
   const row: CorrectionRow = {
@@ -110,11 +117,12 @@ function scoreOne(outlook: Outlook, correction: Correction, side: Side): Scored 
 }
 
 /**
- * Expected misfit removed at the best amount up to a cap. A coupling is no reason to make a change: what it may mend does
- * not count; what it spoils does, less where the order of work comes to it later anyway (a hem that drops is set last).
+ * Expected misfit removed at the best amount up to a cap. A coupling is no reason to make a change, nor is a need that nothing
+ * found speaks for: what that may mend does not count; what it spoils does, of a coupling less where the order of work comes to it later anyway (a hem that drops is set last).
  */
 function bestGain(
   { layout, marginals }: Outlook,
+  support: Support,
   { vector, stage }: Correction,
   side: Side,
   capMm: number,
@@ -122,12 +130,14 @@ function bestGain(
   const moves = vector.flatMap(({ dimension, perMm, coupling }) => {
     const at = layout.index.dimensions.get(dimension)!;
     const later = layout.index.knowledge.dimensions[at]!.stage > stage;
+    const isMeant = support(at, perMm > 0 ? 'more' : 'less');
     return variablesFor(layout, at, side).map((variable) => {
       const belief = marginals[variable]!;
       const before = expectedMisfit(layout, at, belief, 0);
       return (amountMm: number) => {
         const gain = before - expectedMisfit(layout, at, belief, (-perMm * amountMm) / layout.scaleMm[at]!);
-        return coupling ? Math.min(0, gain) * (later ? LATER_SHARE : 1) : gain;
+        if (coupling) return Math.min(0, gain) * (later ? LATER_SHARE : 1);
+        return isMeant ? gain : Math.min(0, gain);
       };
     });
   });

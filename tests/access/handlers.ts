@@ -50,6 +50,39 @@ const PATTERNS = [
   handler('DELETE', 'patterns/[patternId]', { path: ({ patternId }) => `/api/patterns/${patternId}`, access: owner }),
 ]; // prettier-ignore
 
+const BEFORE_THE_CUT = [
+  handler('PUT', 'patterns/[patternId]/chart', {
+    path: ({ patternId }) => `/api/patterns/${patternId}/chart`,
+    access: owner,
+    body: () => ({
+      kind: 'body',
+      unit: 'cm',
+      pasted: 'Size\tHip\n10\t98\n12\t102',
+      allowance: null,
+      leavesOut: false,
+    }),
+  }),
+  handler('PATCH', 'journals/[journalId]/cut', {
+    path: ({ journalId }) => `/api/journals/${journalId}/cut`,
+    access: owner,
+    body: () => ({ version: 0, patternWaist: 'band', ease: { hip: { typed: '6 cm', unit: 'cm' } } }),
+  }),
+  handler('PUT', 'journals/[journalId]/fitted', {
+    path: ({ journalId }) => `/api/journals/${journalId}/fitted`,
+    access: owner,
+    body: () => ({ unit: 'cm', measures: [{ measure: 'back-crotch-length', typed: '37,2' }] }),
+  }),
+  handler('POST', 'rounds/[roundId]/measured', {
+    path: ({ roundId }) => `/api/rounds/${roundId}/measured`,
+    access: owner,
+    body: ({ journalId }) => ({ journalId }),
+  }),
+  handler('DELETE', 'measured/[measuredId]', {
+    path: ({ measuredId }) => `/api/measured/${measuredId}`,
+    access: owner,
+  }),
+];
+
 const JOURNALS = [
   handler('GET', 'journals', { path: () => '/api/journals', access: own }),
   handler('POST', 'journals', {
@@ -116,6 +149,12 @@ const PHOTOS = [
     access: fitters,
     body: () => ({ revision: 1, upserts: [], deletes: [] }),
   }),
+  handler('GET', 'photos/[photoId]/landmarks', { path: ({ photoId }) => `/api/photos/${photoId}/landmarks`, access: readers }),
+  handler('PUT', 'photos/[photoId]/landmarks', {
+    path: ({ photoId }) => `/api/photos/${photoId}/landmarks`,
+    access: fitters,
+    body: () => ({ revision: 1, seen: 0, landmarks: [] }),
+  }),
 ]; // prettier-ignore
 
 const NOWHERE = (['GET', 'POST', 'PUT', 'PATCH', 'DELETE'] as const).map((method) =>
@@ -128,6 +167,7 @@ export const HANDLER_ROWS: HandlerRow[] = [
   handler('PATCH', 'me', { path: () => '/api/me', access: own, body: () => preferences }),
   ...WEARERS,
   ...PATTERNS,
+  ...BEFORE_THE_CUT,
   ...JOURNALS,
   ...ROUNDS,
   ...PHOTOS,

@@ -11,6 +11,7 @@ export interface World {
   roundId: string;
   changeId: string;
   photoId: string;
+  measuredId: string;
   /** The secret of each role's session; none for who is signed out. */
   sessions: Record<Role, string | null>;
 }
@@ -24,6 +25,7 @@ export const unknownIds = (): Ids => ({
   roundId: v7(),
   changeId: v7(),
   photoId: v7(),
+  measuredId: v7(),
 });
 
 const DAY_MS = 86_400_000;
@@ -50,6 +52,8 @@ async function addThings(tx: TransactionSql, ownerId: string, ids: Ids): Promise
   await tx`insert into rounds (id, journal_id, muslin_id, number, begun) values (${v7()}, ${ids.journalId}, ${muslinId}, 2, 're-baste')`;
   await tx`insert into changes (id, round_id, author_id, correction, side)
     values (${ids.changeId}, ${ids.roundId}, ${ownerId}, 'any', 'both')`;
+  await tx`insert into round_measured (id, round_id, label, terms, need_mm, sd_mm)
+    values (${ids.measuredId}, ${ids.roundId}, 'Hip', '[{"dimension":"hip-front","weight":1,"side":"both"}]', 12, 8)`;
   await tx`insert into photos (id, round_id, upload_key, view, width_px, height_px, master_sha256, master_bytes)
     values (${ids.photoId}, ${ids.roundId}, ${v7()}, 'front', 800, 1200, 'none', 1)`;
 }

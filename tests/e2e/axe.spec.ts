@@ -10,6 +10,7 @@ const SIGNED_OUT = [
   '/verify',
   '/reset',
   '/dev/mail',
+  '/dev/parts',
   '/nothing-here',
 ];
 const SIGNED_IN = [
@@ -45,6 +46,15 @@ async function expectNoSideways(page: Page, path: string): Promise<void> {
   expect(over, `${path} is wider than the screen`).toBeLessThanOrEqual(0);
 }
 
+/** The address of the first thing that a list shows. */
+async function firstOf(page: Page, list: string): Promise<string> {
+  await page.goto(`/${list}`);
+  const links = await page
+    .locator(`a[href^="/${list}/0"]`)
+    .evaluateAll((all) => all.map((link) => link.getAttribute('href') ?? ''));
+  return links.find((href) => new RegExp(`^/${list}/[^/]+$`).test(href)) ?? '';
+}
+
 for (const colorScheme of ['light', 'dark'] as const) {
   test(`axe finds nothing on pages for everyone, ${colorScheme}`, async ({ page }) => {
     await page.emulateMedia({ colorScheme });
@@ -59,10 +69,9 @@ for (const colorScheme of ['light', 'dark'] as const) {
     test.setTimeout(300_000);
     await page.emulateMedia({ colorScheme });
     await signIn(page);
-    const journals = await page
-      .locator('a[href^="/journals/0"]')
-      .evaluateAll((links) => links.map((link) => link.getAttribute('href') ?? ''));
-    const journal = journals.find((href) => /^\/journals\/[^/]+$/.test(href)) ?? '';
+    const journal = await firstOf(page, 'journals');
+    const wearer = await firstOf(page, 'wearers');
+    const pattern = await firstOf(page, 'patterns');
     const deep = [
       journal,
       `${journal}/rounds/1`,
@@ -70,6 +79,12 @@ for (const colorScheme of ['light', 'dark'] as const) {
       `${journal}/rounds/new`,
       `${journal}/compare`,
       `${journal}/record`,
+      `${journal}/cut`,
+      `${journal}/cut/sheet`,
+      wearer,
+      `${wearer}/measure`,
+      pattern,
+      `${pattern}/chart`,
     ];
     for (const path of [...SIGNED_IN, ...deep]) {
       await page.goto(path);

@@ -43,7 +43,7 @@ test.beforeEach(({ page }) => watchShifts(page));
 
 test('pages for everyone', async ({ page }) => {
   await lookAtAll(page, {
-    landing: '/', 'sign-in': '/sign-in', 'sign-up': '/sign-up', forgot: '/forgot', verify: '/verify', reset: '/reset', nothing: '/nothing-here',
+    landing: '/', 'sign-in': '/sign-in', 'sign-up': '/sign-up', forgot: '/forgot', verify: '/verify', reset: '/reset', nothing: '/nothing-here', parts: '/dev/parts',
   }); // prettier-ignore
 });
 

@@ -132,7 +132,7 @@ export const lookAlikes: LookAlikeGroup[] = [
     name: 'a hem long standing, short sitting',
     case: signs('hem-folds-on-shoe'),
     steps: [
-      { check: 'stand-up-again', outcomes: [{ outcome: 'stays-up', shows: [more('calf-girth'), more('hem-width')] }, { outcome: 'crawls-then-falls', shows: [more('back-extension')] }, { outcome: 'falls', shows: [less('leg-length')] }] },
+      { check: 'stand-up-again', outcomes: [{ outcome: 'stays-up', shows: [more('calf-girth')] }, { outcome: 'crawls-then-falls', shows: [more('back-extension')] }, { outcome: 'falls', shows: [less('leg-length')] }] },
     ],
   },
   {

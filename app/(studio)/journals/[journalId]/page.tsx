@@ -1,12 +1,8 @@
 import type { Metadata } from 'next';
 import { notFound } from 'next/navigation';
 import { JournalActions } from '@/components/journal/JournalActions';
-import { Ledger } from '@/components/journal/Ledger';
-import { ledgerRows } from '@/components/journal/ledger-rows';
-import { RoundTickets } from '@/components/journal/RoundTickets';
-import { LinkButton } from '@/components/ui/LinkButton';
+import { JournalParts } from '@/components/journal/JournalParts';
 import { PageHead } from '@/components/ui/PageHead';
-import { Section } from '@/components/ui/Section';
 import { findDesk } from '@/db/queries/desk';
 import { findJournal } from '@/db/queries/journals';
 import { requireViewer } from '@/lib/auth/viewer';
@@ -26,15 +22,7 @@ export default async function JournalPage({ params }: PageProps<'/journals/[jour
         lead={`For ${journal.wearerName}, from ${journal.patternName}`}
         actions={<JournalActions journal={journal} />}
       />
-      <div className="grid gap-10">
-        <Section title="Rounds">
-          <RoundTickets journalId={id} tickets={journal.tickets} />
-        </Section>
-        <Section title="The ledger">
-          <Ledger rows={ledgerRows(journal.garment, desk?.rounds ?? [])} unit={viewer.unit} />
-          {desk ? <LinkButton href={`/journals/${id}/record`}>The record, piece by piece</LinkButton> : null}
-        </Section>
-      </div>
+      <JournalParts journal={journal} desk={desk} unit={viewer.unit} />
     </>
   );
 }

@@ -1,6 +1,7 @@
 import type { Metadata } from 'next';
 import { notFound } from 'next/navigation';
 import { PatternEditor } from '@/components/patterns/PatternEditor';
+import { LinkButton } from '@/components/ui/LinkButton';
 import { PageHead } from '@/components/ui/PageHead';
 import { findPattern } from '@/db/queries/patterns';
 import { requireViewer } from '@/lib/auth/viewer';
@@ -15,7 +16,10 @@ export default async function PatternPage({ params }: PageProps<'/patterns/[patt
   const { id, version, name, maker, clothKind, stretchPercent, notes } = found;
   return (
     <>
-      <PageHead title={name} />
+      <PageHead
+        title={name}
+        actions={<LinkButton href={`/patterns/${id}/chart`}>Size chart and measures</LinkButton>}
+      />
       <PatternEditor existing={{ id, version, pattern: { name, maker, clothKind, stretchPercent, notes } }} />
     </>
   );

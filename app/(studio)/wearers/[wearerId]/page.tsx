@@ -1,8 +1,8 @@
 import type { Metadata } from 'next';
 import { notFound } from 'next/navigation';
+import { LinkButton } from '@/components/ui/LinkButton';
 import { PageHead } from '@/components/ui/PageHead';
 import { Section } from '@/components/ui/Section';
-import { MeasurementEditor } from '@/components/wearers/MeasurementEditor';
 import { MeasurementHistory } from '@/components/wearers/MeasurementHistory';
 import { WearerEditor } from '@/components/wearers/WearerEditor';
 import { listMeasurementSets } from '@/db/queries/measurements';
@@ -18,18 +18,17 @@ export default async function WearerPage({ params }: PageProps<'/wearers/[wearer
   const [found, sets] = await Promise.all([findWearer(viewer, id), listMeasurementSets(viewer, id)]);
   if (!found) notFound();
   const { id: _id, version, ...wearer } = found;
-  const today = new Date().toISOString().slice(0, 10);
   return (
     <>
       <PageHead title={found.name} />
       <div className="grid gap-10">
         <Section title="Measures">
-          {viewer.hidesMeasurements ? (
-            <p>Hidden, as you set it.</p>
-          ) : (
-            <MeasurementHistory sets={sets} unit={viewer.unit} />
-          )}
-          <MeasurementEditor wearerId={id} unit={viewer.unit} today={today} />
+          <MeasurementHistory sets={sets} unit={viewer.unit} isHidden={viewer.hidesMeasurements} />
+          <div>
+            <LinkButton look="chalk" href={`/wearers/${id}/measure`}>
+              {sets.length === 0 ? 'Take the measures' : 'Measure again'}
+            </LinkButton>
+          </div>
         </Section>
         <Section title="Who it is">
           <WearerEditor existing={{ id, version, wearer }} />

@@ -12,7 +12,7 @@ export const lifts: Check[] = [
   check({ id: 'slide-band-down-behind', name: 'Slide the band down behind', question: 'Slide the band down 12 mm (1/2 in) at centre back. Does the seam in the seat come free?', how: 'Both hands at the back of the band.', effort: 'lift',
     outcomes: [['relief', 'It comes free', link('back-rise', 'more', 'defining')], ['no-relief', 'It stays drawn in', link('back-extension', 'more', 'strong'), link('hip-back', 'more', 'usual')]] }),
   check({ id: 'sit-and-mark-band', name: 'Sit and mark the band', question: 'Chalk where the band sits on the underwear, then sit. How far does it fall behind?', how: 'Mark, sit upright on a hard chair, reach round and feel for the mark.', effort: 'lift',
-    outcomes: [['over-15-mm', 'More than 15 mm (5/8 in)', link('back-rise', 'more', 'strong', 'W4'), link('back-slope', 'more', 'usual')], ['up-to-15-mm', 'Less']], sources: ['W4'] }),
+    outcomes: [['over-15-mm', 'More than 15 mm (5/8 in)', link('back-rise', 'more', 'defining', 'W4', 'trousers:TF015'), link('back-slope', 'more', 'usual')], ['up-to-15-mm', 'Less']], sources: ['W4'] }),
   check({ id: 'gap-standing-and-sitting', name: 'The gap standing and sitting', question: 'Is the gap at the back waist the same standing and sitting?', how: 'Put fingers in the gap standing, then sitting.', effort: 'lift',
     outcomes: [['same', 'The same', link('waist-back', 'less', 'strong')], ['wider-sitting', 'Wider when sitting', link('back-rise', 'more', 'strong')]] }),
   check({ id: 'pinch-front-thigh', name: 'Pinch the front thigh', question: 'Can 10 mm (3/8 in) be pinched on the front thigh?', how: 'With two fingers, standing.', effort: 'lift',

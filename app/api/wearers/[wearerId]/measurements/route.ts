@@ -10,9 +10,9 @@ const params = z.object({ wearerId: z.uuid() });
 export const POST = route(
   { access: 'viewer', params, body: measurementSetSchema },
   async ({ viewer, params, body: { id, unit, values, ...set } }) => {
-    const read = values.map(({ measure, typed }) => {
+    const read = values.map(({ measure, take, typed }) => {
       const { mm, typed: kept } = readAmount({ typed, unit }, measure);
-      return { measure, valueMm: mm, typed: kept };
+      return { measure, take: take ?? 1, valueMm: mm, typed: kept };
     });
     orNotFound(await addMeasurementSet(viewer, params.wearerId, id, { ...set, values: read }));
     return listMeasurementSets(viewer, params.wearerId);

@@ -1,7 +1,8 @@
 import type { Metadata } from 'next';
-import Link from 'next/link';
 import { notFound } from 'next/navigation';
+import { MeasuredEvidence } from '@/components/cut/MeasuredEvidence';
 import { RoundDesk } from '@/components/round/RoundDesk';
+import { RoundHead } from '@/components/round/RoundHead';
 import { findDesk } from '@/db/queries/desk';
 import { listPhotos } from '@/db/queries/photos';
 import { requireViewer } from '@/lib/auth/viewer';
@@ -18,15 +19,7 @@ export default async function RoundPage({ params }: PageProps<'/journals/[journa
   const photos = await listPhotos(viewer, round.id);
   return (
     <>
-      <div className="mb-5">
-        <Link
-          href={`/journals/${desk.journalId}`}
-          className="inline-flex min-h-11 items-center text-chalk underline"
-        >
-          {desk.journalName}
-        </Link>
-        <h1 className="text-2xl">Round {round.number}</h1>
-      </div>
+      <RoundHead journalId={desk.journalId} name={desk.journalName} number={round.number} />
       <RoundDesk
         key={round.id}
         desk={desk}
@@ -35,6 +28,7 @@ export default async function RoundPage({ params }: PageProps<'/journals/[journa
         userId={viewer.userId}
         unit={viewer.unit}
       />
+      <MeasuredEvidence measured={round.measured} unit={viewer.unit} isOwner={desk.isOwner} />
     </>
   );
 }
