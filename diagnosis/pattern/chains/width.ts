@@ -58,12 +58,21 @@ const centreBack = (sign: 1 | -1): ChainStep => ({
 });
 
 const BESIDE_DART_MM = 8;
+/** Room that a long slash leaves to the ends of waist and hem, mm. */
+const FROM_ENDS_MM = 25;
+
+/** A plumb line that passes both waist and hem: beside the dart, or without one in the middle of what they share. */
+function besideGrain(piece: Piece): number {
+  const x = (name: string) => pointOf(piece, name).x;
+  const low = Math.max(x('side-waist'), x('hem-out')) + FROM_ENDS_MM;
+  const high = Math.min(x('centre-waist'), x('hem-in')) - FROM_ENDS_MM;
+  return hasPoint(piece, 'dart-1-in') ? Math.max(low, x('dart-1-in') + BESIDE_DART_MM) : (low + high) / 2;
+}
+
 /** A plumb line on the inner side of the dart, through waist and hem. */
 const lengthwise = (piece: Piece, amountMm: number): Parallel => ({
   axis: 'x',
-  at: hasPoint(piece, 'dart-1-in')
-    ? pointOf(piece, 'dart-1-in').x + BESIDE_DART_MM
-    : (pointOf(piece, 'side-waist').x + pointOf(piece, 'centre-waist').x) / 2,
+  at: besideGrain(piece),
   edges: ['waist', 'hem'],
   moves: 'centre-waist',
   amountMm,

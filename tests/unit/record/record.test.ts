@@ -128,6 +128,14 @@ describe('the pieces now', () => {
     );
     expect(final.ok && final.pieces.map(({ leg, piece }) => `${leg} ${piece}`)).toEqual(['both back']);
   });
+  it('bring the band along when the waist has changed, and the fly when its front has', () => {
+    const piecesOf = (id: string) => {
+      const final = drawn(deskOf([change('1', id, made(12))]));
+      return final.ok && final.pieces.map(({ piece }) => piece);
+    };
+    expect(piecesOf('let-out-waist-front')).toEqual(['front', 'waistband']);
+    expect(piecesOf('raise-centre-front')).toEqual(['front', 'fly']);
+  });
   it('part into legs once a change was made on one of them', () => {
     const final = drawn(
       deskOf([
