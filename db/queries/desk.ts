@@ -8,6 +8,7 @@ import { patterns } from '../schema/patterns';
 import { rounds } from '../schema/rounds';
 import { wearers } from '../schema/wearers';
 import { roundFacts } from './round-facts';
+import { noteLook } from './sharing';
 import type { Viewer } from './viewer';
 import { roundVisibleTo } from './visible-to';
 
@@ -22,7 +23,7 @@ const latestBody = sql<Partial<Record<'waist' | 'hip' | 'thigh' | 'knee' | 'calf
 
 /**
  * Everything the reading of a journal stands on: who it is for, and every round that the viewer may see with what was found in
- * it, oldest first. Null when there is none to see.
+ * it, oldest first. That someone invited looked is noted. Null when there is none to see.
  */
 export async function findDesk(viewer: Viewer, journalId: string) {
   const rows = await db()
@@ -64,6 +65,7 @@ export async function findDesk(viewer: Viewer, journalId: string) {
     .orderBy(asc(rounds.number));
   const [first] = rows;
   if (!first) return null;
+  if (!first.isOwner) await noteLook(viewer, journalId);
   const { round: _round, ...head } = first;
   return { ...head, rounds: rows.map((row) => row.round) };
 }

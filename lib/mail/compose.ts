@@ -74,3 +74,22 @@ export const passwordChangedLetter = (origin: string): MailBody =>
     { words: 'Choose another password', href: `${origin}/forgot` },
     'If this was not you, choose another password at once: only this mailbox can.',
   );
+
+const NAME_MAX = 40;
+
+/** A name that someone chose for themselves, as part of one line of a letter: no line breaks, no control characters, not long. */
+const nameInLine = (name: string): string =>
+  name
+    .replace(/[\p{Cc}\p{Cf}\p{Zl}\p{Zp}]+/gu, ' ')
+    .trim()
+    .slice(0, NAME_MAX) || 'Somebody';
+
+export const invitationLetter = (origin: string, inviterName: string): MailBody =>
+  letter(
+    `${nameInLine(inviterName)} asks for your eye`,
+    [
+      `${nameInLine(inviterName)} keeps a sewing journal in Ruckle and would like you to look at part of it. The page says how far they open it to you, and lets you say no. You need an account with this address.`,
+    ],
+    { words: 'See the invitation', href: `${origin}/invitation?token=${LINK_SECRET}` },
+    'If you do not know them, leave it: nothing is opened to anyone until you say yes.',
+  );

@@ -122,6 +122,19 @@ const NOWHERE = (['GET', 'POST', 'PUT', 'PATCH', 'DELETE'] as const).map((method
   handler(method, '[...rest]', { path: () => '/api/no/such/address', access: only('signed-out') }),
 );
 
+const invited = only('signed-out', 'other');
+const invitation = (email: string) => ({ id: v7(), email, level: 'read', expiresInDays: 30 });
+
+const SHARING = [
+  handler('POST', 'journals/[journalId]/grants', { path: ({ journalId }) => `/api/journals/${journalId}/grants`, access: owner, body: () => invitation(`${v7()}@example.org`) }),
+  handler('POST', 'rounds/[roundId]/grants', { path: ({ roundId }) => `/api/rounds/${roundId}/grants`, access: owner, body: () => invitation(`${v7()}@example.org`) }),
+  handler('DELETE', 'grants/[grantId]', { path: ({ grantId }) => `/api/grants/${grantId}`, access: owner }),
+  handler('POST', 'grants/[grantId]/resend', { path: ({ invitationId }) => `/api/grants/${invitationId}/resend`, access: owner }),
+  handler('POST', 'invitations', { path: () => '/api/invitations', access: invited, body: ({ invitationToken }) => ({ token: invitationToken, answer: 'accept' }) }),
+  handler('POST', 'invitations/[grantId]', { path: ({ invitationId }) => `/api/invitations/${invitationId}`, access: invited, body: () => ({ answer: 'block' }) }),
+  handler('POST', 'journals/[journalId]/leave', { path: ({ journalId }) => `/api/journals/${journalId}/leave`, access: only('signed-out', 'reader', 'fitter', 'pattern maker') }),
+]; // prettier-ignore
+
 export const HANDLER_ROWS: HandlerRow[] = [
   ...NOWHERE,
   handler('GET', 'health', { path: () => '/api/health', access: everyone }),
@@ -131,4 +144,5 @@ export const HANDLER_ROWS: HandlerRow[] = [
   ...JOURNALS,
   ...ROUNDS,
   ...PHOTOS,
+  ...SHARING,
 ];

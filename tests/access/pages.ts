@@ -13,6 +13,7 @@ export const PAGE_ROWS: PageRow[] = [
   page('(auth)/verify', () => '/verify', everyone),
   page('(auth)/forgot', () => '/forgot', everyone),
   page('(auth)/reset', () => '/reset', everyone),
+  page('(auth)/invitation', ({ invitationToken }) => `/invitation?token=${invitationToken}`, everyone),
   page('dev/mail', () => '/dev/mail', everyone), // there only on the one machine that RUCKLE_LOCAL names
   page('(studio)/settings', () => '/settings', own),
   page('(studio)/wearers', () => '/wearers', own),
@@ -25,6 +26,8 @@ export const PAGE_ROWS: PageRow[] = [
   page('(studio)/journals/new', () => '/journals/new', own),
   page('(studio)/journals/[journalId]', ({ journalId }) => `/journals/${journalId}`, readers),
   page('(studio)/journals/[journalId]/compare', ({ journalId }) => `/journals/${journalId}/compare`, readers),
+  page('(studio)/journals/[journalId]/share', ({ journalId }) => `/journals/${journalId}/share`, owner),
+  page('(studio)/fittings', () => '/fittings', own),
   page('(studio)/journals/[journalId]/rounds/new', ({ journalId }) => `/journals/${journalId}/rounds/new`, owner),
   page('(studio)/journals/[journalId]/rounds/[number]', ({ journalId }) => `/journals/${journalId}/rounds/1`, readers),
 ]; // prettier-ignore

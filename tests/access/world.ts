@@ -11,6 +11,11 @@ export interface World {
   roundId: string;
   changeId: string;
   photoId: string;
+  /** What the reader holds. */
+  grantId: string;
+  /** To the address of `other`, not answered yet, with the secret of its link. */
+  invitationId: string;
+  invitationToken: string;
   /** The secret of each role's session; none for who is signed out. */
   sessions: Record<Role, string | null>;
 }
@@ -24,6 +29,9 @@ export const unknownIds = (): Ids => ({
   roundId: v7(),
   changeId: v7(),
   photoId: v7(),
+  grantId: v7(),
+  invitationId: v7(),
+  invitationToken: randomBytes(32).toString('base64url'),
 });
 
 const DAY_MS = 86_400_000;
@@ -77,8 +85,11 @@ export function makeWorld(sql: Sql): Promise<World> {
       const { level, expiresInDays, isRevoked } = grant;
       const expiresAt = expiresInDays === null ? null : new Date(Date.now() + expiresInDays * DAY_MS);
       await tx`insert into grants (id, subject_user_id, journal_id, level, granted_by, expires_at, revoked_at)
-        values (${v7()}, ${userId}, ${ids.journalId}, ${level}, ${ownerId}, ${expiresAt}, ${isRevoked ? new Date() : null})`;
+        values (${role === 'reader' ? ids.grantId : v7()}, ${userId}, ${ids.journalId}, ${level}, ${ownerId}, ${expiresAt}, ${isRevoked ? new Date() : null})`;
     }
+    const otherEmail = `${people.get('other')?.userId}@example.org`;
+    await tx`insert into grants (id, invited_email, token_hash, journal_id, level, granted_by)
+      values (${ids.invitationId}, ${otherEmail}, ${createHash('sha256').update(ids.invitationToken).digest('hex')}, ${ids.journalId}, 'read', ${ownerId})`;
     const sessions = Object.fromEntries(ROLES.map((role) => [role, people.get(role)?.secret ?? null]));
     return { ...ids, sessions: sessions as World['sessions'] };
   });
