@@ -1,6 +1,7 @@
 'use client';
 import { useState } from 'react';
 import { v7 } from 'uuid';
+import type { OthersMark } from '@/components/conversation/useConversation';
 import { photoSrcSet, photoUrl } from '@/components/photos/PhotoImage';
 import { VIEW_WORDS } from '@/components/photos/view-words';
 import { SaveLine } from '@/components/round/SaveLine';
@@ -16,12 +17,15 @@ import { useWaitingMarks } from './useWaitingMarks';
 interface Props {
   userId: string;
   photo: PhotoDto;
+  others: readonly OthersMark[];
+  /** Opened to look at only. */
+  isReadOnly: boolean;
 }
 
 const NOTHING_YET = startHistory([]);
 
 /** One photo with its marks: drawn on it, and listed beside it. */
-export function MarkedPhoto({ userId, photo }: Props) {
+export function MarkedPhoto({ userId, photo, others, isReadOnly }: Props) {
   const { id, revision, widthPx, heightPx, view, isMirrored } = photo;
   const { marks, history, saveState, conflicts, act, settle } = useMarks(userId, photo);
   const elsewhere = useWaitingMarks(userId, id);
@@ -42,28 +46,31 @@ export function MarkedPhoto({ userId, photo }: Props) {
         act={act}
         selected={selected}
         onSelect={setSelected}
-        isReadOnly={history === null}
+        isReadOnly={isReadOnly || history === null}
+        others={others}
       />
-      <SaveLine state={saveState} />
+      {isReadOnly ? null : <SaveLine state={saveState} />}
       {elsewhere > 0 ? (
         <p className="text-sm text-graphite">On this phone only: {elsewhere} waiting on other photos.</p>
       ) : null}
       <ContestedMarks marks={marks} conflicts={conflicts} onSettle={settle} />
-      <MarkList
-        marks={marks}
-        selected={selected}
-        onSelect={setSelected}
-        onAdd={(kind, points) => {
-          const mark = newMark(v7(), kind, 2, points);
-          act((now) => addMark(now, mark));
-          setSelected(mark.id);
-        }}
-        onEdit={(markId, edit, run) => act((now) => editMark(now, markId, edit, run))}
-        onDelete={(markId) => {
-          act((now) => removeMark(now, markId));
-          setSelected(null);
-        }}
-      />
+      {isReadOnly ? null : (
+        <MarkList
+          marks={marks}
+          selected={selected}
+          onSelect={setSelected}
+          onAdd={(kind, points) => {
+            const mark = newMark(v7(), kind, 2, points);
+            act((now) => addMark(now, mark));
+            setSelected(mark.id);
+          }}
+          onEdit={(markId, edit, run) => act((now) => editMark(now, markId, edit, run))}
+          onDelete={(markId) => {
+            act((now) => removeMark(now, markId));
+            setSelected(null);
+          }}
+        />
+      )}
     </div>
   );
 }

@@ -2,6 +2,7 @@
 import { EyeOff } from 'lucide-react';
 import { useEffect, useState } from 'react';
 import useSWR from 'swr';
+import { useConversation } from '@/components/conversation/useConversation';
 import { MarkedPhoto } from '@/components/marks/MarkedPhoto';
 import { fetchJson } from '@/components/net/send';
 import { PhotoFacts } from '@/components/photos/PhotoFacts';
@@ -29,6 +30,7 @@ interface Props {
 export function PhotoStage({ round, photos: first, userId, isOwner, view, onView }: Props) {
   const url = `/api/rounds/${round.id}/photos`;
   const { data: photos = first, mutate } = useSWR<PhotoDto[]>(url, fetchJson, { fallbackData: first });
+  const others = useConversation(round.id).data?.marks ?? [];
   const [chosenId, setChosenId] = useState(first[0]?.id ?? null);
   const { isCovered, cover, uncover } = useCover();
   const chosen =
@@ -60,7 +62,13 @@ export function PhotoStage({ round, photos: first, userId, isOwner, view, onView
             Covered. Press to show the photos.
           </button>
         ) : (
-          <MarkedPhoto key={`${chosen.id} ${chosen.revision}`} userId={userId} photo={chosen} />
+          <MarkedPhoto
+            key={`${chosen.id} ${chosen.revision}`}
+            userId={userId}
+            photo={chosen}
+            others={others.filter(({ photoId }) => photoId === chosen.id)}
+            isReadOnly={!round.mayFit}
+          />
         )
       ) : null}
       {photos.length > 0 ? (

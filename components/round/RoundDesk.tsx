@@ -1,8 +1,10 @@
 'use client';
 import { useMemo, useState } from 'react';
 import { CheckPanel } from '@/components/checks/CheckPanel';
+import { ConversationPanel } from '@/components/conversation/ConversationPanel';
+import { ProposeForm } from '@/components/conversation/ProposeForm';
 import { PlanPanel } from '@/components/plan/PlanPanel';
-import { usePlan } from '@/components/plan/usePlan';
+import { type Proposal, usePlan } from '@/components/plan/usePlan';
 import { plannedKey, ReadingPanel } from '@/components/reading/ReadingPanel';
 import { useDiagnosis } from '@/components/reading/useDiagnosis';
 import { SignPicker } from '@/components/signs/SignPicker';
@@ -43,6 +45,11 @@ export function RoundDesk({ desk, number, photos, userId, unit }: Props) {
   }, [desk, round, at, evidence.state]);
   const { knowledge, reading } = useDiagnosis(desk.garment, input);
   const planned = new Set(planning.plan.map(({ correction, side }) => plannedKey(correction, side)));
+  const [proposing, setProposing] = useState<Proposal[]>([]);
+  const isProposed = (a: Proposal) => (b: Proposal) => a.correction === b.correction && a.side === b.side;
+  const addProposed = (one: Proposal) =>
+    setProposing((now) => [...now.filter((other) => !isProposed(one)(other)), one]);
+  const mayPropose = !desk.isOwner && round.mayFit;
   const isOpen = desk.isOwner && !planning.plan.some((change) => change.madeAt !== null);
 
   return (
@@ -77,6 +84,17 @@ export function RoundDesk({ desk, number, photos, userId, unit }: Props) {
             <Skeleton lines={8} />
           )}
         </Section>
+        {knowledge ? (
+          <Section title="Said about this round" id="said">
+            <ConversationPanel
+              roundId={round.id}
+              knowledge={knowledge}
+              unit={unit}
+              isOwner={desk.isOwner}
+              mayFit={round.mayFit}
+            />
+          </Section>
+        ) : null}
         <RoundNotes round={round} isOwner={desk.isOwner} />
       </div>
       <div className="grid content-start gap-8">
@@ -87,7 +105,9 @@ export function RoundDesk({ desk, number, photos, userId, unit }: Props) {
               reading={reading}
               unit={unit}
               planned={planned}
-              onTake={isOpen ? (proposal) => void planning.take(proposal) : undefined}
+              onTake={
+                isOpen ? (proposal) => void planning.take(proposal) : mayPropose ? addProposed : undefined
+              }
               onRuleOut={(id) => evidence.edit([{ kind: 'cause', id, side: 'both', value: false }])}
             />
           ) : (
@@ -107,6 +127,18 @@ export function RoundDesk({ desk, number, photos, userId, unit }: Props) {
             <Skeleton lines={4} />
           )}
         </Section>
+        {mayPropose && knowledge ? (
+          <Section title="Propose a plan" id="propose">
+            <ProposeForm
+              roundId={round.id}
+              knowledge={knowledge}
+              unit={unit}
+              changes={proposing}
+              onDrop={(one) => setProposing((now) => now.filter((other) => !isProposed(one)(other)))}
+              onProposed={() => setProposing([])}
+            />
+          </Section>
+        ) : null}
         {desk.isOwner && knowledge ? (
           <Section title="The plan for the next round" id="plan">
             <PlanPanel

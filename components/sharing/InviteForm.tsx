@@ -9,7 +9,7 @@ import { Choice } from '@/components/ui/Choice';
 import { FormFooter } from '@/components/ui/FormFooter';
 import { SelectField } from '@/components/ui/SelectField';
 import { TextField } from '@/components/ui/TextField';
-import { type InviteForm as Form, inviteSchema } from './sharing-schema';
+import { type InviteFields, type InviteForm as Form, inviteSchema } from './sharing-schema';
 
 interface Props {
   journalId: string;
@@ -29,7 +29,10 @@ export function InviteForm({ journalId, rounds }: Props) {
   const [what, setWhat] = useState(WHOLE);
   const [said, setSaid] = useState<string | null>(null);
   const [problem, setProblem] = useState<string | null>(null);
-  const form = useForm<Form>({ resolver: zodResolver(inviteSchema), defaultValues: blank() });
+  const form = useForm<InviteFields, unknown, Form>({
+    resolver: zodResolver(inviteSchema),
+    defaultValues: blank(),
+  });
   const send = form.handleSubmit(async (body) => {
     const url = what === WHOLE ? `/api/journals/${journalId}/grants` : `/api/rounds/${what}/grants`;
     const sent = await sendJson('POST', url, body);

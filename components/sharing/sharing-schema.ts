@@ -8,6 +8,8 @@ export const inviteSchema = z.strictObject({
   expiresInDays: z.int().min(1, 'At least one day.').max(365, 'At most a year; it can be given again.'),
 });
 export type InviteForm = z.infer<typeof inviteSchema>;
+/** As it stands in the fields, before the address is tidied. */
+export type InviteFields = z.input<typeof inviteSchema>;
 
 const answer = z.enum(['accept', 'decline', 'block']);
 export type InvitationAnswer = z.infer<typeof answer>;

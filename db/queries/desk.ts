@@ -10,7 +10,7 @@ import { wearers } from '../schema/wearers';
 import { roundFacts } from './round-facts';
 import { noteLook } from './sharing';
 import type { Viewer } from './viewer';
-import { roundVisibleTo } from './visible-to';
+import { roundFittableBy, roundVisibleTo } from './visible-to';
 
 /** The newest value of each measure that sizes a body, mm: `{ hip: 1020, … }`. */
 const latestBody = sql<Partial<Record<'waist' | 'hip' | 'thigh' | 'knee' | 'calf', number>>>`(
@@ -46,6 +46,7 @@ export async function findDesk(viewer: Viewer, journalId: string) {
         note: rounds.note,
         hangsCleanAt: rounds.hangsCleanAt,
         version: rounds.version,
+        mayFit: sql<boolean>`(${roundFittableBy(viewer)})`,
         cut: muslins.cut,
         cloth: muslins.cloth,
         clothKind: muslins.clothKind,

@@ -135,6 +135,17 @@ const SHARING = [
   handler('POST', 'journals/[journalId]/leave', { path: ({ journalId }) => `/api/journals/${journalId}/leave`, access: only('signed-out', 'reader', 'fitter', 'pattern maker') }),
 ]; // prettier-ignore
 
+const change = () => ({ id: v7(), correction: 'other', side: 'both', basis: null, amount: null, reason: '' });
+
+const CONVERSATION = [
+  handler('GET', 'rounds/[roundId]/conversation', { path: ({ roundId }) => `/api/rounds/${roundId}/conversation`, access: readers }),
+  handler('POST', 'rounds/[roundId]/comments', { path: ({ roundId }) => `/api/rounds/${roundId}/comments`, access: fitters, body: () => ({ id: v7(), body: 'Look at the knee.', place: null, sign: null, asksCheck: null }) }),
+  handler('PATCH', 'comments/[commentId]', { path: ({ commentId }) => `/api/comments/${commentId}`, access: owner, body: () => ({ version: 1, body: 'The right leg?' }) }),
+  handler('DELETE', 'comments/[commentId]', { path: ({ commentId }) => `/api/comments/${commentId}`, access: owner }),
+  handler('POST', 'rounds/[roundId]/proposals', { path: ({ roundId }) => `/api/rounds/${roundId}/proposals`, access: fitters, body: () => ({ id: v7(), reason: 'Because.', changes: [change()] }) }),
+  handler('POST', 'proposals/[proposalId]/answer', { path: ({ proposalId }) => `/api/proposals/${proposalId}/answer`, access: owner, body: () => ({ taken: [] }) }),
+]; // prettier-ignore
+
 export const HANDLER_ROWS: HandlerRow[] = [
   ...NOWHERE,
   handler('GET', 'health', { path: () => '/api/health', access: everyone }),
@@ -145,4 +156,5 @@ export const HANDLER_ROWS: HandlerRow[] = [
   ...ROUNDS,
   ...PHOTOS,
   ...SHARING,
+  ...CONVERSATION,
 ];

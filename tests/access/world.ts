@@ -16,6 +16,10 @@ export interface World {
   /** To the address of `other`, not answered yet, with the secret of its link. */
   invitationId: string;
   invitationToken: string;
+  /** The owner's. */
+  commentId: string;
+  /** The fitter's, not answered. */
+  proposalId: string;
   /** The secret of each role's session; none for who is signed out. */
   sessions: Record<Role, string | null>;
 }
@@ -32,6 +36,8 @@ export const unknownIds = (): Ids => ({
   grantId: v7(),
   invitationId: v7(),
   invitationToken: randomBytes(32).toString('base64url'),
+  commentId: v7(),
+  proposalId: v7(),
 });
 
 const DAY_MS = 86_400_000;
@@ -90,6 +96,10 @@ export function makeWorld(sql: Sql): Promise<World> {
     const otherEmail = `${people.get('other')?.userId}@example.org`;
     await tx`insert into grants (id, invited_email, token_hash, journal_id, level, granted_by)
       values (${ids.invitationId}, ${otherEmail}, ${createHash('sha256').update(ids.invitationToken).digest('hex')}, ${ids.journalId}, 'read', ${ownerId})`;
+    await tx`insert into comments (id, round_id, author_id, body) values (${ids.commentId}, ${ids.roundId}, ${ownerId}, 'The left leg?')`;
+    await tx`insert into proposals (id, round_id, author_id, reason)
+      values (${ids.proposalId}, ${ids.roundId}, ${people.get('fitter')?.userId ?? ''}, 'Let it out first.')`;
+    await tx`insert into proposed_changes (id, proposal_id, correction, side) values (${v7()}, ${ids.proposalId}, 'proposed', 'both')`;
     const sessions = Object.fromEntries(ROLES.map((role) => [role, people.get(role)?.secret ?? null]));
     return { ...ids, sessions: sessions as World['sessions'] };
   });
