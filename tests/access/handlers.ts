@@ -157,4 +157,11 @@ export const HANDLER_ROWS: HandlerRow[] = [
   ...PHOTOS,
   ...SHARING,
   ...CONVERSATION,
+  // Each role has one session in its world, so that there is no other to end.
+  handler('DELETE', 'sessions/[which]', { path: () => '/api/sessions/others', access: only('signed-out') }),
+  handler('POST', 'bin/[kind]/[id]/restore', {
+    path: ({ photoId }) => `/api/bin/photo/${photoId}/restore`,
+    access: owner,
+    isInBin: true,
+  }),
 ];
