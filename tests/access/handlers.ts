@@ -157,6 +157,7 @@ export const HANDLER_ROWS: HandlerRow[] = [
   ...PHOTOS,
   ...SHARING,
   ...CONVERSATION,
+  handler('PATCH', 'admin/users/[userId]', { path: ({ testerId }) => `/api/admin/users/${testerId}`, access: only('signed-out', 'admin'), body: () => ({ isAdmin: false }) }), // prettier-ignore
   // Each role has one session in its world, so that there is no other to end.
   handler('DELETE', 'sessions/[which]', { path: () => '/api/sessions/others', access: only('signed-out') }),
   handler('POST', 'bin/[kind]/[id]/restore', {

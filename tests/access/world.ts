@@ -16,6 +16,8 @@ export interface World {
   /** To the address of `other`, not answered yet, with the secret of its link. */
   invitationId: string;
   invitationToken: string;
+  /** The account of the tester. */
+  testerId: string;
   /** The owner's. */
   commentId: string;
   /** The fitter's, not answered. */
@@ -36,14 +38,19 @@ export const unknownIds = (): Ids => ({
   grantId: v7(),
   invitationId: v7(),
   invitationToken: randomBytes(32).toString('base64url'),
+  testerId: v7(),
   commentId: v7(),
   proposalId: v7(),
 });
 
 const DAY_MS = 86_400_000;
 
-async function addPerson(tx: TransactionSql, role: Role): Promise<{ userId: string; secret: string }> {
-  const [userId, secret] = [v7(), randomBytes(32).toString('base64url')];
+async function addPerson(
+  tx: TransactionSql,
+  role: Role,
+  userId: string,
+): Promise<{ userId: string; secret: string }> {
+  const secret = randomBytes(32).toString('base64url');
   await tx`insert into users (id, email, email_verified_at, display_name, password_hash, is_admin, is_pattern_maker, is_fitter)
     values (${userId}, ${`${userId}@example.org`}, now(), ${role}, 'none', ${role === 'admin'}, ${role === 'pattern maker'}, ${role === 'fitter'})`;
   const inAWeek = new Date(Date.now() + 7 * DAY_MS);
@@ -82,7 +89,9 @@ export function makeWorld(sql: Sql): Promise<World> {
   return sql.begin(async (tx) => {
     const ids = unknownIds();
     const people = new Map<Role, { userId: string; secret: string }>();
-    for (const role of ROLES) if (role !== 'anonymous') people.set(role, await addPerson(tx, role));
+    for (const role of ROLES)
+      if (role !== 'anonymous')
+        people.set(role, await addPerson(tx, role, role === 'tester' ? ids.testerId : v7()));
     const ownerId = people.get('owner')?.userId ?? '';
     await addThings(tx, ownerId, ids);
     for (const [role, { userId }] of people) {
