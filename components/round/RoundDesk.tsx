@@ -64,26 +64,28 @@ export function RoundDesk({ desk, number, photos, userId, unit }: Props) {
           view={view}
           onView={setView}
         />
-        <Section title="What shows" id="shows">
-          <SaveLine state={evidence.saveState} />
-          <Contested
-            state={evidence.state}
-            conflicts={evidence.conflicts}
-            knowledge={knowledge}
-            onChoose={evidence.edit}
-          />
-          {knowledge ? (
-            <SignPicker
-              knowledge={knowledge}
-              view={view}
-              cut={round.cut}
+        {round.mayFit ? (
+          <Section title="What shows" id="shows">
+            <SaveLine state={evidence.saveState} />
+            <Contested
               state={evidence.state}
-              onEdit={evidence.edit}
+              conflicts={evidence.conflicts}
+              knowledge={knowledge}
+              onChoose={evidence.edit}
             />
-          ) : (
-            <Skeleton lines={8} />
-          )}
-        </Section>
+            {knowledge ? (
+              <SignPicker
+                knowledge={knowledge}
+                view={view}
+                cut={round.cut}
+                state={evidence.state}
+                onEdit={evidence.edit}
+              />
+            ) : (
+              <Skeleton lines={8} />
+            )}
+          </Section>
+        ) : null}
         {knowledge ? (
           <Section title="Said about this round" id="said">
             <ConversationPanel
@@ -108,25 +110,31 @@ export function RoundDesk({ desk, number, photos, userId, unit }: Props) {
               onTake={
                 isOpen ? (proposal) => void planning.take(proposal) : mayPropose ? addProposed : undefined
               }
-              onRuleOut={(id) => evidence.edit([{ kind: 'cause', id, side: 'both', value: false }])}
+              onRuleOut={
+                round.mayFit
+                  ? (id) => evidence.edit([{ kind: 'cause', id, side: 'both', value: false }])
+                  : undefined
+              }
             />
           ) : (
             <Skeleton lines={6} />
           )}
         </Section>
-        <Section title="Try it" id="try">
-          {knowledge && reading ? (
-            <CheckPanel
-              knowledge={knowledge}
-              asked={reading.checks}
-              state={evidence.state}
-              unit={unit}
-              onEdit={evidence.edit}
-            />
-          ) : (
-            <Skeleton lines={4} />
-          )}
-        </Section>
+        {round.mayFit ? (
+          <Section title="Try it" id="try">
+            {knowledge && reading ? (
+              <CheckPanel
+                knowledge={knowledge}
+                asked={reading.checks}
+                state={evidence.state}
+                unit={unit}
+                onEdit={evidence.edit}
+              />
+            ) : (
+              <Skeleton lines={4} />
+            )}
+          </Section>
+        ) : null}
         {mayPropose && knowledge ? (
           <Section title="Propose a plan" id="propose">
             <ProposeForm

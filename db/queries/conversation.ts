@@ -37,7 +37,6 @@ const listOthersMarks = (viewer: Viewer, roundId: string) =>
     )
     .orderBy(asc(marks.id))
     .limit(2000);
-export type OthersMarkDto = Awaited<ReturnType<typeof listOthersMarks>>[number];
 
 /** What others put on a round: their marks, what was said, the plans proposed. Null when the round is not in sight. */
 export async function findConversation(viewer: Viewer, roundId: string) {
