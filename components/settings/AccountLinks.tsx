@@ -8,4 +8,9 @@ const LINKS = [
   { id: 'leave', href: '/settings/leave', title: 'Close your account', note: 'With 14 days to come back' },
 ] as const; // prettier-ignore
 
-export const AccountLinks = () => <PlainList items={[...LINKS]} />;
+const ADMIN = { id: 'admin', href: '/admin', title: 'Run the site', note: 'Accounts, letters, audit' } as const; // prettier-ignore
+
+/** Ways to what concerns one's own account, and for an admin to the site's. */
+export const AccountLinks = ({ isAdmin }: { isAdmin: boolean }) => (
+  <PlainList items={isAdmin ? [...LINKS, ADMIN] : [...LINKS]} />
+);

@@ -21,7 +21,7 @@ export default async function SettingsPage() {
         />
         <Section title="Signed in">
           <p>as {viewer.email}</p>
-          <AccountLinks />
+          <AccountLinks isAdmin={viewer.isAdmin} />
           <SignOut userId={viewer.userId} action={signOut} />
         </Section>
       </div>
