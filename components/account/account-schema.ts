@@ -51,3 +51,8 @@ export const tokenSchema = z.object({
   token: z.string().regex(/^[A-Za-z0-9_-]{43}$/, 'This link is not whole.'),
 });
 export const resetSchema = z.object({ token: tokenSchema.shape.token, password: passwordSchema });
+
+const current = signInSchema.shape.password;
+export const currentPasswordSchema = z.object({ current });
+export const changePasswordSchema = z.object({ current, password: passwordSchema });
+export const changeEmailSchema = z.object({ current, email: emailSchema });

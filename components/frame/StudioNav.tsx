@@ -1,11 +1,12 @@
 'use client';
-import { Ruler, Scissors, Settings2, Shirt } from 'lucide-react';
+import { Eye, Ruler, Scissors, Settings2, Shirt } from 'lucide-react';
 import Link from 'next/link';
 import { usePathname } from 'next/navigation';
 import { join } from '@/components/ui/styles';
 
 const PLACES = [
   { href: '/journals', label: 'The rail', Icon: Shirt },
+  { href: '/fittings', label: 'For others', Icon: Eye },
   { href: '/wearers', label: 'Wearers', Icon: Ruler },
   { href: '/patterns', label: 'Patterns', Icon: Scissors },
   { href: '/settings', label: 'Settings', Icon: Settings2 },

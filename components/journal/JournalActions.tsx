@@ -17,6 +17,7 @@ export function JournalActions({ journal }: { journal: JournalDto }) {
           Side by side
         </LinkButton>
       ) : null}
+      {journal.isOwner ? <LinkButton href={`/journals/${id}/share`}>Who may look</LinkButton> : null}
       {journal.isOwner && (last?.hangsClean || settledAt) ? (
         <SettleButton journalId={id} version={journal.version} isSettled={settledAt !== null} />
       ) : step ? (

@@ -39,6 +39,7 @@ export function Ledger({ rows, unit }: Props) {
             {row.isMade && row.plannedMm !== null && row.plannedMm !== row.madeMm ? (
               <span className="text-sm text-graphite">planned {amountOf(row.plannedMm, row, unit)}</span>
             ) : null}
+            {row.proposedBy ? <span className="text-sm">proposed by {row.proposedBy}</span> : null}
             {row.reason ? <span className="text-sm">Past the stop mark because: {row.reason}</span> : null}
           </span>
         </li>

@@ -12,12 +12,13 @@ export interface LedgerRow {
   madeMm: number | null;
   isMade: boolean;
   reason: string;
+  proposedBy: string | null;
 }
 
 /** Every change of a journal, in the order of the rounds they were decided in. */
 export const ledgerRows = (garment: GarmentId, rounds: DeskRoundDto[]): LedgerRow[] =>
   rounds.flatMap((round) =>
-    round.changes.map(({ id, correction, side, plannedMm, madeMm, madeAt, reason }) => {
+    round.changes.map(({ id, correction, side, plannedMm, madeMm, madeAt, reason, proposedBy }) => {
       const known = findCorrection(garment, correction);
       return {
         id,
@@ -29,6 +30,7 @@ export const ledgerRows = (garment: GarmentId, rounds: DeskRoundDto[]): LedgerRo
         madeMm,
         isMade: madeAt !== null,
         reason,
+        proposedBy: proposedBy ?? null,
       };
     }),
   );

@@ -1,6 +1,8 @@
 'use client';
 import { type MouseEvent, useRef, useState } from 'react';
 import { v7 } from 'uuid';
+import { OthersMarks } from '@/components/conversation/OthersMarks';
+import type { OthersMark } from '@/components/conversation/useConversation';
 import { DrawingAids } from './DrawingAids';
 import { KeyHelp } from './KeyHelp';
 import { MarkBar } from './MarkBar';
@@ -28,10 +30,14 @@ interface Props {
   selected: string | null;
   onSelect: (id: string | null) => void;
   isReadOnly: boolean;
+  /** Drawn beneath the marks that can be moved. */
+  others?: readonly OthersMark[];
 }
 
+const NONE: readonly OthersMark[] = [];
+
 /** A photo to draw on. Everything that drawing does, keys and the list beside it do too. */
-export function MarkCanvas({ photo, history, act, selected, onSelect, isReadOnly }: Props) {
+export function MarkCanvas({ photo, history, act, selected, onSelect, isReadOnly, others = NONE }: Props) {
   const [tool, setTool] = useState<Tool>('look');
   const [nextSeverity, setNextSeverity] = useState<MarkSeverity>(2);
   const [isHelp, setHelp] = useState(false);
@@ -126,6 +132,7 @@ export function MarkCanvas({ photo, history, act, selected, onSelect, isReadOnly
           isDrawing={!isLooking}
           events={isReadOnly ? {} : { tabIndex: 0, onClick, onKeyDown: keys.onKeyDown, ...drawing }}
         >
+          <OthersMarks marks={others} {...pixels} />
           <MarkLayer marks={marks} exceptId={selected} {...pixels} />
           {chosen ? (
             <MarkHandles

@@ -1,6 +1,7 @@
 'use client';
 import { lazy, Suspense, useState } from 'react';
 import { v7 } from 'uuid';
+import type { OthersMark } from '@/components/conversation/useConversation';
 import type { ReadingTools } from '@/components/photo-reading/PhotoReading';
 import { useLandmarks } from '@/components/photo-reading/useLandmarks';
 import { photoSrcSet, photoUrl } from '@/components/photos/PhotoImage';
@@ -20,6 +21,9 @@ interface Props {
   photo: PhotoDto;
   /** Absent until the knowledge has come. */
   reading?: ReadingTools | undefined;
+  others: readonly OthersMark[];
+  /** Opened to look at only. */
+  isReadOnly: boolean;
 }
 
 // The figure and what reads lines come after the photo can be marked.
@@ -29,7 +33,7 @@ const PhotoReading = lazy(() => import('@/components/photo-reading/PhotoReading'
 const NOTHING_YET = startHistory([]);
 
 /** One photo with its marks: drawn on it, and listed beside it. */
-export function MarkedPhoto({ userId, photo, reading }: Props) {
+export function MarkedPhoto({ userId, photo, reading, others, isReadOnly }: Props) {
   const { id, revision, widthPx, heightPx, view, isMirrored } = photo;
   const { marks, history, saveState, conflicts, act, settle } = useMarks(userId, photo);
   const elsewhere = useWaitingMarks(userId, id);
@@ -64,29 +68,32 @@ export function MarkedPhoto({ userId, photo, reading }: Props) {
         act={act}
         selected={selected}
         onSelect={setSelected}
-        isReadOnly={history === null}
+        isReadOnly={isReadOnly || history === null}
+        others={others}
       />
-      <SaveLine state={saveState} />
+      {isReadOnly ? null : <SaveLine state={saveState} />}
       {elsewhere > 0 ? (
         <p className="text-sm text-graphite">On this phone only: {elsewhere} waiting on other photos.</p>
       ) : null}
       <ContestedMarks marks={marks} conflicts={conflicts} onSettle={settle} />
-      <MarkList
-        marks={marks}
-        selected={selected}
-        onSelect={setSelected}
-        onAdd={(kind, points) => {
-          const mark = newMark(v7(), kind, 2, points);
-          act((now) => addMark(now, mark));
-          setSelected(mark.id);
-        }}
-        onEdit={(markId, edit, run) => act((now) => editMark(now, markId, edit, run))}
-        onDelete={(markId) => {
-          act((now) => removeMark(now, markId));
-          setSelected(null);
-        }}
-      />
-      {reading && figure.isLoaded ? (
+      {isReadOnly ? null : (
+        <MarkList
+          marks={marks}
+          selected={selected}
+          onSelect={setSelected}
+          onAdd={(kind, points) => {
+            const mark = newMark(v7(), kind, 2, points);
+            act((now) => addMark(now, mark));
+            setSelected(mark.id);
+          }}
+          onEdit={(markId, edit, run) => act((now) => editMark(now, markId, edit, run))}
+          onDelete={(markId) => {
+            act((now) => removeMark(now, markId));
+            setSelected(null);
+          }}
+        />
+      )}
+      {reading && figure.isLoaded && !isReadOnly ? (
         <Suspense fallback={null}>
           {' '}
           <PhotoReading

@@ -2,6 +2,7 @@
 import { EyeOff } from 'lucide-react';
 import { useEffect, useState } from 'react';
 import useSWR from 'swr';
+import { useConversation } from '@/components/conversation/useConversation';
 import { MarkedPhoto } from '@/components/marks/MarkedPhoto';
 import { fetchJson } from '@/components/net/send';
 import type { ReadingTools } from '@/components/photo-reading/PhotoReading';
@@ -42,6 +43,7 @@ export function PhotoStage({
 }: Props) {
   const url = `/api/rounds/${round.id}/photos`;
   const { data: photos = first, mutate } = useSWR<PhotoDto[]>(url, fetchJson, { fallbackData: first });
+  const others = useConversation(round.id).data?.marks ?? [];
   const [chosenId, setChosenId] = useState(first[0]?.id ?? null);
   const { isCovered, cover, uncover } = useCover();
   const chosen =
@@ -78,6 +80,8 @@ export function PhotoStage({
             userId={userId}
             photo={chosen}
             reading={reading}
+            others={others.filter(({ photoId }) => photoId === chosen.id)}
+            isReadOnly={!round.mayFit}
           />
         )
       ) : null}

@@ -1,8 +1,10 @@
 'use client';
 import { useMemo, useState } from 'react';
 import { CheckPanel } from '@/components/checks/CheckPanel';
+import { ConversationPanel } from '@/components/conversation/ConversationPanel';
+import { ProposeForm } from '@/components/conversation/ProposeForm';
 import { PlanPanel } from '@/components/plan/PlanPanel';
-import { usePlan } from '@/components/plan/usePlan';
+import { type Proposal, usePlan } from '@/components/plan/usePlan';
 import { plannedKey, ReadingPanel } from '@/components/reading/ReadingPanel';
 import { useDiagnosis } from '@/components/reading/useDiagnosis';
 import { SignPicker } from '@/components/signs/SignPicker';
@@ -43,6 +45,11 @@ export function RoundDesk({ desk, number, photos, userId, unit }: Props) {
   }, [desk, round, at, evidence.state]);
   const { knowledge, reading } = useDiagnosis(desk.garment, input);
   const planned = new Set(planning.plan.map(({ correction, side }) => plannedKey(correction, side)));
+  const [proposing, setProposing] = useState<Proposal[]>([]);
+  const isProposed = (a: Proposal) => (b: Proposal) => a.correction === b.correction && a.side === b.side;
+  const addProposed = (one: Proposal) =>
+    setProposing((now) => [...now.filter((other) => !isProposed(one)(other)), one]);
+  const mayPropose = !desk.isOwner && round.mayFit;
   const isOpen = desk.isOwner && !planning.plan.some((change) => change.madeAt !== null);
 
   return (
@@ -63,26 +70,39 @@ export function RoundDesk({ desk, number, photos, userId, unit }: Props) {
               : undefined
           }
         />
-        <Section title="What shows" id="shows">
-          <SaveLine state={evidence.saveState} />
-          <Contested
-            state={evidence.state}
-            conflicts={evidence.conflicts}
-            knowledge={knowledge}
-            onChoose={evidence.edit}
-          />
-          {knowledge ? (
-            <SignPicker
-              knowledge={knowledge}
-              view={view}
-              cut={round.cut}
+        {round.mayFit ? (
+          <Section title="What shows" id="shows">
+            <SaveLine state={evidence.saveState} />
+            <Contested
               state={evidence.state}
-              onEdit={evidence.edit}
+              conflicts={evidence.conflicts}
+              knowledge={knowledge}
+              onChoose={evidence.edit}
             />
-          ) : (
-            <Skeleton lines={8} />
-          )}
-        </Section>
+            {knowledge ? (
+              <SignPicker
+                knowledge={knowledge}
+                view={view}
+                cut={round.cut}
+                state={evidence.state}
+                onEdit={evidence.edit}
+              />
+            ) : (
+              <Skeleton lines={8} />
+            )}
+          </Section>
+        ) : null}
+        {knowledge ? (
+          <Section title="Said about this round" id="said">
+            <ConversationPanel
+              roundId={round.id}
+              knowledge={knowledge}
+              unit={unit}
+              isOwner={desk.isOwner}
+              mayFit={round.mayFit}
+            />
+          </Section>
+        ) : null}
         <RoundNotes round={round} isOwner={desk.isOwner} />
       </div>
       <div className="grid content-start gap-8">
@@ -93,26 +113,46 @@ export function RoundDesk({ desk, number, photos, userId, unit }: Props) {
               reading={reading}
               unit={unit}
               planned={planned}
-              onTake={isOpen ? (proposal) => void planning.take(proposal) : undefined}
-              onRuleOut={(id) => evidence.edit([{ kind: 'cause', id, side: 'both', value: false }])}
+              onTake={
+                isOpen ? (proposal) => void planning.take(proposal) : mayPropose ? addProposed : undefined
+              }
+              onRuleOut={
+                round.mayFit
+                  ? (id) => evidence.edit([{ kind: 'cause', id, side: 'both', value: false }])
+                  : undefined
+              }
             />
           ) : (
             <Skeleton lines={6} isTall />
           )}
         </Section>
-        <Section title="Try it" id="try">
-          {knowledge && reading ? (
-            <CheckPanel
+        {round.mayFit ? (
+          <Section title="Try it" id="try">
+            {knowledge && reading ? (
+              <CheckPanel
+                knowledge={knowledge}
+                asked={reading.checks}
+                state={evidence.state}
+                unit={unit}
+                onEdit={evidence.edit}
+              />
+            ) : (
+              <Skeleton lines={4} />
+            )}
+          </Section>
+        ) : null}
+        {mayPropose && knowledge ? (
+          <Section title="Propose a plan" id="propose">
+            <ProposeForm
+              roundId={round.id}
               knowledge={knowledge}
-              asked={reading.checks}
-              state={evidence.state}
               unit={unit}
-              onEdit={evidence.edit}
+              changes={proposing}
+              onDrop={(one) => setProposing((now) => now.filter((other) => !isProposed(one)(other)))}
+              onProposed={() => setProposing([])}
             />
-          ) : (
-            <Skeleton lines={4} />
-          )}
-        </Section>
+          </Section>
+        ) : null}
         {desk.isOwner && knowledge ? (
           <Section title="The plan for the next round" id="plan">
             <PlanPanel

@@ -1,5 +1,5 @@
 import 'server-only';
-import { and, eq, isNull, sql } from 'drizzle-orm';
+import { and, eq, isNull, or, sql } from 'drizzle-orm';
 import { v7 } from 'uuid';
 import { env } from '@/lib/env';
 import { alreadyLetter, passwordChangedLetter, resetLetter, verifyLetter } from '@/lib/mail/compose';
@@ -58,6 +58,7 @@ export async function signUp(input: {
   });
 }
 
+/** With `isLeaving`, an account that was closed and may still be taken up again. */
 export async function findForSignIn(email: string) {
   const [row] = await db()
     .select({
@@ -65,10 +66,16 @@ export async function findForSignIn(email: string) {
       email: users.email,
       passwordHash: users.passwordHash,
       isVerified: sql<boolean>`${users.emailVerifiedAt} is not null`,
+      isLeaving: sql<boolean>`${users.deletedAt} is not null`,
       isSuspended: sql<boolean>`${users.suspendedAt} is not null`,
     })
     .from(users)
-    .where(byEmail(email));
+    .where(
+      and(
+        eq(users.email, email),
+        or(isNull(users.deletedAt), sql`${users.deletedAt} > now() - interval '14 days'`),
+      ),
+    );
   return row ?? null;
 }
 

@@ -9,12 +9,13 @@ import { rounds } from '../schema/rounds';
 import { wearers } from '../schema/wearers';
 import { latestBody } from './latest-body';
 import { roundFacts } from './round-facts';
+import { noteLook } from './sharing';
 import type { Viewer } from './viewer';
-import { roundVisibleTo } from './visible-to';
+import { roundFittableBy, roundVisibleTo } from './visible-to';
 
 /**
  * Everything the reading of a journal stands on: who it is for, and every round that the viewer may see with what was found in
- * it, oldest first. Null when there is none to see.
+ * it, oldest first. That someone invited looked is noted. Null when there is none to see.
  */
 export async function findDesk(viewer: Viewer, journalId: string) {
   const rows = await db()
@@ -37,6 +38,7 @@ export async function findDesk(viewer: Viewer, journalId: string) {
         note: rounds.note,
         hangsCleanAt: rounds.hangsCleanAt,
         version: rounds.version,
+        mayFit: sql<boolean>`(${roundFittableBy(viewer)})`,
         cut: muslins.cut,
         cloth: muslins.cloth,
         clothKind: muslins.clothKind,
@@ -56,6 +58,7 @@ export async function findDesk(viewer: Viewer, journalId: string) {
     .orderBy(asc(rounds.number));
   const [first] = rows;
   if (!first) return null;
+  if (!first.isOwner) await noteLook(viewer, journalId);
   const { round: _round, ...head } = first;
   return { ...head, rounds: rows.map((row) => row.round) };
 }

@@ -8,7 +8,7 @@ import { recordAudit } from './audit';
 import { writeGuarded } from './guarded';
 import type { Written } from './outcome';
 import type { Viewer } from './viewer';
-import { photoIsKept, roundIds, roundOwnedBy, roundVisibleTo } from './visible-to';
+import { mayPhotograph, photoIsKept, roundIds, roundOwnedBy, roundVisibleTo } from './visible-to';
 
 const COLUMNS = {
   id: photos.id,
@@ -77,14 +77,19 @@ async function findByUploadKey(tx: Executor, roundId: string, uploadKey: string)
   return row ?? null;
 }
 
-/** Whether photos may be added to this round, and the one that this upload has made already. Null: not the viewer's. */
+/**
+ * What this upload has made already, and whether the wearer agreed to be photographed. Null: the round is not the viewer's.
+ */
 export async function findRoundForUpload(
   viewer: Viewer,
   roundId: string,
   uploadKey: string,
-): Promise<{ had: PhotoDto | null } | null> {
-  const [owned] = await roundIds(and(roundOwnedBy(viewer), eq(rounds.id, roundId)));
-  return owned ? { had: await findByUploadKey(db(), roundId, uploadKey) } : null;
+): Promise<{ had: PhotoDto | null; isAgreed: boolean } | null> {
+  const own = and(roundOwnedBy(viewer), eq(rounds.id, roundId));
+  const [owned] = await roundIds(own);
+  if (!owned) return null;
+  const agreed = await roundIds(and(own, mayPhotograph));
+  return { had: await findByUploadKey(db(), roundId, uploadKey), isAgreed: agreed.length > 0 };
 }
 
 export interface NewPhoto {
@@ -111,7 +116,9 @@ export async function addPhoto(
     const [owned] = await tx
       .select({ id: rounds.id })
       .from(rounds)
-      .where(and(eq(rounds.id, roundId), inArray(rounds.id, roundIds(roundOwnedBy(viewer)))));
+      .where(
+        and(eq(rounds.id, roundId), inArray(rounds.id, roundIds(and(roundOwnedBy(viewer), mayPhotograph)))),
+      );
     if (!owned) return null;
     const [row] = await tx
       .insert(photos)

@@ -49,6 +49,8 @@ export interface ChangeFact {
   madeTyped: string | null;
   madeAt: string | null;
   reason: string;
+  /** Who proposed it, where it was taken from a proposal. */
+  proposedBy?: string | null;
   version: number;
 }
 
@@ -76,8 +78,8 @@ export const roundFacts = (viewerId: string) => {
       sql`round_measured f where f.round_id = rounds.id`,
     ),
     changes: list<ChangeFact>(
-      sql`'id', f.id, 'correction', f.correction, 'side', f.side, 'basis', f.basis, 'plannedMm', f.planned_mm, 'plannedTyped', f.planned_typed, 'madeMm', f.made_mm, 'madeTyped', f.made_typed, 'madeAt', f.made_at, 'reason', f.reason, 'version', f.version`,
-      sql`(select * from changes c where c.round_id = rounds.id order by c.id) f`,
+      sql`'id', f.id, 'correction', f.correction, 'side', f.side, 'basis', f.basis, 'plannedMm', f.planned_mm, 'plannedTyped', f.planned_typed, 'madeMm', f.made_mm, 'madeTyped', f.made_typed, 'madeAt', f.made_at, 'reason', f.reason, 'proposedBy', f.proposer, 'version', f.version`,
+      sql`(select c.*, u.display_name as proposer from changes c left join users u on u.id = c.proposed_by where c.round_id = rounds.id order by c.id) f`,
     ),
   };
 };

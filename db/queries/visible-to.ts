@@ -32,10 +32,19 @@ const FIT = ['fit'] as const;
 /** A journal is out of sight while it, its wearer or its pattern lies in the bin. Join journals with wearers, pattern versions and patterns. */
 const journalIsKept = and(isNull(journals.deletedAt), isNull(wearers.deletedAt), isNull(patterns.deletedAt));
 
+/** Nothing of someone else's body is shown to others unless they agreed to it, and for as long as they did. */
+export const mayShare = or(
+  eq(wearers.isSelf, true),
+  and(
+    eq(wearers.consentsShare, true),
+    or(isNull(wearers.consentUntil), sql`${wearers.consentUntil} >= current_date`),
+  ),
+);
+
 const journalGranted = (viewer: Viewer, levels: readonly ('read' | 'fit')[]) =>
-  liveGrant(viewer, sql`${grants.journalId} = ${journals.id}`, levels);
+  and(mayShare, liveGrant(viewer, sql`${grants.journalId} = ${journals.id}`, levels));
 const roundGranted = (viewer: Viewer, levels: readonly ('read' | 'fit')[]) =>
-  liveGrant(viewer, sql`${grants.roundId} = ${rounds.id}`, levels);
+  and(mayShare, liveGrant(viewer, sql`${grants.roundId} = ${rounds.id}`, levels));
 
 /** For selects from journals joined as above. */
 export const journalVisibleTo = (viewer: Viewer) =>
@@ -58,6 +67,14 @@ export const roundFittableBy = (viewer: Viewer) =>
   );
 export const roundOwnedBy = (viewer: Viewer) =>
   and(journalIsKept, isNull(rounds.deletedAt), eq(journals.ownerId, viewer.userId));
+/** Taking photos of someone else needs their yes to that. */
+export const mayPhotograph = or(
+  eq(wearers.isSelf, true),
+  and(
+    eq(wearers.consentsPhotograph, true),
+    or(isNull(wearers.consentUntil), sql`${wearers.consentUntil} >= current_date`),
+  ),
+);
 export const photoIsKept = isNull(photos.deletedAt);
 
 /** The joins that the predicates above speak about, as ids of the objects that pass; use as `inArray(x, …)` in updates and deletes. */

@@ -17,6 +17,8 @@ export const changes = pgTable(
     authorId: uuid()
       .notNull()
       .references(() => users.id, { onDelete: 'cascade' }),
+    /** Whose proposal it was taken from, where it was one. */
+    proposedBy: uuid().references(() => users.id, { onDelete: 'set null' }),
     correction: text().notNull(),
     side: text({ enum: ['left', 'right', 'both'] }).notNull(),
     basis: text({ enum: ['round', 'piece', 'edge', 'pinch'] }),

@@ -25,6 +25,8 @@ export const grants = pgTable(
     expiresAt: moment(),
     revokedAt: moment(),
     revokedBy: uuid().references(() => users.id, { onDelete: 'set null' }),
+    /** When the person it names last opened something through it, to the minute. */
+    lastLookedAt: moment(),
     createdAt: createdAt(),
   },
   (table) => [

@@ -1,6 +1,8 @@
 /** The schema as Drizzle wants it: one object. Everything else imports the table it means from its own file. */
 export { audit } from './audit';
+export { blocks } from './blocks';
 export { changes } from './changes';
+export { comments } from './comments';
 export { doomedObjects } from './doomed-objects';
 export { fittedMeasures } from './fitted-measures';
 export { grants } from './grants';
@@ -16,6 +18,8 @@ export { patternVersions } from './pattern-versions';
 export { patterns } from './patterns';
 export { photoLandmarks } from './photo-landmarks';
 export { photos } from './photos';
+export { proposals } from './proposals';
+export { proposedChanges } from './proposed-changes';
 export { rateLimits } from './rate-limits';
 export { readings } from './readings';
 export { roundCauses } from './round-causes';

@@ -1,5 +1,6 @@
 import { index, pgTable, text, uuid } from 'drizzle-orm/pg-core';
 import { createdAt, id, moment } from './columns';
+import { grants } from './grants';
 import { users } from './users';
 
 /**
@@ -12,6 +13,8 @@ export const mails = pgTable(
     id: id(),
     userId: uuid().references(() => users.id, { onDelete: 'cascade' }),
     kind: text().notNull(),
+    /** The invitation whose link the letter carries. */
+    grantId: uuid().references(() => grants.id, { onDelete: 'cascade' }),
     messageId: text().notNull().unique(),
     toEmail: text().notNull(),
     subject: text().notNull(),

@@ -9,6 +9,7 @@ const LIMITS = {
   mail: { points: 3, durationS: 3600 },
   // One household or classroom signs up from one address; thousands of strangers' mailboxes are not reached from it.
   'mail-from': { points: 60, durationS: 3600 },
+  invite: { points: 30, durationS: 3600 },
   upload: { points: 60, durationS: 3600 },
 } as const;
 

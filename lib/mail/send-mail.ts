@@ -12,9 +12,12 @@ import { LINK_SECRET } from './compose';
 
 let transport: Transporter | undefined;
 
-async function handOver(mail: UnsentMail): Promise<void> {
+/** Whether there was still something to send: the link of an invitation that ended meanwhile leads nowhere. */
+async function handOver(mail: UnsentMail): Promise<boolean> {
   transport ??= createTransport({ url: env().SMTP_URL, connectionTimeout: 10_000, socketTimeout: 20_000 });
-  const secret = await issueLinkSecret(mail);
+  const link = await issueLinkSecret(mail);
+  if (link === 'void') return false;
+  const { secret } = link;
   const filled = (body: string) => (secret ? body.replaceAll(LINK_SECRET, secret) : body);
   await transport.sendMail({
     from: env().MAIL_FROM,
@@ -26,6 +29,7 @@ async function handOver(mail: UnsentMail): Promise<void> {
     disableFileAccess: true,
     disableUrlAccess: true,
   });
+  return true;
 }
 
 /** A refusal for good (RFC 5321 4.2.1: 5yz), as against a host that is down or asks to come later. */
@@ -43,7 +47,7 @@ export async function sendMail(mailId: string): Promise<void> {
   const mail = await findUnsentMail(mailId);
   if (!mail) return;
   try {
-    await handOver(mail);
+    if (!(await handOver(mail))) return await markMailRefused(mailId);
   } catch (thrown) {
     if (!isRefusal(thrown)) throw thrown;
     return markMailRefused(mailId);

@@ -1,6 +1,6 @@
 import 'server-only';
 import { findDoomed, findKeptRevisions, forgetDoomed, listDoomed } from '@/db/queries/photo-leftovers';
-import { purgePhotos } from '@/db/queries/purge-photos';
+import { purgeBin } from '@/db/queries/purge-bin';
 import { deleteObject, listObjects } from '@/lib/photo-store';
 import { photoKeys, photoOfKey } from './keys';
 
@@ -35,11 +35,11 @@ async function eraseDoomed(now: Date): Promise<void> {
 }
 
 /**
- * Sweeps up: photos whose days in the bin are over, files that were doomed and are due, and what a broken upload left behind. Safe to
+ * Sweeps up: what has lain in the bin long enough, files that were doomed and are due, and what a broken upload left behind. Safe to
  * run twice at once, and again after it broke off.
  */
 export async function erasePhotoLeftovers(now: Date): Promise<void> {
-  await purgePhotos(now, photoKeys);
+  await purgeBin(now, photoKeys);
   await eraseDoomed(now);
   await eraseOrphans(now);
 }

@@ -60,7 +60,9 @@ export async function receivePhoto(
   request: Request,
   upload: Upload,
 ): Promise<Received> {
-  const { had } = orNotFound(await findRoundForUpload(viewer, roundId, upload.uploadKey));
+  const { had, isAgreed } = orNotFound(await findRoundForUpload(viewer, roundId, upload.uploadKey));
+  if (!isAgreed)
+    throw new Problem(403, 'no-consent', 'This person has not agreed to be photographed. Ask them first, then write it down with them.'); // prettier-ignore
   if (!had) {
     const wait = await takePoint('upload', [`user ${viewer.userId}`]);
     if (wait) throw new Problem(429, 'too-often', waitSentence(wait), { retryAfterS: wait });

@@ -13,7 +13,7 @@ export interface FormState {
   values?: Record<string, string>;
 }
 
-const SECRET = new Set(['password', 'token']);
+const SECRET = new Set(['password', 'current', 'token']);
 
 const typedIn = (form: FormData) =>
   Object.fromEntries(

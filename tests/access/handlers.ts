@@ -161,6 +161,30 @@ const NOWHERE = (['GET', 'POST', 'PUT', 'PATCH', 'DELETE'] as const).map((method
   handler(method, '[...rest]', { path: () => '/api/no/such/address', access: only('signed-out') }),
 );
 
+const invited = only('signed-out', 'other');
+const invitation = (email: string) => ({ id: v7(), email, level: 'read', expiresInDays: 30 });
+
+const SHARING = [
+  handler('POST', 'journals/[journalId]/grants', { path: ({ journalId }) => `/api/journals/${journalId}/grants`, access: owner, body: () => invitation(`${v7()}@example.org`) }),
+  handler('POST', 'rounds/[roundId]/grants', { path: ({ roundId }) => `/api/rounds/${roundId}/grants`, access: owner, body: () => invitation(`${v7()}@example.org`) }),
+  handler('DELETE', 'grants/[grantId]', { path: ({ grantId }) => `/api/grants/${grantId}`, access: owner }),
+  handler('POST', 'grants/[grantId]/resend', { path: ({ invitationId }) => `/api/grants/${invitationId}/resend`, access: owner }),
+  handler('POST', 'invitations', { path: () => '/api/invitations', access: invited, body: ({ invitationToken }) => ({ token: invitationToken, answer: 'accept' }) }),
+  handler('POST', 'invitations/[grantId]', { path: ({ invitationId }) => `/api/invitations/${invitationId}`, access: invited, body: () => ({ answer: 'block' }) }),
+  handler('POST', 'journals/[journalId]/leave', { path: ({ journalId }) => `/api/journals/${journalId}/leave`, access: only('signed-out', 'reader', 'fitter', 'pattern maker') }),
+]; // prettier-ignore
+
+const change = () => ({ id: v7(), correction: 'other', side: 'both', basis: null, amount: null, reason: '' });
+
+const CONVERSATION = [
+  handler('GET', 'rounds/[roundId]/conversation', { path: ({ roundId }) => `/api/rounds/${roundId}/conversation`, access: readers }),
+  handler('POST', 'rounds/[roundId]/comments', { path: ({ roundId }) => `/api/rounds/${roundId}/comments`, access: fitters, body: () => ({ id: v7(), body: 'Look at the knee.', place: null, sign: null, asksCheck: null }) }),
+  handler('PATCH', 'comments/[commentId]', { path: ({ commentId }) => `/api/comments/${commentId}`, access: owner, body: () => ({ version: 1, body: 'The right leg?' }) }),
+  handler('DELETE', 'comments/[commentId]', { path: ({ commentId }) => `/api/comments/${commentId}`, access: owner }),
+  handler('POST', 'rounds/[roundId]/proposals', { path: ({ roundId }) => `/api/rounds/${roundId}/proposals`, access: fitters, body: () => ({ id: v7(), reason: 'Because.', changes: [change()] }) }),
+  handler('POST', 'proposals/[proposalId]/answer', { path: ({ proposalId }) => `/api/proposals/${proposalId}/answer`, access: owner, body: () => ({ taken: [] }) }),
+]; // prettier-ignore
+
 export const HANDLER_ROWS: HandlerRow[] = [
   ...NOWHERE,
   handler('GET', 'health', { path: () => '/api/health', access: everyone }),
@@ -171,4 +195,14 @@ export const HANDLER_ROWS: HandlerRow[] = [
   ...JOURNALS,
   ...ROUNDS,
   ...PHOTOS,
+  ...SHARING,
+  ...CONVERSATION,
+  handler('PATCH', 'admin/users/[userId]', { path: ({ testerId }) => `/api/admin/users/${testerId}`, access: only('signed-out', 'admin'), body: () => ({ isAdmin: false }) }), // prettier-ignore
+  // Each role has one session in its world, so that there is no other to end.
+  handler('DELETE', 'sessions/[which]', { path: () => '/api/sessions/others', access: only('signed-out') }),
+  handler('POST', 'bin/[kind]/[id]/restore', {
+    path: ({ photoId }) => `/api/bin/photo/${photoId}/restore`,
+    access: owner,
+    isInBin: true,
+  }),
 ];

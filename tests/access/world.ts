@@ -12,6 +12,17 @@ export interface World {
   changeId: string;
   photoId: string;
   measuredId: string;
+  /** What the reader holds. */
+  grantId: string;
+  /** To the address of `other`, not answered yet, with the secret of its link. */
+  invitationId: string;
+  invitationToken: string;
+  /** The account of the tester. */
+  testerId: string;
+  /** The owner's. */
+  commentId: string;
+  /** The fitter's, not answered. */
+  proposalId: string;
   /** The secret of each role's session; none for who is signed out. */
   sessions: Record<Role, string | null>;
 }
@@ -26,12 +37,22 @@ export const unknownIds = (): Ids => ({
   changeId: v7(),
   photoId: v7(),
   measuredId: v7(),
+  grantId: v7(),
+  invitationId: v7(),
+  invitationToken: randomBytes(32).toString('base64url'),
+  testerId: v7(),
+  commentId: v7(),
+  proposalId: v7(),
 });
 
 const DAY_MS = 86_400_000;
 
-async function addPerson(tx: TransactionSql, role: Role): Promise<{ userId: string; secret: string }> {
-  const [userId, secret] = [v7(), randomBytes(32).toString('base64url')];
+async function addPerson(
+  tx: TransactionSql,
+  role: Role,
+  userId: string,
+): Promise<{ userId: string; secret: string }> {
+  const secret = randomBytes(32).toString('base64url');
   await tx`insert into users (id, email, email_verified_at, display_name, password_hash, is_admin, is_pattern_maker, is_fitter)
     values (${userId}, ${`${userId}@example.org`}, now(), ${role}, 'none', ${role === 'admin'}, ${role === 'pattern maker'}, ${role === 'fitter'})`;
   const inAWeek = new Date(Date.now() + 7 * DAY_MS);
@@ -72,7 +93,9 @@ export function makeWorld(sql: Sql): Promise<World> {
   return sql.begin(async (tx) => {
     const ids = unknownIds();
     const people = new Map<Role, { userId: string; secret: string }>();
-    for (const role of ROLES) if (role !== 'anonymous') people.set(role, await addPerson(tx, role));
+    for (const role of ROLES)
+      if (role !== 'anonymous')
+        people.set(role, await addPerson(tx, role, role === 'tester' ? ids.testerId : v7()));
     const ownerId = people.get('owner')?.userId ?? '';
     await addThings(tx, ownerId, ids);
     for (const [role, { userId }] of people) {
@@ -81,8 +104,15 @@ export function makeWorld(sql: Sql): Promise<World> {
       const { level, expiresInDays, isRevoked } = grant;
       const expiresAt = expiresInDays === null ? null : new Date(Date.now() + expiresInDays * DAY_MS);
       await tx`insert into grants (id, subject_user_id, journal_id, level, granted_by, expires_at, revoked_at)
-        values (${v7()}, ${userId}, ${ids.journalId}, ${level}, ${ownerId}, ${expiresAt}, ${isRevoked ? new Date() : null})`;
+        values (${role === 'reader' ? ids.grantId : v7()}, ${userId}, ${ids.journalId}, ${level}, ${ownerId}, ${expiresAt}, ${isRevoked ? new Date() : null})`;
     }
+    const otherEmail = `${people.get('other')?.userId}@example.org`;
+    await tx`insert into grants (id, invited_email, token_hash, journal_id, level, granted_by)
+      values (${ids.invitationId}, ${otherEmail}, ${createHash('sha256').update(ids.invitationToken).digest('hex')}, ${ids.journalId}, 'read', ${ownerId})`;
+    await tx`insert into comments (id, round_id, author_id, body) values (${ids.commentId}, ${ids.roundId}, ${ownerId}, 'The left leg?')`;
+    await tx`insert into proposals (id, round_id, author_id, reason)
+      values (${ids.proposalId}, ${ids.roundId}, ${people.get('fitter')?.userId ?? ''}, 'Let it out first.')`;
+    await tx`insert into proposed_changes (id, proposal_id, correction, side) values (${v7()}, ${ids.proposalId}, 'proposed', 'both')`;
     const sessions = Object.fromEntries(ROLES.map((role) => [role, people.get(role)?.secret ?? null]));
     return { ...ids, sessions: sessions as World['sessions'] };
   });

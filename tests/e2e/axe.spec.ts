@@ -9,6 +9,8 @@ const SIGNED_OUT = [
   '/forgot',
   '/verify',
   '/reset',
+  '/invitation',
+  '/new-address',
   '/dev/mail',
   '/dev/parts',
   '/nothing-here',
@@ -21,6 +23,12 @@ const SIGNED_IN = [
   '/patterns',
   '/patterns/new',
   '/settings',
+  '/settings/password',
+  '/settings/address',
+  '/settings/sessions',
+  '/settings/leave',
+  '/fittings',
+  '/bin',
 ];
 
 async function signIn(page: Page): Promise<void> {

@@ -20,7 +20,8 @@ export async function lettersTo(database: { owner: Sql }, email: string): Promis
     rows.map(async ({ id }) => {
       const mail = await findUnsentMail(id);
       if (!mail) return [];
-      const secret = mail.textBody.includes(LINK_SECRET) ? await issueLinkSecret(mail) : null;
+      const link = mail.textBody.includes(LINK_SECRET) ? await issueLinkSecret(mail) : 'void';
+      const secret = link === 'void' ? null : link.secret;
       const { subject, kind, messageId, textBody: text } = mail;
       return [{ id, subject, kind, messageId, text, secret }];
     }),

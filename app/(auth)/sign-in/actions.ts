@@ -3,6 +3,7 @@ import { redirect } from 'next/navigation';
 import type { Route } from 'next';
 import { ownPath, signInSchema } from '@/components/account/account-schema';
 import { findForSignIn, resendVerification } from '@/db/queries/accounts';
+import { comeBack } from '@/db/queries/own-account';
 import { verifyPassword } from '@/lib/auth/password';
 import { signInAs } from '@/lib/auth/sign-in';
 import { clearPoints, giveBack, takePoint } from '@/lib/limits/limit';
@@ -24,6 +25,7 @@ export const signIn = formAction(signInSchema, async ({ email, password, next },
     if (!(await takePoint('mail', [`account ${email}`]))) await resendVerification(account);
     return { message: 'Your address is not confirmed yet. A new link is on its way to it.' };
   }
+  if (account.isLeaving) await comeBack(account.userId);
   await Promise.all([clearPoints('sign-in', byAccount), giveBack('sign-in', byAddress)]);
   await signInAs(account.userId, request);
   return redirect(ownPath(next) as Route);

@@ -1,4 +1,5 @@
 import type { Metadata } from 'next';
+import { AccountLinks } from '@/components/settings/AccountLinks';
 import { SignOut } from '@/components/settings/SignOut';
 import { PreferencesEditor } from '@/components/settings/PreferencesEditor';
 import { PageHead } from '@/components/ui/PageHead';
@@ -20,6 +21,7 @@ export default async function SettingsPage() {
         />
         <Section title="Signed in">
           <p>as {viewer.email}</p>
+          <AccountLinks isAdmin={viewer.isAdmin} />
           <SignOut userId={viewer.userId} action={signOut} />
         </Section>
       </div>
