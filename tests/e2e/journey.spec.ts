@@ -88,7 +88,7 @@ test('a stranger signs up and takes a garment through two rounds, side by side',
     await expect(page.getByText('7 mm on the piece')).toBeVisible();
     await expect(page.getByText('Went')).toBeVisible();
     await expect(page.getByText('pulling to none')).toBeVisible();
-    await expect(page.getByRole('img', { name: 'Round 2, Back' })).toBeVisible();
+    await expect(page.getByRole('figure', { name: /^Round 2/ })).toBeVisible();
   });
 });
 
